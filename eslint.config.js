@@ -15,7 +15,18 @@ export const coreLayers = {
   estimation: ['errors', 'units', 'numerics', 'library', 'symmetry', 'geometry', 'record', 'dshell'],
   spin: ['errors', 'units', 'numerics', 'library', 'record', 'dshell', 'estimation'],
   magnetism: ['errors', 'units', 'numerics', 'library', 'symmetry', 'dshell', 'estimation'],
-  transitions: ['errors', 'units', 'numerics', 'library', 'symmetry', 'geometry', 'record', 'dshell', 'estimation', 'spin'],
+  transitions: [
+    'errors',
+    'units',
+    'numerics',
+    'library',
+    'symmetry',
+    'geometry',
+    'record',
+    'dshell',
+    'estimation',
+    'spin',
+  ],
   spectrum: ['errors', 'units', 'numerics', 'transitions'],
   colour: ['errors', 'units', 'numerics', 'library', 'spectrum'],
   prediction: [
@@ -27,7 +38,17 @@ export const coreLayers = {
     ...['spin', 'magnetism', 'transitions', 'spectrum', 'colour', 'prediction'],
   ],
   measured: ['errors', 'units', 'numerics', 'library', 'record', 'dshell', 'spectrum'],
-  agreement: ['errors', 'units', 'numerics', 'library', 'record', 'estimation', 'measured', 'prediction', 'colour'],
+  agreement: [
+    'errors',
+    'units',
+    'numerics',
+    'library',
+    'record',
+    'estimation',
+    'measured',
+    'prediction',
+    'colour',
+  ],
 };
 
 const root = import.meta.dirname;
@@ -43,25 +64,32 @@ function place(path) {
 function refusal(from, to, specifier) {
   if (from.top === 'core') {
     if (to === null) {
-      return specifier.startsWith('node:') || /^(electron|react|react-dom|dexie|recharts)(\/|$)/.test(specifier)
+      return specifier.startsWith('node:') ||
+        /^(electron|react|react-dom|dexie|recharts)(\/|$)/.test(specifier)
         ? `core knows no screen, no database and no Node: it may not import "${specifier}".`
         : null;
     }
-    if (to.top !== 'core') return `core imports neither main nor renderer; imports run renderer -> core and main -> core.`;
+    if (to.top !== 'core')
+      return `core imports neither main nor renderer; imports run renderer -> core and main -> core.`;
     if (from.folder === 'index' || from.folder === to.folder) return null;
     const allowed = coreLayers[from.folder];
-    if (allowed === undefined) return `core/${from.folder} has no row in the table of layers (eslint.config.js).`;
+    if (allowed === undefined)
+      return `core/${from.folder} has no row in the table of layers (eslint.config.js).`;
     if (to.folder === 'errors' || allowed.includes(to.folder)) return null;
     return `core/${from.folder} may import ${allowed.map((name) => `core/${name}`).join(', ')}; not core/${to.folder}.`;
   }
   if (from.top === 'renderer') {
     if (to === null) {
-      if (specifier.startsWith('node:') || specifier === 'electron') return `renderer has no Node and no Electron: use the bridge in renderer/host.`;
-      if (/^dexie/.test(specifier) && from.folder !== 'store') return `only renderer/store imports "${specifier}".`;
-      if (specifier === 'recharts' && from.folder !== 'plots') return `only renderer/plots imports "recharts".`;
+      if (specifier.startsWith('node:') || specifier === 'electron')
+        return `renderer has no Node and no Electron: use the bridge in renderer/host.`;
+      if (/^dexie/.test(specifier) && from.folder !== 'store')
+        return `only renderer/store imports "${specifier}".`;
+      if (specifier === 'recharts' && from.folder !== 'plots')
+        return `only renderer/plots imports "recharts".`;
       return null;
     }
-    if (to.top === 'main') return `renderer never imports main; the bridge interface is in renderer/host/bridge.ts.`;
+    if (to.top === 'main')
+      return `renderer never imports main; the bridge interface is in renderer/host/bridge.ts.`;
     return null;
   }
   if (from.top === 'main' && to !== null && to.top === 'renderer' && to.folder !== 'host') {
@@ -92,7 +120,9 @@ export const importDirection = {
 };
 
 export default tseslint.config(
-  { ignores: ['dist', 'release', 'coverage', 'node_modules', 'test-results', 'playwright-report', '.reports'] },
+  {
+    ignores: ['dist', 'release', 'coverage', 'node_modules', 'test-results', 'playwright-report', '.reports'],
+  },
   ...tseslint.configs.recommended,
   {
     files: ['**/*.ts', '**/*.tsx'],
@@ -125,7 +155,17 @@ export default tseslint.config(
     rules: {
       'no-restricted-globals': [
         'error',
-        ...['window', 'document', 'navigator', 'process', 'console', 'Buffer', 'require', 'setTimeout', 'fetch'],
+        ...[
+          'window',
+          'document',
+          'navigator',
+          'process',
+          'console',
+          'Buffer',
+          'require',
+          'setTimeout',
+          'fetch',
+        ],
       ],
     },
   },

@@ -55,7 +55,8 @@ export class SpinhueError extends Error implements Problem {
 }
 
 /** A result that may be refused: everything wrong at once, not only the first. */
-export type Checked<T> = { readonly ok: true; readonly value: T } | { readonly ok: false; readonly problems: readonly Problem[] };
+export type Checked<T> =
+  { readonly ok: true; readonly value: T } | { readonly ok: false; readonly problems: readonly Problem[] };
 
 export const accepted = <T>(value: T): Checked<T> => ({ ok: true, value });
 export const refused = <T>(...problems: Problem[]): Checked<T> => ({ ok: false, problems });

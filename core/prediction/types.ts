@@ -35,7 +35,11 @@ export interface Prediction {
   readonly levels: readonly CubicLevel[];
   /** Ascending energy. */
   readonly bands: readonly Band[];
-  readonly conditions: { readonly concentration_mM: number; readonly path_cm: number; readonly temperature_K: number };
+  readonly conditions: {
+    readonly concentration_mM: number;
+    readonly path_cm: number;
+    readonly temperature_K: number;
+  };
   /** At the stated conditions; null where no spectrum could be estimated. */
   readonly colour: SeenColour | null;
   /** Seen colour at a third, once and three times the stated concentration × path. */
@@ -47,7 +51,11 @@ export interface Prediction {
   readonly leftOut: readonly string[];
   readonly cautions: readonly Caution[];
   /** The library and model it was made with. */
-  readonly madeWith: { readonly parameterSet: string; readonly parameterHash: string; readonly modelVersion: string };
+  readonly madeWith: {
+    readonly parameterSet: string;
+    readonly parameterHash: string;
+    readonly modelVersion: string;
+  };
 }
 
 export type PredictionOutcome =

@@ -53,7 +53,10 @@ export const parameterSetSchema = z.strictObject({
   parentId: z.string().nullable(),
   /** SHA-256 of the canonical JSON of `values` and the library version it is laid over. */
   hash: z.string(),
-  values: z.record(z.string(), z.strictObject({ value: z.number(), sigma: z.number().nonnegative(), source: z.string() })),
+  values: z.record(
+    z.string(),
+    z.strictObject({ value: z.number(), sigma: z.number().nonnegative(), source: z.string() }),
+  ),
 });
 export type ParameterSet = z.infer<typeof parameterSetSchema>;
 

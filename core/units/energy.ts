@@ -1,4 +1,10 @@
-import { avogadro_per_mol, elementaryCharge_C, planck_J_s, speedOfLight_m_s, wavenumber_J } from './constants';
+import {
+  avogadro_per_mol,
+  elementaryCharge_C,
+  planck_J_s,
+  speedOfLight_m_s,
+  wavenumber_J,
+} from './constants';
 
 /** Units in which the energy of a transition is shown. Wavenumber (cm⁻¹) is what the core computes in. */
 export type EnergyUnit = 'cm-1' | 'nm' | 'eV' | 'kJ/mol' | 'THz';

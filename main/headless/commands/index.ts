@@ -1,0 +1,4 @@
+import type { Command } from '../command';
+
+/** One file per command in this folder; the order here is the order of the help text. */
+export const commands: readonly Command[] = [];
