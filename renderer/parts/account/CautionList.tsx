@@ -1,0 +1,30 @@
+import { type Caution } from '../../../core/prediction/types';
+import './CautionList.css';
+
+/** General cautions about the substances in play. They inform, print with the page and cannot be folded away. */
+export function CautionList({ cautions }: { readonly cautions: readonly Caution[] }) {
+  return (
+    <section className="caution-list" aria-label="Safety cautions">
+      <h3>Before anything is made</h3>
+      {cautions.length === 0 ? (
+        <p className="caution-none">
+          No caution on file for these substances. That means not assessed, not safe.
+        </p>
+      ) : (
+        <ul>
+          {cautions.map(({ id, about, text, codes, source }) => (
+            <li key={id}>
+              <strong>{about}.</strong> {text}
+              {codes.length > 0 && <span className="caution-codes"> {codes.join(', ')}</span>}
+              <span className="caution-source"> {source}</span>
+            </li>
+          ))}
+        </ul>
+      )}
+      <p className="caution-standing">
+        General caution only. Read the current safety data sheets, assess the risk on the spot, follow local
+        rules; some work needs a licence or supervision.
+      </p>
+    </section>
+  );
+}

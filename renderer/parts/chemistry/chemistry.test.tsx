@@ -1,0 +1,73 @@
+import { afterEach, describe, expect, it } from 'vitest';
+import { cleanup, render, screen } from '@testing-library/react';
+import { Formula } from './Formula';
+import { formulaPieces, spokenFormula } from './formulaPieces';
+import { spokenTerm } from './termLabel';
+import { TermSymbol } from './TermSymbol';
+import { TermText } from './TermText';
+
+afterEach(cleanup);
+const marked = (formula: string) =>
+  formulaPieces(formula)
+    .map(({ kind, text }) => ({ text, subscript: `_${text}`, superscript: `^${text}` })[kind])
+    .join('|');
+
+describe('a term symbol', () => {
+  it('is set with its multiplicity raised and its irreducible representation lowered', () => {
+    render(<TermSymbol label="4T2g" />);
+    expect(document.querySelector('sup')!.textContent).toBe('4');
+    expect(document.querySelector('sub')!.textContent).toBe('2g');
+    expect(screen.getByText('quartet T two g')).toBeTruthy();
+  });
+
+  it('is spoken in every form the trade uses', () => {
+    expect(spokenTerm('2E')).toBe('doublet E');
+    expect(spokenTerm('3T1g(P)')).toBe('triplet T one g from P');
+    expect(spokenTerm("3A2''")).toBe('triplet A two double prime');
+    expect(spokenTerm('6A1g')).toBe('sextet A one g');
+    expect(spokenTerm('4F')).toBe('quartet F');
+  });
+
+  it('leaves other labels as they are', () => {
+    render(<TermSymbol label="Cl- -> Co (t2g)" />);
+    expect(screen.getByText('Cl- -> Co (t2g)')).toBeTruthy();
+    expect(document.querySelector('sup')).toBeNull();
+  });
+
+  it('has a form for SVG text', () => {
+    render(
+      <svg>
+        <text data-testid="label">
+          <TermText label="2T1g" />
+        </text>
+      </svg>,
+    );
+    expect(screen.getByTestId('label').textContent).toBe('2T1g');
+  });
+});
+
+describe('a formula', () => {
+  it('has counts lowered and the charge raised', () => {
+    expect(marked('[Cr(NH3)5Cl]2+')).toBe('[Cr(NH|_3|)|_5|Cl]|^2+');
+    expect(marked('[Fe(ox)3]3-')).toBe('[Fe(ox)|_3|]|^3−');
+    expect(marked('[Co(en)2Cl2]+')).toBe('[Co(en)|_2|Cl|_2|]|^+');
+    expect(marked('[Ni(CO)4]')).toBe('[Ni(CO)|_4|]');
+  });
+
+  it('counts counter-ions after the bracket below the line, and solvate on it', () => {
+    expect(marked('[Ni(en)3]Cl2·2H2O')).toBe('[Ni(en)|_3|]Cl|_2|·2H|_2|O');
+    expect(marked('K3[Fe(CN)6]')).toBe('K|_3|[Fe(CN)|_6|]');
+    expect(marked('[Fe2(CN)10]6-')).toBe('[Fe|_2|(CN)|_10|]|^6−');
+  });
+
+  it('reads a charge on a plain ion', () => {
+    expect(marked('Cl-')).toBe('Cl|^−');
+    expect(marked('SO4^2-')).toBe('SO|_4|^2−');
+  });
+
+  it('is read aloud by its name, or else letter by letter with the charge said', () => {
+    expect(spokenFormula('[Cr(NH3)5Cl]2+')).toBe('Cr NH 3 5 Cl charge 2 plus');
+    render(<Formula formula="[Cr(NH3)6]3+" name="hexaamminechromium(III)" />);
+    expect(screen.getByText('hexaamminechromium(III)')).toBeTruthy();
+  });
+});

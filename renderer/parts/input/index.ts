@@ -1,0 +1,3 @@
+export { Keys } from './Keys';
+export { matchOptions, type SelectOption } from './matchOptions';
+export { SearchableSelect } from './SearchableSelect';

@@ -1,0 +1,6 @@
+export { formatFigures, formatGiven, formatShare } from './formatNumber';
+export { writeRange } from './formatRange';
+export { NumberWithRange, type NumberWithRangeProps } from './NumberWithRange';
+export { intervalUnit, UnitProvider, useUnit, type UnitChoice } from './UnitContext';
+export { energyUnits, unitSpoken, unitText } from './unitNames';
+export { UnitSwitch } from './UnitSwitch';

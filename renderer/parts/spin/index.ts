@@ -1,0 +1,1 @@
+export { SpinBar } from './SpinBar';
