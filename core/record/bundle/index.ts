@@ -1,0 +1,11 @@
+export { bundleExtension, bundleFormat, bundleLimits, bundleVersion, type BundleLimits } from './format';
+export {
+  bundleTables,
+  emptyContent,
+  tableNames,
+  type BundleContent,
+  type TableName,
+  type TableRow,
+} from './tables';
+export { readBundle, type BundleReading } from './read';
+export { bundlePieces, contentChecksum, writeBundle } from './write';
