@@ -7,5 +7,6 @@ export {
   type TableName,
   type TableRow,
 } from './tables';
+export { mergeBundles, type Choose, type MergeConflict, type MergeResult, type Side } from './merge';
 export { readBundle, type BundleReading } from './read';
 export { bundlePieces, contentChecksum, writeBundle } from './write';

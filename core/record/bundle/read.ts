@@ -5,10 +5,10 @@ import { bundleFormat, bundleLimits, bundleVersion, type BundleLimits } from './
 import { findTraps } from './guard';
 import { migrateContent } from './migrate';
 import {
-  bundleTables,
   emptyContent,
   rowsOf,
   tableNames,
+  tableOf,
   type AnyRow,
   type BundleContent,
   type TableName,
@@ -101,7 +101,7 @@ function readRows(table: TableName, rows: unknown, problems: Problem[]): AnyRow[
   const firstIndex = new Map<string, number>();
   for (const [i, row] of rows.entries()) {
     const place = `${table}[${i}]`;
-    const checked = bundleTables[table].schema.safeParse(row, { reportInput: true });
+    const checked = tableOf(table).schema.safeParse(row, { reportInput: true });
     if (!checked.success) {
       problems.push(...problemsFromZod(checked.error, place));
       continue;
@@ -113,6 +113,11 @@ function readRows(table: TableName, rows: unknown, problems: Problem[]): AnyRow[
         message: `${place}.id ${checked.data.id} is also the id of ${table}[${earlier}]`,
         field: `${place}.id`,
       });
+      continue;
+    }
+    const flaw = tableOf(table).check?.(checked.data) ?? null;
+    if (flaw !== null) {
+      problems.push({ code: 'integrity', message: `${place}: ${flaw}`, field: place });
       continue;
     }
     firstIndex.set(checked.data.id, i);
@@ -129,17 +134,15 @@ function dropBrokenLinks(content: Record<TableName, AnyRow[]>, problems: Problem
       tableNames.map((table) => [table, new Set(content[table].map((row) => row.id))]),
     ) as Record<TableName, Set<string>>;
     for (const table of tableNames) {
-      const links = Object.entries(bundleTables[table].links) as [string, TableName][];
       const kept = content[table].filter((row) => {
-        const broken = links.find(([field, target]) => {
-          const id = (row as unknown as Record<string, unknown>)[field];
-          return typeof id === 'string' && !ids[target].has(id);
-        });
+        const broken = tableOf(table)
+          .links(row)
+          .find((link) => link.id !== null && !ids[link.table].has(link.id));
         if (broken === undefined) return true;
         problems.push({
           code: 'integrity',
-          message: `${table} ${row.id}: ${broken[0]} names a row of ${broken[1]} that the bundle does not hold`,
-          field: `${table}.${row.id}.${broken[0]}`,
+          message: `${table} ${row.id}: ${broken.field} names a row of ${broken.table} that the bundle does not hold`,
+          field: `${table}.${row.id}.${broken.field}`,
         });
         return false;
       });
