@@ -1,0 +1,63 @@
+import type { Prediction } from '../../../core/prediction/types';
+import type { Candidate, FrozenPrediction, ParameterSet } from '../../../core/record/project';
+import type { SpinhueDatabase } from '../database';
+import type { Journal } from '../journal/journal';
+
+/** Predictions as they stood when frozen: added, never edited. */
+export class FrozenPredictionRepository {
+  readonly #db: SpinhueDatabase;
+  readonly #journal: Journal;
+
+  constructor(db: SpinhueDatabase, journal: Journal) {
+    this.#db = db;
+    this.#journal = journal;
+  }
+
+  /** Of one candidate, newest first. */
+  async of(candidateId: string): Promise<FrozenPrediction[]> {
+    const all = await this.#db.frozenPredictions.where('candidateId').equals(candidateId).toArray();
+    return all
+      .filter(({ deletedAt }) => deletedAt === null)
+      .sort((one, other) => other.frozenAt.localeCompare(one.frozenAt));
+  }
+
+  freeze(
+    candidate: Candidate,
+    prediction: Prediction,
+    reason: string,
+    label: string,
+  ): Promise<FrozenPrediction> {
+    return this.#journal.record(candidate.projectId, label, async (writer) => {
+      const [row] = await writer.create('frozenPredictions', [
+        {
+          projectId: candidate.projectId,
+          candidateId: candidate.id,
+          frozenAt: writer.now,
+          reason,
+          parameterHash: prediction.madeWith.parameterHash,
+          modelVersion: prediction.madeWith.modelVersion,
+          // Through JSON, so that what is kept is what an export will hold.
+          prediction: JSON.parse(JSON.stringify(prediction)) as Record<string, unknown>,
+        },
+      ]);
+      return row!;
+    });
+  }
+}
+
+export class ParameterSetRepository {
+  readonly #db: SpinhueDatabase;
+
+  constructor(db: SpinhueDatabase) {
+    this.#db = db;
+  }
+
+  get(id: string): Promise<ParameterSet | undefined> {
+    return this.#db.parameterSets.get(id);
+  }
+
+  async of(projectId: string): Promise<ParameterSet[]> {
+    const all = await this.#db.parameterSets.where('projectId').equals(projectId).toArray();
+    return all.filter(({ deletedAt }) => deletedAt === null);
+  }
+}
