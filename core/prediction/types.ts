@@ -5,17 +5,9 @@ import type { SpinPrediction } from '../spin/types';
 import type { Band } from '../transitions/types';
 import type { ColourCloud, SeenColour } from '../colour/types';
 import type { Composition } from '../record/composition';
+import type { Caution } from '../library/cautions';
 
-/** A general caution about a substance in play. It informs; it never hides a result. */
-export interface Caution {
-  readonly id: string;
-  /** Ligand, ion or counter-ion it is about. */
-  readonly about: string;
-  readonly text: string;
-  /** GHS hazard statement codes, where known. */
-  readonly codes: readonly string[];
-  readonly source: string;
-}
+export type { Caution };
 
 /** Everything said about one complex before it is made. */
 export interface Prediction {
