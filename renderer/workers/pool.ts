@@ -1,0 +1,54 @@
+import type { PredictionOutcome } from '../../core/prediction/types';
+import type { CandidateInput } from '../../core/record/composition';
+import { EstimateClient, type TakeSummaries, type WorkerLike } from './client';
+import type { Overlay } from './protocol';
+
+/** Rows per request: large enough to keep a worker busy, small enough to share the work evenly. */
+const portion = 200;
+
+/**
+ * One worker answers single questions at once, the others work through long lists. They are started when first needed.
+ */
+export class EstimatePool {
+  readonly #start: () => WorkerLike;
+  readonly #size: number;
+  #single: EstimateClient | null = null;
+  #bulk: EstimateClient[] = [];
+
+  constructor(start: () => WorkerLike, size: number) {
+    this.#start = start;
+    this.#size = Math.max(1, size);
+  }
+
+  one(input: CandidateInput, overlay: Overlay, draws = 0, signal?: AbortSignal): Promise<PredictionOutcome> {
+    this.#single ??= new EstimateClient(this.#start());
+    return this.#single.one(input, overlay, draws, signal);
+  }
+
+  /** Shares the list out; resolves when all is done, rejects on the first failure or when the signal aborts. */
+  async many(
+    inputs: readonly CandidateInput[],
+    overlay: Overlay,
+    take: TakeSummaries,
+    signal?: AbortSignal,
+  ): Promise<void> {
+    const wanted = Math.min(this.#size, Math.ceil(inputs.length / portion));
+    while (this.#bulk.length < wanted) this.#bulk.push(new EstimateClient(this.#start()));
+    let next = 0;
+    const work = async (client: EstimateClient): Promise<void> => {
+      while (next < inputs.length) {
+        const share = inputs.slice(next, next + portion);
+        next += portion;
+        await client.many(share, overlay, take, signal);
+      }
+    };
+    await Promise.all(this.#bulk.slice(0, wanted).map(work));
+  }
+
+  close(): void {
+    this.#single?.close();
+    for (const client of this.#bulk) client.close();
+    this.#single = null;
+    this.#bulk = [];
+  }
+}

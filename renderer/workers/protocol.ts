@@ -1,0 +1,34 @@
+import type { PredictionOutcome } from '../../core/prediction/types';
+import type { CandidateInput } from '../../core/record/composition';
+import type { ParameterSet } from '../../core/record/project';
+import type { CandidateSummary } from './estimateSummary';
+
+/** Values laid over the library; null for the library as it is. */
+export type Overlay = Pick<ParameterSet, 'name' | 'values'> | null;
+
+export type ToWorker =
+  | {
+      readonly kind: 'one';
+      readonly job: number;
+      readonly input: CandidateInput;
+      readonly overlay: Overlay;
+      /** Draws for the colour cloud; 0 for none. */
+      readonly draws: number;
+    }
+  | {
+      readonly kind: 'many';
+      readonly job: number;
+      readonly inputs: readonly CandidateInput[];
+      readonly overlay: Overlay;
+    }
+  | { readonly kind: 'cancel'; readonly job: number };
+
+export type FromWorker =
+  | { readonly kind: 'outcome'; readonly job: number; readonly outcome: PredictionOutcome }
+  | {
+      readonly kind: 'summaries';
+      readonly job: number;
+      readonly summaries: readonly (readonly [id: string, summary: CandidateSummary])[];
+    }
+  | { readonly kind: 'finished'; readonly job: number }
+  | { readonly kind: 'failed'; readonly job: number; readonly message: string };
