@@ -1,0 +1,37 @@
+import { writeToStep } from '../../parts/number/formatNumber';
+import { type Interval } from './scale';
+
+export interface Ticks {
+  readonly values: readonly number[];
+  readonly text: (value: number) => string;
+}
+
+/** 1, 2 or 5 times a power of ten, so that about `count` steps fit. */
+export function niceStep(length: number, count: number): number {
+  if (!(length > 0) || !Number.isFinite(length)) return 1;
+  const rough = length / Math.max(1, count);
+  const power = 10 ** Math.floor(Math.log10(rough));
+  const lead = rough / power;
+  return power * (lead < 1.5 ? 1 : lead < 3.5 ? 2 : lead < 7.5 ? 5 : 10);
+}
+
+/** Round numbers inside the interval, which may run either way. */
+export function linearTicks([from, to]: Interval, count: number): Ticks {
+  const [low, high] = from < to ? [from, to] : [to, from];
+  const step = niceStep(high - low, count);
+  const values: number[] = [];
+  const first = Math.ceil(low / step - 1e-9);
+  const last = Math.floor(high / step + 1e-9);
+  for (let index = first; index <= last; index++) values.push(index * step + 0);
+  const leading = 10 ** Math.floor(Math.log10(step) + 1e-9);
+  return { values, text: (value) => writeToStep(value, leading) };
+}
+
+/** Powers of ten inside the interval, every second or third where there are many. */
+export function logTicks([low, high]: Interval, count: number): Ticks {
+  const [first, last] = [Math.ceil(Math.log10(low) - 1e-9), Math.floor(Math.log10(high) + 1e-9)];
+  const every = Math.max(1, Math.ceil((last - first + 1) / Math.max(1, count)));
+  const values: number[] = [];
+  for (let power = first; power <= last; power += every) values.push(10 ** power);
+  return { values, text: (value) => writeToStep(value, value) };
+}

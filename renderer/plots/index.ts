@@ -1,0 +1,16 @@
+export { BlandAltmanPlot, type AgreementLimits } from './agreement/BlandAltmanPlot';
+export { type Pair } from './agreement/pairs';
+export { ParityPlot, type PairPlotProps } from './agreement/ParityPlot';
+export { ResidualPlot } from './agreement/ResidualPlot';
+export { BandFitPlot, type BandFitPlotProps, type FittedBand } from './bandFit/BandFitPlot';
+export { ColourCloudPlot, type ColourCloudPlotProps, type ColourTarget } from './colourCloud/ColourCloudPlot';
+export { SaveFigureProvider, type SaveFigure } from './figure/SaveFigure';
+export { PlotTable, tableText, type PlotTableData } from './frame/PlotTable';
+export { type CandidatePlace } from './levelDiagram/CandidateMark';
+export { LevelDiagram, type LevelDiagramProps } from './levelDiagram/LevelDiagram';
+export { crossoversOf, linesFromLevels, type Crossover, type LevelLine } from './levelDiagram/levelLine';
+export { MomentPlot, type MomentPlotProps, type MomentSeries } from './moment/MomentPlot';
+export { ParetoPlot, type ParetoPlotProps } from './pareto/ParetoPlot';
+export { paretoFront, type ParetoPoint } from './pareto/paretoFront';
+export { SpectrumPlot, type SpectrumPlotProps } from './spectrum/SpectrumPlot';
+export { type SpectrumCurve } from './spectrum/spectrumUnits';
