@@ -1,4 +1,5 @@
 import type { Command } from '../command';
+import { readSpectrum } from './readSpectrum';
 
 /** One file per command in this folder; the order here is the order of the help text. */
-export const commands: readonly Command[] = [];
+export const commands: readonly Command[] = [readSpectrum];
