@@ -12,7 +12,10 @@ export function pathText(prefix: string, path: readonly PropertyKey[]): string {
 }
 
 function codeOf(issue: z.core.$ZodIssue): ErrorCode {
-  if (issue.code === 'invalid_type') return issue.input === undefined ? 'missing-field' : 'wrong-type';
+  // The input itself is not part of an issue by default; its type is, at the end of the message.
+  if (issue.code === 'invalid_type') {
+    return issue.message.endsWith('received undefined') ? 'missing-field' : 'wrong-type';
+  }
   if (issue.code === 'too_big' || issue.code === 'too_small') return 'out-of-range';
   return 'unknown-field-value';
 }
