@@ -35,9 +35,9 @@ function plainName({ rotation, parity }: Operation): { symbol: string; axis: Vec
   const shorter = Math.min(doubled, 2 * n - doubled);
   if (shorter === 0) return { symbol: 'σ', axis };
   const common = greatestCommonDivisor(shorter, 2 * n);
-  const [order, k] = [(2 * n) / common, shorter / common];
+  const [order, step] = [(2 * n) / common, shorter / common];
   // An even power of S_n with n odd is a rotation, so the tables call the turn by 2·72° with reflection S5^3.
-  return { symbol: power('S', order, k % 2 === 0 ? order - k : k), axis };
+  return { symbol: power('S', order, step % 2 === 0 ? order - step : step), axis };
 }
 
 const greatestCommonDivisor = (a: number, b: number): number =>
