@@ -36,13 +36,13 @@ function readSeries(
   if (points.saturated > 0) {
     warnings.push({
       code: 'saturated',
-      message: `saturated: ${plural(points.saturated, 'point')} of ${title} beyond the range of the instrument; no value is taken`,
+      message: `${plural(points.saturated, 'point')} of ${title} saturated, beyond the range of the instrument; no value is taken`,
     });
   }
   if (points.missing > 0) {
     warnings.push({
       code: 'missing',
-      message: `missing: ${plural(points.missing, 'point')} of ${title} without a readable value`,
+      message: `${plural(points.missing, 'point')} of ${title} without a readable value`,
     });
   }
   const factor = choices.xUnit === undefined ? series.x.factor : 1;

@@ -40,6 +40,9 @@ function usualWidth(rows: readonly DataRow[]): number {
 const isDamaged = (each: Mark): boolean =>
   each.kind === 'text' && each.cells.length >= 2 && each.cells[0]!.kind === 'number';
 
+/** Two numbers at the start of a line under any dialect: above the table such a line is a row that was not understood. */
+const twoNumbers = /^\s*"?[+-]?\d+(?:[.,]\d+)?"?\s*[;,\t ]\s*"?[+-]?\d/;
+
 const someLines = (lines: readonly number[]): string =>
   `line${lines.length === 1 ? '' : 's'} ${lines.slice(0, 5).join(', ')}${lines.length > 5 ? ', …' : ''}`;
 
@@ -77,6 +80,16 @@ export function findTable(all: readonly Row[], dialect: Dialect, warnings: Readi
     }
     if (each.kind === 'text') damaged.push(each.row.line);
     rows.push({ line: each.row.line, cells: each.cells });
+  }
+  const unread = marks
+    .slice(0, start)
+    .filter((each) => each.kind === 'text' && twoNumbers.test(each.row.cells.join(' ')))
+    .map((each) => each.row.line);
+  if (unread.length > 0) {
+    warnings.push({
+      code: 'skipped-lines',
+      message: `${someLines(unread)} above the table: numbers in another layout than the table's; not read`,
+    });
   }
   if (skipped.length > 0) {
     warnings.push({

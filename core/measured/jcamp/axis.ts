@@ -102,6 +102,12 @@ export function axisOf(data: AsdfData, labels: AxisLabels, warnings: ReadingWarn
     const announced =
       labels.points !== undefined && labels.points > 1 ? (end - start) / (labels.points - 1) : step;
     const place = checkAxis(data, start, announced, labels);
+    if (place === null && labels.points !== undefined && count < labels.points) {
+      throw new ReadingError(
+        'truncated',
+        `the data hold ${count} of ${labels.points} points: the file is cut off after line ${data.lastLine}`,
+      );
+    }
     throw misfitError(place !== null && place !== 'truncated' ? place : misfit);
   }
   if (labels.points !== undefined && labels.points !== count) {

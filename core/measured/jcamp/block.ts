@@ -74,6 +74,22 @@ export function formOf(record: LabelledRecord): NumberForm {
   return { columns, peaks: record.label === 'PEAKTABLE' };
 }
 
+/** Names records that look like data and are not among those read: a damaged label must not cost points in silence. */
+export function reportUnread(
+  block: Block,
+  read: readonly LabelledRecord[],
+  warnings: ReadingWarning[],
+): void {
+  for (const record of block.records) {
+    if (read.includes(record) || record.lines.length < 2 || !/^\(\s*X\s*(?:\+\+|Y)/i.test(valueOf(record)))
+      continue;
+    warnings.push({
+      code: 'recovered',
+      message: `line ${record.line}: ##${shorten(record.written).slice(0, 40)}= looks like data and is not read`,
+    });
+  }
+}
+
 /** The lines after the one that names the form. */
 export function dataLines(record: LabelledRecord): readonly TextLine[] {
   const form = record.lines.findIndex((line) => line.text.trim() !== '');
@@ -226,6 +242,7 @@ export function readBlock(block: Block, limit: number, warnings: ReadingWarning[
     maxY: numberLabel(block, 'MAXY'),
     points: pointCount(block),
   };
+  reportUnread(block, [record], warnings);
   const name = shorten(block.title) || 'the spectrum';
   const numbers = readNumbers(record, scaling, limit, name, warnings);
   const unitText = (label: string) => {

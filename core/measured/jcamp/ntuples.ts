@@ -1,5 +1,5 @@
 import { ReadingError, readingLimits, type ReadSpectrum, type ReadingWarning } from '../reading/types';
-import { metadataOf, readNumbers, shorten, withUnits } from './block';
+import { metadataOf, readNumbers, reportUnread, shorten, withUnits } from './block';
 import { recordOf, type Block } from './blocks';
 import { valueOf, type LabelledRecord } from './labels';
 import { printedNumber, type PrintedNumber } from './numbers';
@@ -80,8 +80,15 @@ export function readNtuples(block: Block, limit: number, warnings: ReadingWarnin
     if (record.label === 'PAGE') {
       page = valueOf(record);
       points = undefined;
-    } else if (record.label === 'NPOINTS') points = record;
-    else if (record.label === 'DATATABLE') {
+    } else if (record.label === 'NPOINTS') {
+      if (points !== undefined && valueOf(points) !== valueOf(record)) {
+        throw new ReadingError(
+          'duplicate-label',
+          `line ${record.line}: a second, different NPOINTS on one page`,
+        );
+      }
+      points = record;
+    } else if (record.label === 'DATATABLE') {
       const name = shorten([block.title, page].filter((part) => part !== '').join(', ')) || 'the page';
       const scaling = {
         xFactor: x.factor,
@@ -99,6 +106,8 @@ export function readNtuples(block: Block, limit: number, warnings: ReadingWarnin
       if (spectra.length > readingLimits.spectra) throw new ReadingError('too-large', 'too many pages');
     }
   }
+  const tables = block.records.filter((record) => record.label === 'DATATABLE');
+  reportUnread(block, tables, warnings);
   if (spectra.length === 0)
     throw new ReadingError('not-supported', `the n-tuple block at line ${block.line} has no DATA TABLE`);
   return spectra;

@@ -44,6 +44,12 @@ function chooseBlocks(blocks: readonly Block[], warnings: ReadingWarning[]): Blo
     );
   }
   for (const block of blocks) {
+    if (block.isLink && holdsData(block)) {
+      warnings.push({
+        code: 'recovered',
+        message: `the LINK block at line ${block.line} holds data of its own, which are left out: the ##TITLE= of an inner block is missing`,
+      });
+    }
     if (block.isLink || chosen.includes(block)) continue;
     warnings.push({ code: 'skipped-block', message: `skipped ${name(block)}: not a UV-Vis spectrum` });
   }

@@ -43,7 +43,7 @@ export function orderCurve(
     const list = [...new Set(duplicates)].slice(0, 5).join(', ');
     warnings.push({
       code: 'duplicate-x',
-      message: `duplicate x in ${name}: ${duplicates.length} point${duplicates.length === 1 ? '' : 's'} (${list}); all are kept`,
+      message: `${name} has duplicate x: ${duplicates.length} point${duplicates.length === 1 ? '' : 's'} (${list}); all are kept`,
     });
   }
   if (direction > 0) return { x: [...x], y: [...y], fileOrder: 'ascending' };
