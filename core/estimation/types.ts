@@ -17,6 +17,15 @@ export interface Reason {
   readonly sigma?: number;
 }
 
+/**
+ * One cause of doubt and the change it makes at one standard deviation, in the unit of the quantity. Estimates that
+ * name the same cause move together: the shares of two complexes with a common ligand cancel in their difference.
+ */
+export interface DoubtShare {
+  readonly cause: string;
+  readonly sigma: number;
+}
+
 /** A number with its uncertainty and the account of both. `value` is null when it cannot be estimated. */
 export interface Estimate {
   readonly value: number | null;
@@ -25,6 +34,8 @@ export interface Estimate {
   readonly unit: 'cm-1';
   readonly route: EstimateRoute;
   readonly reasons: readonly Reason[];
+  /** The variance by cause; `sigma` is the root of the sum of their squares. */
+  readonly shares?: readonly DoubtShare[];
 }
 
 /** A remark on the whole estimate. `invalid` means: the model is known to fail here, do not trust the number. */

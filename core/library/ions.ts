@@ -1,4 +1,5 @@
 import metals from './data/metals.json';
+import { withChoices } from './choices';
 import { sourced, unknownValue, type RawSourced, type SourcedValue } from './sourced';
 
 export type TransitionPeriod = '3d' | '4d' | '5d';
@@ -85,7 +86,9 @@ const readIon = (raw: RawIon): IonRecord => ({
   note: raw.note ?? null,
 });
 
-export const ionRecords: readonly IonRecord[] = (metals.ions as unknown as RawIon[]).map(readIon);
+export const ionRecords: readonly IonRecord[] = (metals.ions as unknown as RawIon[])
+  .map(readIon)
+  .map(withChoices);
 
 /** An ion of which nothing but its d count is known. */
 export const bareIon = (

@@ -1,0 +1,144 @@
+import { findIon, type IonRecord, type LigandRecord, type ParameterLibrary } from '../library';
+import type { Composition } from '../record/composition';
+import type { CubicGeometry } from '../dshell/types';
+import { defaultDoubts } from './defaultDoubts';
+import { distanceExponent, distanceFactor, spinDistances } from './distance';
+import { octahedralStrength, type DonorField } from './fieldStrength';
+import { applicabilityFlags, leftOutOf } from './applicability';
+import { racahB, racahC, type DonorShare } from './racah';
+import { estimate, notEstimated } from './uncertain';
+import type { Estimate, Flag } from './types';
+
+/** 10Dq at the metal-ligand distance of each spin state, and halfway between them. */
+export interface SpinFields {
+  readonly high: Estimate;
+  readonly low: Estimate;
+  readonly middle: Estimate;
+}
+
+/** Everything that is estimated of the field of a complex before its levels are computed. */
+export interface FieldEstimate {
+  readonly ion: IonRecord;
+  readonly dElectrons: number;
+  readonly composition: Composition;
+  /** The cubic field whose levels stand for the complex; null for other polyhedra. */
+  readonly cubic: CubicGeometry | null;
+  readonly donors: readonly DonorField[];
+  readonly fields: SpinFields;
+  /** Whether the two spin states differ in 10Dq here (d4 to d7 of the 3d row in an octahedron). */
+  readonly twoDistances: boolean;
+  readonly racahB: Estimate;
+  readonly racahC: Estimate;
+  readonly zeta: Estimate;
+  readonly flags: readonly Flag[];
+  readonly leftOut: readonly string[];
+}
+
+/** d-electron sharing of the tables: which spin state the tabulated g of an ion is for. */
+const lowSpinScale = new Set(['Co3+', 'Ni3+', 'Ni4+', 'Co4+', 'Cu3+']);
+
+export const donorShares = (composition: Composition, library: ParameterLibrary): DonorShare[] =>
+  Object.entries(composition.ligands).flatMap(([id, count]) => {
+    const ligand: LigandRecord | undefined = library.ligands.get(id);
+    return ligand === undefined ? [] : [{ ligand, places: count * ligand.denticity }];
+  });
+
+/** Multiplies an estimate by a factor that is itself uncertain (relative sigma), under the name of its cause. */
+export function scaled(base: Estimate, factor: number, sigma: number, cause: string, text: string): Estimate {
+  if (base.value === null) return base;
+  const value = base.value * factor;
+  const shares = (base.shares ?? []).map((share) => ({ ...share, sigma: share.sigma * factor }));
+  return estimate(value, [...shares, { cause, sigma: value * sigma }], base.route, [
+    ...base.reasons,
+    { kind: 'assumption', text, sigma: value * sigma },
+  ]);
+}
+
+function spinFields(base: Estimate, ion: IonRecord, donors: readonly DonorShare[]): SpinFields | null {
+  const choice = ion.dElectrons >= 4 && ion.dElectrons <= 7 && ion.period === '3d';
+  const distances = choice ? spinDistances(ion, donors) : null;
+  if (distances === null || base.value === null) return null;
+  const { high_pm, low_pm } = distances;
+  const middle_pm = (high_pm + low_pm) / 2;
+  const from = lowSpinScale.has(ion.ion) ? low_pm : high_pm;
+  const at = (to: number, spin: string): Estimate => {
+    if (to === from) return base;
+    const factor = distanceFactor(from, to);
+    const sigma = Math.abs(Math.log(from / to)) * distanceExponent.sigma;
+    const text = `10Dq goes as r^-5.5: ${factor.toFixed(2)} times for the ${spin} distance of ${Math.round(to)} pm`;
+    return scaled(base, factor, sigma, `distance:${ion.ion}`, text);
+  };
+  return { high: at(high_pm, 'high-spin'), low: at(low_pm, 'low-spin'), middle: at(middle_pm, 'mean') };
+}
+
+function ofGeometry(octahedral: Estimate, composition: Composition, ion: IonRecord): Estimate {
+  if (octahedral.value === null) return octahedral;
+  if (composition.geometry === 'tetrahedral') {
+    return scaled(
+      octahedral,
+      4 / 9,
+      defaultDoubts.tetrahedral,
+      `tetrahedral:${ion.ion}`,
+      'a tetrahedral field is 4/9 of the octahedral one of the same donors, with e below t2',
+    );
+  }
+  if (composition.geometry === 'square-planar') {
+    const radii = ion.shannonRadius_pm.value;
+    const from = radii?.oct;
+    const to = radii?.squarePlanar;
+    const factor = from !== undefined && to !== undefined ? distanceFactor(from + 140, to + 140) : 1;
+    return scaled(
+      octahedral,
+      factor,
+      defaultDoubts.squarePlanar,
+      `square-planar:${ion.ion}`,
+      `shorter bonds in the square plane: ${factor.toFixed(2)} times the octahedral field`,
+    );
+  }
+  return octahedral;
+}
+
+function zetaOf(ion: IonRecord): Estimate {
+  if (ion.zeta0.value === null) return notEstimated(`no spin-orbit parameter of ${ion.ion} is on file`);
+  const value = ion.zeta0.value * 0.85;
+  const sigma = value * defaultDoubts.zeta;
+  return estimate(value, [{ cause: `zeta:${ion.ion}`, sigma }], 'free-ion', [
+    { kind: 'source', text: `zeta0(${ion.ion}) = ${ion.zeta0.value} (${ion.zeta0.source})` },
+    { kind: 'assumption', text: 'reduced to 85 % by covalency', sigma },
+  ]);
+}
+
+const cubicOf = (geometry: string): CubicGeometry | null =>
+  geometry === 'octahedral' || geometry === 'tetrahedral' ? geometry : null;
+
+/**
+ * Field parameters of a complex by the most trusted route for each part. Never throws for chemistry: what cannot be
+ * estimated is an estimate without value whose reasons say why.
+ */
+export function estimateField(composition: Composition, library: ParameterLibrary): FieldEstimate | null {
+  const ion = findIon(library, composition.metal, composition.oxidationState);
+  if (ion === undefined) return null;
+  const parts = donorShares(composition, library);
+  const { tenDq, donors } = octahedralStrength(parts, ion, library);
+  const noField = ion.dElectrons === 0 || ion.dElectrons === 10;
+  const base = noField
+    ? notEstimated(`a d${ion.dElectrons} ion has no transitions within the d shell`)
+    : ofGeometry(tenDq, composition, ion);
+  const octahedral = composition.geometry === 'octahedral';
+  const two = octahedral ? spinFields(base, ion, parts) : null;
+  const B = racahB(ion, parts, library);
+  return {
+    ion,
+    dElectrons: ion.dElectrons,
+    composition,
+    cubic: cubicOf(composition.geometry),
+    donors,
+    fields: two ?? { high: base, low: base, middle: base },
+    twoDistances: two !== null,
+    racahB: B,
+    racahC: racahC(ion, B),
+    zeta: zetaOf(ion),
+    flags: applicabilityFlags(composition, ion, parts, base, library),
+    leftOut: leftOutOf(composition, ion),
+  };
+}

@@ -1,0 +1,13 @@
+export type { DoubtShare, Estimate, EstimateRoute, Flag, Reason } from './types';
+export { covariance, differenceSigma, estimate, notEstimated, quadrature } from './uncertain';
+export { defaultDoubts } from './defaultDoubts';
+export { donorShares, estimateField, scaled, type FieldEstimate, type SpinFields } from './estimateField';
+export { averageEnvironment, publishedProduct, type DonorField } from './fieldStrength';
+export { nephelauxeticB, ratioCB, type DonorShare } from './racah';
+export {
+  jahnTellerExpectation,
+  octahedralOccupation,
+  strongSplittingShare,
+  type JahnTellerStrength,
+} from './jahnTeller';
+export type { SpinChoice } from './spinChoice';

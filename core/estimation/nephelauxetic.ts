@@ -1,0 +1,88 @@
+import type { IonRecord, LigandRecord, ParameterLibrary } from '../library';
+import { classMean } from './donorClass';
+import { defaultDoubts } from './defaultDoubts';
+import type { Factor } from './ligandStrength';
+
+/** Between the nearest neighbours with a published h in a nephelauxetic order. */
+function fromOrder(ligand: LigandRecord, library: ParameterLibrary): Factor | null {
+  for (const series of library.series.nephelauxetic) {
+    const at = series.places.findIndex((place) => place.includes(ligand.id));
+    if (at < 0) continue;
+    const near = (places: readonly (readonly string[])[]): number | null => {
+      for (const place of places) {
+        for (const id of place) {
+          const h = library.ligands.get(id)?.h.value;
+          if (h != null) return h;
+        }
+      }
+      return null;
+    };
+    const below = near(series.places.slice(0, at).reverse());
+    const above = near(series.places.slice(at + 1));
+    if (below === null || above === null) continue;
+    const value = (below + above) / 2;
+    return {
+      value,
+      sigma: Math.max(defaultDoubts.publishedH, Math.abs(above - below) / 3 / value),
+      route: 'series-place',
+      reasons: [{ kind: 'source', text: `h between ${below} and ${above} (${series.source})` }],
+    };
+  }
+  return null;
+}
+
+/** Nephelauxetic factor h of a ligand; null where nothing like it has one. */
+export function ligandCovalency(ligand: LigandRecord, library: ParameterLibrary): Factor | null {
+  const { h } = ligand;
+  if (h.value !== null) {
+    return {
+      value: h.value,
+      sigma: h.sigma !== null ? h.sigma / h.value : defaultDoubts.publishedH,
+      route: 'published-factors',
+      reasons: [{ kind: 'source', text: `h(${ligand.abbreviation}) = ${h.value} (${h.source})` }],
+    };
+  }
+  const ordered = fromOrder(ligand, library);
+  if (ordered !== null) return ordered;
+  const found = classMean(ligand, library, (other) => other.h.value, 1);
+  if (found === null) return null;
+  return {
+    value: found.mean,
+    sigma: Math.max(defaultDoubts.classH, (found.spread ?? 0) / found.mean),
+    route: 'donor-class',
+    reasons: [
+      { kind: 'assumption', text: `h = ${found.mean.toFixed(2)}, mean of ${found.members.join(', ')}` },
+    ],
+  };
+}
+
+/** Nephelauxetic factor k of an ion, from the table or the mean over ions of like charge. */
+export function metalCovalency(ion: IonRecord, library: ParameterLibrary): Factor | null {
+  const { k } = ion;
+  if (k.value !== null) {
+    return {
+      value: k.value,
+      sigma: k.sigma !== null ? k.sigma / k.value : defaultDoubts.publishedK,
+      route: 'published-factors',
+      reasons: [{ kind: 'source', text: `k(${ion.ion}) = ${k.value} (${k.source})` }],
+    };
+  }
+  const alike = [...library.ions.values()].filter(
+    (other) => other.k.value !== null && other.oxidationState === ion.oxidationState,
+  );
+  const row = alike.filter(({ period }) => period === ion.period);
+  const used = row.length > 0 ? row : alike;
+  if (used.length === 0) return null;
+  const value = used.reduce((sum, other) => sum + other.k.value!, 0) / used.length;
+  return {
+    value,
+    sigma: defaultDoubts.analogyK,
+    route: 'donor-class',
+    reasons: [
+      {
+        kind: 'assumption',
+        text: `no k is in print for ${ion.ion}; ${value.toFixed(2)} is the mean of ${used.map((other) => other.ion).join(', ')}`,
+      },
+    ],
+  };
+}
