@@ -82,6 +82,9 @@ describe('the transmission strip', () => {
     expect(passedInWords(strip((nm) => (nm === 520 ? 0.7 : 0.98)))).toMatch(/least \(70 %\) near 520 nm/);
     expect(passedInWords(strip((nm) => (nm === 480 ? 0.3 : 0.05)))).toMatch(/most \(30 %\) near 480 nm/);
     expect(passedInWords(strip(() => 0.001))).toMatch(/almost nothing/);
+    expect(passedInWords(strip((nm) => (nm === 520 ? 0.55 : 0)))).toMatch(
+      /only a few nanometres near 520 nm/,
+    );
     expect(passedInWords([])).toBe('not estimated');
   });
 

@@ -58,5 +58,9 @@ export function passedInWords(samples: VisibleTransmittance): string {
       ? 'passes the whole visible range'
       : `passes the whole visible range, least (${Math.round(least * 100)} %) near ${darkest} nm`;
   }
-  return `passes ${ranges.map(([from, to]) => `${toTen(from)}–${toTen(to)}`).join(' and ')} nm`;
+  const named = ranges
+    .map(([from, to]) => [toTen(from), toTen(to)] as const)
+    .filter(([from, to]) => from < to);
+  if (named.length === 0) return `passes only a few nanometres near ${toTen(ranges[0]![0])} nm`;
+  return `passes ${named.map(([from, to]) => `${from}–${to}`).join(' and ')} nm`;
 }

@@ -47,7 +47,7 @@ export function BlandAltmanPlot(props: BlandAltmanPlotProps) {
       title={props.title ?? `Difference against mean: ${quantity}`}
       summary={`${pairs.length} pairs of ${quantity}; ${account ?? 'too few for limits of agreement'}.`}
       x={{ label: `Mean of measured and predicted / ${unit}`, domain: padded(extent(pairs.map(mean)), 0.08) }}
-      y={{ label: `Measured − predicted / ${unit}`, domain: padded([low, high], 0.12) }}
+      y={{ label: `Measured − predicted / ${unit}`, domain: padded([low, high], 0.18) }}
       height={props.height ?? 320}
       read="nearest"
       zoom="xy"

@@ -32,7 +32,7 @@ export interface BandFitPlotProps {
 
 /** Room under the spectrum for the residuals and the x axis, px. */
 const residualRoom = 178;
-const margin = { top: 12, right: 18, bottom: residualRoom, left: 76 };
+const margin = { top: 12, right: 18, bottom: residualRoom, left: 80 };
 const dashes = ['7 3', '2 3', '7 3 2 3', '12 3', '1 2', '12 3 2 3'];
 
 /** A measured spectrum, the fit with its bands, and what the fit leaves over, on one axis. */

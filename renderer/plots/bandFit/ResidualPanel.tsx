@@ -22,7 +22,7 @@ export function ResidualPanel({ view, xs, residual, noise, room }: ResidualPanel
     id: `${view.id}-residual`,
     area: { ...view.area, top, bottom },
     y: linearScale(domain, [bottom, top]),
-    yTicks: linearTicks(domain, 2),
+    yTicks: linearTicks(domain, bottom - top, 'y'),
     yLabel: 'Residual',
   };
   const band = (share: number) => ({

@@ -3,16 +3,11 @@ import { type SeenColour } from '../../../core/colour/types';
 import { colourNumbers } from '../../parts/colour';
 import { formatShare } from '../../parts/number';
 import { Axes, Plot, PlotClip, type PlotView } from '../frame';
+import { cloudLegend } from './cloudLegend';
 import { cloudHeight, cloudMargin, planeReach } from './cloudPlane';
 import { LightnessColumn } from './LightnessColumn';
+import { type ColourTarget } from './colourTarget';
 import './ColourCloudPlot.css';
-
-export interface ColourTarget {
-  readonly lab: readonly [number, number, number];
-  /** Largest colour difference that still counts, in the measure of `difference`. */
-  readonly tolerance: number;
-  readonly name?: string;
-}
 
 type Difference = (
   one: readonly [number, number, number],
@@ -104,33 +99,7 @@ export function ColourCloudPlot(props: ColourCloudPlotProps) {
           target === null ? null : inside[index] ? 'yes' : 'no',
         ]),
       }}
-      legend={[
-        { text: 'draw', sample: <circle className="cloud-draw cloud-legend" cx={16} cy={7} r={4} /> },
-        ...(target
-          ? [
-              {
-                text: 'draw that meets the target',
-                sample: <circle className="cloud-draw cloud-met cloud-legend" cx={16} cy={7} r={4.5} />,
-              },
-            ]
-          : []),
-        ...(centre
-          ? [
-              {
-                text: 'central estimate',
-                sample: <rect className="cloud-centre cloud-legend" x={11} y={2} width={10} height={10} />,
-              },
-            ]
-          : []),
-        ...(target
-          ? [
-              {
-                text: target.name ?? 'target and tolerance',
-                sample: <path className="cloud-target" d="M8 7H24M16 -1V15" />,
-              },
-            ]
-          : []),
-      ]}
+      legend={cloudLegend(centre !== null, target)}
       note={
         <>
           {account} Lightness is not on the plane; it is the column at the right.
@@ -199,14 +168,22 @@ function TargetMark({ view, target }: { readonly view: PlotView; readonly target
   const { x, y } = view;
   return (
     <g className="cloud-target">
-      <path d={`M${x(a) - 9} ${y(b)}H${x(a) + 9}M${x(a)} ${y(b) - 9}V${y(b) + 9}`} />
-      <ellipse
-        cx={x(a)}
-        cy={y(b)}
-        rx={x(a + target.tolerance) - x(a)}
-        ry={y(b) - y(b + target.tolerance)}
-        fill="none"
-      />
+      {['cloud-halo', 'cloud-line'].map((className) => (
+        <g key={className}>
+          <path
+            className={className}
+            d={`M${x(a) - 9} ${y(b)}H${x(a) + 9}M${x(a)} ${y(b) - 9}V${y(b) + 9}`}
+          />
+          <ellipse
+            className={className}
+            cx={x(a)}
+            cy={y(b)}
+            rx={x(a + target.tolerance) - x(a)}
+            ry={y(b) - y(b + target.tolerance)}
+            fill="none"
+          />
+        </g>
+      ))}
     </g>
   );
 }

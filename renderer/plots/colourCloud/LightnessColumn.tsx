@@ -1,6 +1,6 @@
 import { type SeenColour } from '../../../core/colour/types';
 import { linearScale, type PlotView } from '../frame';
-import { type ColourTarget } from './ColourCloudPlot';
+import { type ColourTarget } from './colourTarget';
 
 interface LightnessColumnProps {
   readonly view: PlotView;
@@ -43,6 +43,7 @@ export function LightnessColumn({ view, draws, centre, target }: LightnessColumn
       {target && (
         <g className="cloud-target">
           <path
+            className="cloud-line"
             d={`M${left - 4} ${clamped(target.lab[0] + target.tolerance)}H${left + width + 4}M${left - 4} ${clamped(target.lab[0] - target.tolerance)}H${left + width + 4}`}
           />
         </g>

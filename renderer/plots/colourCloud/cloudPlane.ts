@@ -1,6 +1,6 @@
 /** Side of the a*b* square and of the lightness column beside it, px, for a drawing `width` wide. */
 export function cloudMargin(width: number): { top: number; right: number; bottom: number; left: number } {
-  const left = 62;
+  const left = 66;
   const side = Math.max(160, Math.min(420, width - left - lightnessColumn));
   return { top: 24, bottom: 46, left, right: Math.max(lightnessColumn, width - left - side) };
 }

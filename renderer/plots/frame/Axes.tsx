@@ -49,7 +49,7 @@ export function Axes({ view, grid = true, xFigures = true }: AxesProps) {
       )}
       <text
         className="plot-axis-label"
-        transform={`translate(${area.left - 52} ${(area.top + area.bottom) / 2}) rotate(-90)`}
+        transform={`translate(14 ${(area.top + area.bottom) / 2}) rotate(-90)`}
         textAnchor="middle"
       >
         {view.yLabel}

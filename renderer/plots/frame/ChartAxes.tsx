@@ -45,7 +45,7 @@ export function ChartAxes({ view, y = 'y' }: { readonly view: PlotView; readonly
           value: view.yLabel,
           angle: -90,
           position: 'insideLeft',
-          offset: 14,
+          offset: 6,
           className: 'plot-axis-label',
           style: { textAnchor: 'middle' },
         }}

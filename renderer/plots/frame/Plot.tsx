@@ -128,7 +128,7 @@ export function Plot(props: PlotProps) {
         aria-describedby={empty === null ? `${id}-hint` : undefined}
         tabIndex={0}
         data-opens={(onOpen && reading.active !== null) || undefined}
-        style={{ minBlockSize: height }}
+        style={empty === null ? { minBlockSize: height } : undefined}
         onKeyDown={onKeyDown}
         onPointerMove={onPointerMove}
         onPointerLeave={() => {
@@ -160,7 +160,9 @@ export function Plot(props: PlotProps) {
       {empty === null && (
         <>
           <output className="plot-reading" htmlFor={`${id}-title`}>
-            {reading.text ?? ''}
+            {reading.text ?? (
+              <span className="plot-hint">Point at the plot, or use the arrow keys, to read its values.</span>
+            )}
           </output>
           <p id={`${id}-hint`} className="visually-hidden">
             Arrow keys read point by point, with Shift ten at a time

@@ -54,9 +54,9 @@ export function PlotTools(props: PlotToolsProps) {
   };
   return (
     <div className="plot-tools">
-      {props.children}
       {!props.empty && (
         <>
+          {props.children}
           {zoom && (
             <span className="plot-zoom" role="group" aria-label="Zoom">
               <button type="button" aria-label="Zoom in" onClick={() => zoom.by(0.6)}>

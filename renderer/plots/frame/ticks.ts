@@ -15,16 +15,34 @@ export function niceStep(length: number, count: number): number {
   return power * (lead < 1.5 ? 1 : lead < 3.5 ? 2 : lead < 7.5 ? 5 : 10);
 }
 
-/** Round numbers inside the interval, which may run either way. */
-export function linearTicks([from, to]: Interval, count: number): Ticks {
-  const [low, high] = from < to ? [from, to] : [to, from];
-  const step = niceStep(high - low, count);
+/** Room that a tick needs, px: the width of its figures along x, one line along y. */
+const room = (along: 'x' | 'y', texts: readonly string[]): number =>
+  along === 'y' ? 36 : Math.max(44, 6.6 * Math.max(...texts.map((text) => text.length)) + 18);
+
+function ticksAt([low, high]: Interval, step: number): Ticks {
   const values: number[] = [];
   const first = Math.ceil(low / step - 1e-9);
   const last = Math.floor(high / step + 1e-9);
   for (let index = first; index <= last; index++) values.push(index * step + 0);
   const leading = 10 ** Math.floor(Math.log10(step) + 1e-9);
   return { values, text: (value) => writeToStep(value, leading) };
+}
+
+/** Round numbers inside the interval, as close as their figures allow on an axis `pixels` long. */
+export function linearTicks([from, to]: Interval, pixels: number, along: 'x' | 'y'): Ticks {
+  const interval: Interval = from < to ? [from, to] : [to, from];
+  const length = interval[1] - interval[0];
+  let ticks = ticksAt(interval, niceStep(length, 2));
+  for (let count = 40; count >= 2; count--) {
+    const step = niceStep(length, count);
+    const tried = ticksAt(interval, step);
+    const gap = (step / length) * pixels;
+    if (tried.values.length > 1 && gap >= room(along, tried.values.map(tried.text))) {
+      ticks = tried;
+      break;
+    }
+  }
+  return ticks;
 }
 
 /** Powers of ten inside the interval, every second or third where there are many. */

@@ -16,7 +16,7 @@ export interface Margin {
   readonly left: number;
 }
 
-export const standardMargin: Margin = { top: 12, right: 16, bottom: 46, left: 66 };
+export const standardMargin: Margin = { top: 12, right: 16, bottom: 46, left: 80 };
 
 /** Everything a drawing needs to know about the surface it is drawn on. */
 export interface PlotView {
@@ -41,8 +41,8 @@ export interface PlotView {
 
 const scaleOf = (axis: AxisSpec, shown: Interval, range: Interval): Scale =>
   axis.log ? logScale(shown, range) : linearScale(shown, range);
-const ticksOf = (axis: AxisSpec, shown: Interval, count: number): Ticks =>
-  axis.log ? logTicks(shown, count) : linearTicks(shown, count);
+const ticksOf = (axis: AxisSpec, shown: Interval, pixels: number, along: 'x' | 'y'): Ticks =>
+  axis.log ? logTicks(shown, Math.floor(pixels / 40)) : linearTicks(shown, pixels, along);
 
 export function plotView(options: {
   readonly width: number;
@@ -65,8 +65,8 @@ export function plotView(options: {
     ...{ width, height, area, active, id },
     x: scaleOf(x, shown.x, [area.left, area.right]),
     y: scaleOf(y, shown.y, [area.bottom, area.top]),
-    xTicks: ticksOf(x, shown.x, Math.max(2, Math.floor((area.right - area.left) / 95))),
-    yTicks: ticksOf(y, shown.y, Math.max(2, Math.floor((area.bottom - area.top) / 52))),
+    xTicks: ticksOf(x, shown.x, area.right - area.left, 'x'),
+    yTicks: ticksOf(y, shown.y, area.bottom - area.top, 'y'),
     xLabel: x.label,
     yLabel: y.label,
   };

@@ -27,7 +27,7 @@ export interface LevelDiagramProps {
   readonly note?: string;
 }
 
-const margin = { top: 34, right: 64, bottom: 46, left: 70 };
+const margin = { top: 34, right: 64, bottom: 46, left: 80 };
 
 /** Energies of all levels against the field, the ground level as zero, with the place of the candidate. */
 export function LevelDiagram(props: LevelDiagramProps) {

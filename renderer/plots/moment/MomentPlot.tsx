@@ -51,6 +51,7 @@ export function MomentPlot({ series, title, height, note }: MomentPlotProps) {
   }));
   const all = drawn.flatMap(({ points }) => points);
   const top = extent(all.map(({ y, u }) => y + u))[1];
+  const bottom = extent(all.map(({ y, u }) => y - u))[0];
   const measured = drawn.filter(({ kind }) => kind === 'measured');
   const models = drawn.filter(({ kind }) => kind === 'model');
   return (
@@ -58,7 +59,7 @@ export function MomentPlot({ series, title, height, note }: MomentPlotProps) {
       title={title ?? 'Magnetic moment against temperature'}
       summary={`${drawn.map(({ name, kind, points }) => `${name} (${kind}, ${points.length} points)`).join('; ')}`}
       x={{ label: 'Temperature / K', domain: [0, Math.max(1, extent(all.map(({ x }) => x))[1]) * 1.02] }}
-      y={{ label, domain: [0, (top || 1) * 1.1] }}
+      y={{ label, domain: [Math.min(0, bottom) - (top || 1) * 0.03, (top || 1) * 1.1] }}
       height={height ?? 320}
       zoom="xy"
       empty={all.length === 0 ? 'No susceptibility yet: record a moment or a temperature series.' : null}

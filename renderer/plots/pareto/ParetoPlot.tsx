@@ -46,7 +46,7 @@ export function ParetoPlot({ points, costName, title, height, onOpen, note }: Pa
         label: costName[0] ? costName[0].toUpperCase() + costName.slice(1) : '',
         domain: [low - 0.6, high + 0.6],
       }}
-      y={{ label: 'Probability of meeting the wish', domain: [0, 1.02] }}
+      y={{ label: 'Probability of meeting the wish', domain: [-0.03, 1.03] }}
       height={height ?? 320}
       read="nearest"
       zoom="xy"

@@ -29,11 +29,12 @@ export function paretoFront(points: readonly ParetoPoint[]): ParetoPoint[] {
  */
 export function spreadSideways(points: readonly ParetoPoint[], reach: number): number[] {
   const met = new Map<string, number>();
-  return points.map(({ cost, probability }) => {
-    const key = `${cost} ${Math.round(probability * 40)}`;
+  const steps = points.map(({ cost, probability }) => {
+    const key = `${cost} ${Math.round(probability * 30)}`;
     const place = met.get(key) ?? 0;
     met.set(key, place + 1);
-    const step = Math.ceil(place / 2) * (place % 2 === 0 ? -1 : 1);
-    return reach * Math.max(-1, Math.min(1, step / 6));
+    return Math.ceil(place / 2) * (place % 2 === 0 ? -1 : 1);
   });
+  const furthest = Math.max(3, ...steps.map(Math.abs));
+  return steps.map((step) => (reach * step) / furthest);
 }

@@ -33,7 +33,7 @@ const axisName = {
   'molar-absorptivity': 'Molar absorptivity / L mol⁻¹ cm⁻¹',
   absorbance: 'Absorbance',
 } as const;
-const margin = { top: bandRail + 6, right: 18, bottom: 46, left: 70 };
+const margin = { top: bandRail + 6, right: 18, bottom: 46, left: 80 };
 
 /** The predicted spectrum with its bands and ranges on an axis of choice, measured spectra laid over it. */
 export function SpectrumPlot(props: SpectrumPlotProps) {
@@ -50,7 +50,10 @@ export function SpectrumPlot(props: SpectrumPlotProps) {
   const [bandsShown, setBandsShown] = useState(true);
 
   const curves = useMemo(() => [...(predicted ? [predicted] : []), ...measured], [predicted, measured]);
-  const { top, cutOff } = useMemo(() => absorptionTop(curves), [curves]);
+  const { top, cutOff } = useMemo(
+    () => absorptionTop(curves, predicted && range ? { ...predicted, value: range.high } : null),
+    [curves, predicted, range],
+  );
   const drawn = useMemo(() => curves.map((curve) => curveInUnit(curve, unit)), [curves, unit]);
   const highest = useMemo(
     () => Math.max(top, ...curves.flatMap(({ value }) => Array.from(value))),

@@ -4,9 +4,9 @@ import { fromWavenumber, wavenumberFromWavelength_cm1, type EnergyUnit } from '.
 import { type PlotView } from '../frame';
 
 /** Height of the strip, px. */
-const thickness = 8;
+const thickness = 7;
 
-/** The visible spectrum as a strip on the axis, whichever unit the axis has. */
+/** The visible spectrum as a strip under the axis line, whichever unit the axis has. */
 export function VisibleBand({ view, unit }: { readonly view: PlotView; readonly unit?: EnergyUnit }) {
   const { unit: chosen } = useUnit();
   const { area, x, id } = view;
@@ -27,13 +27,7 @@ export function VisibleBand({ view, unit }: { readonly view: PlotView; readonly 
           <stop key={nm} offset={offset} stopColor={spectralColour(nm)} />
         ))}
       </linearGradient>
-      <rect
-        x={from}
-        y={area.bottom - thickness}
-        width={to - from}
-        height={thickness}
-        fill={`url(#${id}-visible)`}
-      />
+      <rect x={from} y={area.bottom + 1} width={to - from} height={thickness} fill={`url(#${id}-visible)`} />
       {[left, right].map((edge) =>
         edge > area.left && edge < area.right ? (
           <line key={edge} className="visible-edge" x1={edge} x2={edge} y1={area.top} y2={area.bottom} />

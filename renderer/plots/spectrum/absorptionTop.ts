@@ -13,15 +13,21 @@ function highest({ wavenumber_cm1, value }: SpectrumCurve, below: number): numbe
 
 /**
  * Top of a linear axis. Charge transfer in the ultraviolet can be a thousand times stronger than the bands that make
- * the colour; the axis then follows the latter and `cutOff` says so.
+ * the colour; the axis then follows the latter and `cutOff` says so. The upper end of the range counts too, up to twice
+ * the curves: an extent must not flatten what it belongs to.
  */
-export function absorptionTop(curves: readonly SpectrumCurve[]): {
+export function absorptionTop(
+  curves: readonly SpectrumCurve[],
+  upper: SpectrumCurve | null = null,
+): {
   readonly top: number;
   readonly cutOff: boolean;
 } {
   const all = Math.max(0, ...curves.map((curve) => highest(curve, Infinity)));
   const colour = Math.max(0, ...curves.map((curve) => highest(curve, colourBelow_cm1)));
   const cutOff = colour > 0 && all > 4 * colour;
-  const top = cutOff ? colour : all;
+  const drawn = cutOff ? colour : all;
+  const extent = upper ? highest(upper, cutOff ? colourBelow_cm1 : Infinity) : 0;
+  const top = Math.max(drawn, Math.min(extent, 2 * drawn));
   return { top: top > 0 ? top * 1.12 : 1, cutOff };
 }
