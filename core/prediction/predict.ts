@@ -1,0 +1,187 @@
+import type { Problem } from '../errors';
+import {
+  cautionsFor,
+  complexFormula,
+  defaultLibrary,
+  findGeometry,
+  withParameterSet,
+  type ParameterLibrary,
+  type ParameterValues,
+} from '../library';
+import { checkCandidate } from '../record/candidateCheck';
+import type { CandidateInput, Composition } from '../record/composition';
+import { parameterHash } from '../record/hash';
+import { cubicLevels } from '../dshell';
+import type { CubicLevel } from '../dshell/types';
+import { estimateField, type Estimate, type FieldEstimate, type Flag } from '../estimation';
+import { spinState, type SpinAnswer } from '../spin';
+import { modelVersion } from './modelVersion';
+import { simpleBands } from './simpleBands';
+import type { Prediction, PredictionOutcome } from './types';
+
+export interface PredictOptions {
+  readonly library?: ParameterLibrary;
+  /** A stored parameter set, or anything with its `name` and `values`. */
+  readonly parameterSet?: (ParameterValues & { readonly name?: string }) | null;
+  /** Number of draws for the colour cloud; 0 or absent for none. */
+  readonly draws?: number;
+  readonly temperature_K?: number;
+  readonly illuminant?: string;
+  readonly observer?: string;
+  readonly counterIon?: string | null;
+  /** Put before every field that a problem names: `[3]`. */
+  readonly place?: string;
+}
+
+const defaults = { concentration_mM: 10, path_cm: 1, temperature_K: 298.15 } as const;
+
+interface LevelInputs {
+  readonly tenDq: Estimate;
+  readonly B: Estimate;
+  readonly C: Estimate;
+}
+
+/** B and C have no say in a shell with one electron or one hole. */
+const orZero = (estimate: Estimate): number => estimate.value ?? 0;
+
+function levelsOf(field: FieldEstimate, { tenDq, B, C }: LevelInputs): readonly CubicLevel[] {
+  const d = field.dElectrons;
+  if (field.cubic === null || d < 1 || d > 9 || tenDq.value === null) return [];
+  const needsRepulsion = d >= 2 && d <= 8;
+  if (needsRepulsion && (B.value === null || C.value === null)) return [];
+  return cubicLevels({
+    dElectrons: d,
+    geometry: field.cubic,
+    tenDq: tenDq.value,
+    B: orZero(B),
+    C: orZero(C),
+  });
+}
+
+function groundTermOf(field: FieldEstimate, levels: readonly CubicLevel[]): string {
+  if (levels.length > 0) return levels[0]!.label;
+  if (field.dElectrons === 0 || field.dElectrons === 10) return '1A1';
+  return 'not estimated';
+}
+
+function predictChecked(
+  input: CandidateInput,
+  library: ParameterLibrary,
+  madeWith: Prediction['madeWith'],
+  options: PredictOptions,
+): Prediction {
+  const composition: Composition = {
+    metal: input.metal,
+    oxidationState: input.oxidationState,
+    geometry: input.geometry,
+    ligands: input.ligands,
+    isomer: input.isomer ?? null,
+  };
+  const temperature_K = options.temperature_K ?? defaults.temperature_K;
+  const field = estimateField(composition, library);
+  if (field === null) throw new Error('a checked candidate has an ion');
+  const spin: SpinAnswer = spinState(field, { temperature_K });
+  const tenDq = spin.choice === 'high' ? field.fields.high : field.fields.low;
+  const inputs = { tenDq, B: field.racahB, C: field.racahC };
+  const levels = levelsOf(field, inputs);
+  const geometry = findGeometry(composition.geometry);
+  const bands = simpleBands({ levels, ...inputs, centrosymmetric: geometry?.centrosymmetric ?? false });
+  const flags: Flag[] = [...field.flags];
+  if (spin.prediction.nearCrossover) {
+    flags.push({
+      code: 'near-crossover',
+      severity: 'caution',
+      message:
+        'Near spin crossover: neither spin state can be called certain; bands are those of the likelier one.',
+    });
+  }
+  return {
+    id: input.id,
+    composition,
+    formula: complexFormula(composition, library),
+    dElectrons: field.dElectrons,
+    tenDq,
+    racahB: field.racahB,
+    racahC: field.racahC,
+    zeta: field.zeta,
+    spin: spin.prediction,
+    groundTerm: groundTermOf(field, levels),
+    levels,
+    bands,
+    conditions: {
+      concentration_mM: input.concentration_mM ?? defaults.concentration_mM,
+      path_cm: input.path_cm ?? defaults.path_cm,
+      temperature_K,
+    },
+    colour: null,
+    colourAtThreeStrengths: [],
+    cloud: null,
+    flags,
+    leftOut: field.leftOut,
+    cautions: cautionsFor(composition, options.counterIon, library),
+    madeWith,
+  };
+}
+
+/** A library laid over by a parameter set, with what a prediction records about both. */
+function prepare(options: PredictOptions): {
+  library: ParameterLibrary;
+  madeWith: Prediction['madeWith'];
+} {
+  const base = options.library ?? defaultLibrary;
+  const set = options.parameterSet ?? null;
+  return {
+    library: set === null ? base : withParameterSet(base, set).library,
+    madeWith: {
+      parameterSet: set === null ? `library ${base.version}` : (set.name ?? 'parameter set'),
+      parameterHash: parameterHash(set?.values ?? {}, base.version),
+      modelVersion,
+    },
+  };
+}
+
+const idOf = (input: unknown): string =>
+  typeof input === 'object' && input !== null && 'id' in input && typeof input.id === 'string'
+    ? input.id
+    : '';
+
+/** A temperature that a Boltzmann factor can take. */
+function temperatureProblem(options: PredictOptions): Problem | null {
+  const value = options.temperature_K;
+  if (value === undefined || (Number.isFinite(value) && value > 0 && value <= 2000)) return null;
+  return {
+    code: Number.isFinite(value) ? 'out-of-range' : 'not-finite',
+    message: `the temperature is ${value} K`,
+    field: 'temperature_K',
+    remedy: 'give a temperature above 0 and at most 2000 K',
+  };
+}
+
+/**
+ * Everything that can be said of a complex before it is made. Wrong input comes back as problems that name field, value
+ * and remedy; what cannot be estimated comes back as an estimate without value that says why.
+ */
+export function predict(input: unknown, options: PredictOptions = {}): PredictionOutcome {
+  return predictMany([input], { ...options, placeOf: () => options.place ?? '' })[0]!;
+}
+
+export interface PredictManyOptions extends PredictOptions {
+  /** Where the i-th input stands; `[i]` by default. */
+  readonly placeOf?: (index: number) => string;
+}
+
+/** The same for many candidates with one library; a candidate that is refused leaves the others alone. */
+export function predictMany(
+  inputs: readonly unknown[],
+  options: PredictManyOptions = {},
+): PredictionOutcome[] {
+  const wrong = temperatureProblem(options);
+  const { library, madeWith } = prepare(options);
+  const placeOf = options.placeOf ?? ((index: number) => `[${index}]`);
+  return inputs.map((input, index): PredictionOutcome => {
+    if (wrong !== null) return { ok: false, id: idOf(input), problems: [wrong] };
+    const checked = checkCandidate(input, { library, place: placeOf(index) });
+    if (!checked.ok) return { ok: false, id: idOf(input), problems: checked.problems };
+    return { ok: true, prediction: predictChecked(checked.value, library, madeWith, options) };
+  });
+}
