@@ -1,5 +1,6 @@
 import type { Command } from '../command';
 import { readSpectrum } from './readSpectrum';
+import { terms } from './terms';
 
 /** One file per command in this folder; the order here is the order of the help text. */
-export const commands: readonly Command[] = [readSpectrum];
+export const commands: readonly Command[] = [readSpectrum, terms];
