@@ -187,6 +187,8 @@ export interface Host {
 
   openExternal(link: LinkId): Promise<void>;
 
+  /** Loads the page afresh; nothing else can navigate the window. */
+  reload(): Promise<void>;
   /** Something on screen is not stored yet (`what` completes "Close and lose ...?"); null once everything is. */
   setUnsaved(what: string | null): void;
   /** The listener saves what is pending and says how it went; the window waits for it. One listener at a time. */

@@ -113,6 +113,7 @@ export function browserHost(): Host {
     async openExternal(link) {
       open(externalLinks[link].url, '_blank', 'noopener,noreferrer');
     },
+    reload: async () => location.reload(),
     setUnsaved(what) {
       unsaved = what;
     },

@@ -57,7 +57,7 @@ export const commandTable = [
     id: 'add-measurement',
     group: 'project',
     title: 'Add measurement…',
-    keys: 'CmdOrCtrl+M',
+    keys: 'CmdOrCtrl+Shift+M',
     needsProject: true,
   },
   { id: 'show-reports', group: 'project', title: 'Reports…', keys: 'CmdOrCtrl+R', needsProject: true },

@@ -32,6 +32,7 @@ export interface Calls {
   print: { payload: null; answer: null };
   printToPdf: { payload: PdfRequest; answer: SaveAnswer };
   setMenuState: { payload: MenuState; answer: null };
+  reload: { payload: null; answer: null };
   setUnsaved: { payload: { what: string | null }; answer: null };
   theme: { payload: null; answer: Theme };
   setTheme: { payload: { choice: ThemeChoice }; answer: Theme };
@@ -70,6 +71,7 @@ const allCalls: Readonly<Record<CallName, true>> = {
   print: true,
   printToPdf: true,
   setMenuState: true,
+  reload: true,
   setUnsaved: true,
   theme: true,
   setTheme: true,

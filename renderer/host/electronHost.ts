@@ -54,6 +54,7 @@ export async function electronHost(api: DesktopApi): Promise<Host> {
       takeSnapshot: (copy, reason) => call('mirrorTakeSnapshot', { copy, reason }),
       onStatus: (listener) => api.onMirrorStatus(listener),
     },
+    reload: () => done(call('reload', null)),
     setUnsaved: (what) => void call('setUnsaved', { what: what?.slice(0, 300) ?? null }),
     openExternal: (link) => done(call('openExternal', { link })),
     onFlush(listener) {

@@ -25,8 +25,8 @@ const dataSchema = z.union([
   z.instanceof(Uint8Array).refine((bytes) => bytes.byteLength <= payloadLimits.bytes, 'is too large'),
 ]);
 const kindSchema = z.enum(['bundle', 'spectrum', 'json', 'csv', 'text', 'html', 'svg', 'png', 'pdf', 'any']);
-/** Becomes part of a folder name, so it is narrower than the database demands. */
-export const idSchema = z.string().regex(/^[A-Za-z0-9][A-Za-z0-9_-]{0,99}$/, 'is not an id');
+/** Never becomes part of a path: folders are named after its hash. */
+export const idSchema = z.string().min(1).max(100);
 export const snapshotIdSchema = z
   .string()
   .regex(/^\d{8}T\d{9}Z-[a-z-]{1,30}$/, 'is not the id of a snapshot');
@@ -68,6 +68,7 @@ export const payloadSchemas: { readonly [N in CallName]: z.ZodType<Calls[N]['pay
     redo: lineSchema.nullable(),
     recent: z.array(z.strictObject({ projectId: idSchema, name: lineSchema })).max(payloadLimits.recent),
   }),
+  reload: nothing,
   setUnsaved: z.strictObject({ what: lineSchema.nullable() }),
   theme: nothing,
   setTheme: z.strictObject({ choice: z.enum(['system', 'light', 'dark']) }),
