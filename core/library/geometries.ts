@@ -28,7 +28,8 @@ const geometry = (
 
 /** Ideal polyhedra; IUPAC Nomenclature of Inorganic Chemistry, Recommendations 2005, table IR-9.2. */
 export const geometries: readonly GeometryRecord[] = [
-  geometry('octahedral', 6, 'Oh', true, ['oh', 'tetragonal', 'distorted octahedral', 'octahedron']),
+  geometry('octahedral', 6, 'Oh', true, ['oh', 'octahedron']),
+  geometry('tetragonal', 6, 'D4h', true, ['distorted octahedral', 'elongated octahedral']),
   geometry('tetrahedral', 4, 'Td', false, ['td', 'tetrahedron']),
   geometry('square-planar', 4, 'D4h', true, ['sp', 'd4h', 'square']),
   geometry('square-pyramidal', 5, 'C4v', false, ['spy', 'c4v']),

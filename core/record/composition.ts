@@ -1,8 +1,11 @@
 import { z } from 'zod';
 
-/** Geometries that a candidate may name. Square-pyramidal and the like are estimated by angular overlap. */
+/**
+ * Geometries that a candidate may name. `tetragonal` is an octahedron drawn out along one axis (or, with one oxo
+ * ligand, pressed together along it): six places, bands resolved into their components. Square-pyramidal and the like are estimated by angular overlap. */
 export const geometryIds = [
   'octahedral',
+  'tetragonal',
   'tetrahedral',
   'square-planar',
   'square-pyramidal',

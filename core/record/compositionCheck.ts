@@ -193,7 +193,7 @@ function usualIsomers(composition: Composition, library: ParameterLibrary): stri
   const pattern = donorPattern(composition, library);
   const ligands = Object.keys(composition.ligands).flatMap((id) => library.ligands.get(id) ?? []);
   const unlike = ligands.some(({ donorAtoms }) => new Set(donorAtoms).size > 1);
-  if (composition.geometry === 'octahedral') {
+  if (composition.geometry === 'octahedral' || composition.geometry === 'tetragonal') {
     if (unlike) return ['fac', 'mer', 'cis', 'trans'];
     if (ligands.some(({ denticity }) => denticity === 3)) return ['fac', 'mer'];
     if (pattern.length < 2) return [];
