@@ -74,6 +74,8 @@ export function formOf(record: LabelledRecord): NumberForm {
   return { columns, peaks: record.label === 'PEAKTABLE' };
 }
 
+const dataLine = /^\s*[+-]?\d+(?:\.\d+)?[ ,;+\-@A-Ra-r%?]/;
+
 /** Names records that look like data and are not among those read: a damaged label must not cost points in silence. */
 export function reportUnread(
   block: Block,
@@ -81,11 +83,12 @@ export function reportUnread(
   warnings: ReadingWarning[],
 ): void {
   for (const record of block.records) {
-    if (read.includes(record) || record.lines.length < 2 || !/^\(\s*X\s*(?:\+\+|Y)/i.test(valueOf(record)))
-      continue;
+    if (read.includes(record)) continue;
+    const rows = record.lines.slice(1).filter((line) => dataLine.test(line.text)).length;
+    if (rows < 2 && !(rows > 0 && /^\(\s*X\s*(?:\+\+|Y)/i.test(valueOf(record)))) continue;
     warnings.push({
       code: 'recovered',
-      message: `line ${record.line}: ##${shorten(record.written).slice(0, 40)}= looks like data and is not read`,
+      message: `line ${record.line}: ##${shorten(record.written).slice(0, 40)}= is followed by what looks like data and is not read`,
     });
   }
 }
