@@ -9,7 +9,7 @@ export const coreLayers = {
   numerics: ['errors'],
   library: ['errors', 'units'],
   symmetry: ['errors', 'numerics'],
-  geometry: ['errors', 'units', 'numerics', 'library', 'symmetry'],
+  geometry: ['errors', 'units', 'numerics', 'library', 'symmetry', 'record'],
   record: ['errors', 'units', 'library', 'numerics'],
   dshell: ['errors', 'units', 'numerics', 'symmetry'],
   estimation: ['errors', 'units', 'numerics', 'library', 'symmetry', 'geometry', 'record', 'dshell'],
@@ -27,7 +27,7 @@ export const coreLayers = {
     'estimation',
     'spin',
   ],
-  spectrum: ['errors', 'units', 'numerics', 'transitions'],
+  spectrum: ['errors', 'units', 'numerics', 'library', 'transitions'],
   colour: ['errors', 'units', 'numerics', 'library', 'spectrum'],
   prediction: [
     ...['errors', 'units', 'numerics', 'library', 'symmetry', 'geometry', 'record', 'dshell', 'estimation'],
