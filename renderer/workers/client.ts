@@ -1,7 +1,7 @@
 import type { PredictionOutcome } from '../../core/prediction/types';
 import type { CandidateInput } from '../../core/record/composition';
 import type { CandidateSummary } from './estimateSummary';
-import type { FromWorker, Overlay, ToWorker } from './protocol';
+import type { FromWorker, OneOptions, Overlay, ToWorker } from './protocol';
 
 /** The part of a `Worker` that is used: tests put an object in its place. */
 export interface WorkerLike {
@@ -43,8 +43,13 @@ export class EstimateClient {
   }
 
   /** The whole answer for one candidate. */
-  one(input: CandidateInput, overlay: Overlay, draws = 0, signal?: AbortSignal): Promise<PredictionOutcome> {
-    return this.#run<PredictionOutcome>(signal, (job) => ({ kind: 'one', job, input, overlay, draws }), {
+  one(
+    input: CandidateInput,
+    overlay: Overlay,
+    options: OneOptions = {},
+    signal?: AbortSignal,
+  ): Promise<PredictionOutcome> {
+    return this.#run<PredictionOutcome>(signal, (job) => ({ kind: 'one', job, input, overlay, options }), {
       outcome: ({ outcome }, resolve) => resolve(outcome),
     });
   }

@@ -3,7 +3,7 @@ import type { Problem } from '../../core/errors';
 import type { Flag } from '../../core/estimation/types';
 import type { Prediction, PredictionOutcome } from '../../core/prediction/types';
 import type { SpinPrediction } from '../../core/spin/types';
-import { type Transmittance } from './transmittance';
+import { type Transmittance, transmittanceOf } from './transmittance';
 
 export interface ValueWithSigma {
   readonly value: number;
@@ -53,10 +53,7 @@ export const firstBandOf = ({ bands }: Pick<EstimateSummary, 'bands'>): BandSumm
   bands.find(({ kind }) => kind === 'spin-allowed') ?? null;
 
 /** Shortens an answer to what the table shows. */
-export function summarise(
-  outcome: PredictionOutcome,
-  transmittanceOf: (prediction: Prediction) => Transmittance | null,
-): CandidateSummary {
+export function summarise(outcome: PredictionOutcome): CandidateSummary {
   if (!outcome.ok) return { ok: false, problems: outcome.problems };
   const { prediction } = outcome;
   const { state, probabilityHigh, words, unpairedElectrons, nearCrossover } = prediction.spin;

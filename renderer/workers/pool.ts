@@ -1,7 +1,7 @@
 import type { PredictionOutcome } from '../../core/prediction/types';
 import type { CandidateInput } from '../../core/record/composition';
 import { EstimateClient, type TakeSummaries, type WorkerLike } from './client';
-import type { Overlay } from './protocol';
+import type { OneOptions, Overlay } from './protocol';
 
 /** Rows per request: large enough to keep a worker busy, small enough to share the work evenly. */
 const portion = 200;
@@ -20,9 +20,14 @@ export class EstimatePool {
     this.#size = Math.max(1, size);
   }
 
-  one(input: CandidateInput, overlay: Overlay, draws = 0, signal?: AbortSignal): Promise<PredictionOutcome> {
+  one(
+    input: CandidateInput,
+    overlay: Overlay,
+    options: OneOptions = {},
+    signal?: AbortSignal,
+  ): Promise<PredictionOutcome> {
     this.#single ??= new EstimateClient(this.#start());
-    return this.#single.one(input, overlay, draws, signal);
+    return this.#single.one(input, overlay, options, signal);
   }
 
   /** Shares the list out; resolves when all is done, rejects on the first failure or when the signal aborts. */

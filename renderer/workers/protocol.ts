@@ -6,14 +6,21 @@ import type { CandidateSummary } from './estimateSummary';
 /** Values laid over the library; null for the library as it is. */
 export type Overlay = Pick<ParameterSet, 'name' | 'values'> | null;
 
+/** What a sheet asks for beyond the row of a table. */
+export interface OneOptions {
+  /** Draws for the colour cloud; 0 for none. */
+  readonly draws?: number;
+  /** Decides on some of the cautions. */
+  readonly counterIon?: string | null;
+}
+
 export type ToWorker =
   | {
       readonly kind: 'one';
       readonly job: number;
       readonly input: CandidateInput;
       readonly overlay: Overlay;
-      /** Draws for the colour cloud; 0 for none. */
-      readonly draws: number;
+      readonly options: OneOptions;
     }
   | {
       readonly kind: 'many';

@@ -1,11 +1,10 @@
 import type { PredictionOutcome } from '../../core/prediction/types';
 import type { CandidateInput } from '../../core/record/composition';
 import { type CandidateSummary, summarise } from './estimateSummary';
-import type { FromWorker, Overlay, ToWorker } from './protocol';
-import { visibleTransmittance } from './transmittance';
+import type { FromWorker, OneOptions, Overlay, ToWorker } from './protocol';
 
-/** Estimates one candidate; made anew for each overlay, so that the library is laid over once per job. */
-export type Predictor = (input: CandidateInput, draws: number) => PredictionOutcome;
+/** Estimates candidates, with one answer for each, in order. */
+export type Predictor = (inputs: readonly CandidateInput[], options?: OneOptions) => PredictionOutcome[];
 
 export interface Port {
   postMessage(message: FromWorker): void;
@@ -13,6 +12,8 @@ export interface Port {
 
 /** Longest stretch of work between two looks at the mail, ms. */
 const stretch_ms = 40;
+/** Estimated in one call, since the library is laid over anew with each. */
+const handful = 10;
 
 const nextTurn = (): Promise<void> => new Promise((resolve) => setTimeout(resolve, 0));
 
@@ -30,9 +31,9 @@ export function serve(
       const summaries: (readonly [string, CandidateSummary])[] = [];
       const until = performance.now() + stretch_ms;
       do {
-        const input = inputs[place]!;
-        summaries.push([input.id, summaryOf(predict, input)]);
-        place += 1;
+        const share = inputs.slice(place, place + handful);
+        summaries.push(...summariesOf(predict, share));
+        place += share.length;
       } while (place < inputs.length && performance.now() < until);
       port.postMessage({ kind: 'summaries', job, summaries });
       await nextTurn();
@@ -58,24 +59,27 @@ export function serve(
       return;
     }
     try {
-      const outcome = predictorFor(message.overlay)(message.input, message.draws);
-      port.postMessage({ kind: 'outcome', job, outcome });
+      const [outcome] = predictorFor(message.overlay)([message.input], message.options);
+      port.postMessage({ kind: 'outcome', job, outcome: outcome! });
     } catch (error) {
       failed(error);
     }
   };
 }
 
+type Entry = readonly [id: string, summary: CandidateSummary];
+
 /** One candidate that breaks the engine must not take the others along. */
-function summaryOf(predict: Predictor, input: CandidateInput): CandidateSummary {
+function summariesOf(predict: Predictor, inputs: readonly CandidateInput[]): Entry[] {
   try {
-    return summarise(predict(input, 0), ({ bands, conditions }) =>
-      bands.length === 0
-        ? null
-        : visibleTransmittance(bands, conditions.concentration_mM, conditions.path_cm),
-    );
+    const outcomes = predict(inputs);
+    return inputs.map(({ id }, index): Entry => [id, summarise(outcomes[index]!)]);
   } catch (error) {
+    if (inputs.length > 1) return inputs.flatMap((input) => summariesOf(predict, [input]));
     const message = error instanceof Error ? error.message : String(error);
-    return { ok: false, problems: [{ code: 'not-estimated', message, field: 'composition' }] };
+    return inputs.map(({ id }): Entry => [
+      id,
+      { ok: false, problems: [{ code: 'not-estimated', message, field: 'composition' }] },
+    ]);
   }
 }

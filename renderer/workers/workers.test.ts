@@ -4,7 +4,8 @@ import { EstimateClient, type WorkerLike } from './client';
 import { EstimatePool } from './pool';
 import type { FromWorker, ToWorker } from './protocol';
 import { serve, type Predictor } from './serve';
-import { visibleTransmittance } from './transmittance';
+import type { Band } from '../../core/transitions/types';
+import { transmittanceOf } from './transmittance';
 
 const input = (id: string): CandidateInput => ({
   id,
@@ -13,7 +14,7 @@ const input = (id: string): CandidateInput => ({
   geometry: 'octahedral',
   ligands: { nh3: 6 },
 });
-const refusing: Predictor = ({ id }) => ({ ok: false, id, problems: [] });
+const refusing: Predictor = (inputs) => inputs.map(({ id }) => ({ ok: false, id, problems: [] }));
 
 /** The two halves joined without a thread between them. */
 function fakeWorker(predict: Predictor = refusing): WorkerLike & { sent: ToWorker[] } {
@@ -51,9 +52,9 @@ describe('estimating in the background', () => {
   });
 
   it('turns a candidate that breaks the engine into a refusal and goes on with the others', async () => {
-    const predict: Predictor = (given, draws) => {
-      if (given.id === 'bad') throw new Error('no such thing');
-      return refusing(given, draws);
+    const predict: Predictor = (given) => {
+      if (given.some(({ id }) => id === 'bad')) throw new Error('no such thing');
+      return refusing(given);
     };
     const seen = new Map<string, unknown>();
     const client = new EstimateClient(fakeWorker(predict));
@@ -65,10 +66,10 @@ describe('estimating in the background', () => {
   });
 
   it('stops soon after it is cancelled', async () => {
-    const slow: Predictor = (given, draws) => {
+    const slow: Predictor = (given) => {
       const until = performance.now() + 15;
       while (performance.now() < until);
-      return refusing(given, draws);
+      return refusing(given);
     };
     const predict = vi.fn(slow);
     const client = new EstimateClient(fakeWorker(predict));
@@ -93,10 +94,12 @@ describe('estimating in the background', () => {
 describe('the transmission strip', () => {
   it('lets pass 10 % at the centre of a band of absorbance 1, and half of that absorbance at half height', () => {
     // Beer-Lambert: A = 50 L mol-1 cm-1 x 20 mM x 1 cm = 1.
-    const band = { energy_cm1: 20_000, width_cm1: 2000, molarAbsorptivity: 50 };
-    const strip = visibleTransmittance([band], 20, 1);
-    expect(strip[(500 - 380) / 5]).toBeCloseTo(0.1, 3);
-    const halfHeight = visibleTransmittance([{ ...band, energy_cm1: 21_000 }], 20, 1);
-    expect(halfHeight[(500 - 380) / 5]).toBeCloseTo(10 ** -0.5, 3);
+    const at = (energy_cm1: number) =>
+      transmittanceOf({
+        bands: [{ energy_cm1, width_cm1: 2000, molarAbsorptivity: 50 } as Band],
+        conditions: { concentration_mM: 20, path_cm: 1, temperature_K: 298.15 },
+      })![(500 - 380) / 5];
+    expect(at(20_000)).toBeCloseTo(0.1, 3);
+    expect(at(21_000)).toBeCloseTo(10 ** -0.5, 3);
   });
 });

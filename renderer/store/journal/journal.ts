@@ -16,8 +16,7 @@ const { minKey, maxKey } = Dexie;
  * there or neither.
  */
 export class Journal {
-  /** Initials or name that the log puts beside each line. */
-  author = '';
+  #author = '';
   readonly #db: SpinhueDatabase;
   readonly #feed: ChangeFeed;
   readonly #clock: Clock;
@@ -26,6 +25,11 @@ export class Journal {
     this.#db = db;
     this.#feed = feed;
     this.#clock = clock;
+  }
+
+  /** Initials or name that the log puts beside each line from now on. */
+  signAs(author: string): void {
+    this.#author = author;
   }
 
   /** Runs `work` as one undoable step. If it throws, nothing of it is stored. */
@@ -101,7 +105,7 @@ export class Journal {
       return await db.transaction('rw', tables, async () => {
         const writer = new Writer(db, this.#clock);
         const result = await work(writer);
-        await db.log.bulkAdd(logLines(writer.edits, writer.now, this.author, this.#clock.newId));
+        await db.log.bulkAdd(logLines(writer.edits, writer.now, this.#author, this.#clock.newId));
         return result;
       });
     } catch (error) {

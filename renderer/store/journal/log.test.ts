@@ -6,7 +6,7 @@ import { hexaammine, testStore } from '../testing/testStore';
 async function measured() {
   const test = await testStore();
   const { store } = test;
-  store.journal.author = 'MK';
+  store.journal.signAs('MK');
   const project = await store.projects.create('Liquid filter');
   const [candidate] = await store.candidates.create(project.id, [hexaammine('Cr')]);
   const [measurement] = await store.journal.record(project.id, 'note a colour', (writer) =>

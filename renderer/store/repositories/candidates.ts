@@ -37,6 +37,16 @@ export class CandidateRepository {
     return this.#db.candidates.where('projectId').equals(projectId).toArray();
   }
 
+  idsOf(projectId: string): Promise<string[]> {
+    return this.#db.candidates.where('projectId').equals(projectId).primaryKeys();
+  }
+
+  /** In the order of the ids; those that no longer exist are left out. */
+  async getMany(ids: readonly string[]): Promise<Candidate[]> {
+    const found = await this.#db.candidates.bulkGet([...ids]);
+    return found.filter((row) => row !== undefined);
+  }
+
   async create(projectId: string, given: readonly NewCandidate[], label?: string): Promise<Candidate[]> {
     const rows = given.map((each): NewRow<'candidates'> => ({ ...blank, ...each, projectId }));
     return this.#journal.record(projectId, label ?? `add ${counted(rows.length, 'candidate')}`, (writer) =>

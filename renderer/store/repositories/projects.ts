@@ -30,6 +30,19 @@ export class ProjectRepository {
       .sort((one, other) => other.updatedAt.localeCompare(one.updatedAt));
   }
 
+  /** The same with how many candidates each holds outside the bin. */
+  async listWithCounts(): Promise<(Project & { readonly candidateCount: number })[]> {
+    const projects = await this.list();
+    const inBin = await this.#db.candidates.where('deletedAt').above('').toArray();
+    return Promise.all(
+      projects.map(async (project) => {
+        const all = await this.#db.candidates.where('projectId').equals(project.id).count();
+        const gone = inBin.filter(({ projectId }) => projectId === project.id).length;
+        return { ...project, candidateCount: all - gone };
+      }),
+    );
+  }
+
   async create(name: string, fields: ProjectFields = {}): Promise<Project> {
     const id = this.#clock.newId();
     return this.#journal.record(id, `create project "${name}"`, async (writer) => {

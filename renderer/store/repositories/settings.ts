@@ -6,9 +6,8 @@ const columnIds = z.array(z.string().max(40)).max(40);
 
 /** Each setting falls back on its own default, so that one spoilt value never takes the others along. */
 export const settingSchemas = {
-  theme: z.enum(['system', 'light', 'dark']).catch('system'),
   energyUnit: z.enum(['cm-1', 'nm', 'eV', 'kJ/mol', 'THz']).catch('cm-1'),
-  concentration_mM: z.number().positive().max(10_000).catch(20),
+  concentration_mM: z.number().positive().max(10_000).catch(10),
   path_cm: z.number().positive().max(100).catch(1),
   initials: z.string().max(20).catch(''),
   hiddenColumns: columnIds.catch([]),
@@ -17,7 +16,7 @@ export const settingSchemas = {
     .catch({ by: 'added', descending: false }),
   lastProject: z.string().max(100).nullable().catch(null),
   demoLoaded: z.boolean().catch(false),
-  reduceMotion: z.boolean().catch(false),
+  singleKeys: z.boolean().catch(true),
 } as const;
 
 export type Settings = { readonly [K in keyof typeof settingSchemas]: z.infer<(typeof settingSchemas)[K]> };

@@ -1,0 +1,4 @@
+export { Field } from './Field';
+export { NumberField } from './NumberField';
+export { readNumber } from './readNumber';
+export { ConfirmDialog } from './ConfirmDialog';

@@ -1,0 +1,19 @@
+export { keptInBin_days, type BinContent } from './bin';
+export { drafts } from './drafts';
+export type { EstimateCache } from './estimateCache';
+export { exportProject, fileNameFor, projectContent } from './exchange/exportProject';
+export {
+  bringIn,
+  bringInAsCopy,
+  planImport,
+  type ImportPlan,
+  type TablePlan,
+} from './exchange/importProject';
+export { askForLastingStorage, type StorageState } from './persistence';
+export { type CandidateFields, type NewCandidate } from './repositories/candidates';
+export { type ProjectFields } from './repositories/projects';
+export { defaultSettings, type Settings } from './repositories/settings';
+export { type Change, type Edit, type NewRow, type RecordTable, type RowOf } from './rows';
+export { openStore, type Store, type StoreOptions } from './store';
+export { asStoreError, StoreError, type StoreErrorCode } from './storeError';
+export { counted } from './words';
