@@ -63,6 +63,15 @@ function countOf(record: LabelledRecord | undefined): number | undefined {
  * spectra of Y against X. FIRST of the ordinate holds for the first page only.
  */
 export function readNtuples(block: Block, limit: number, warnings: ReadingWarning[]): ReadSpectrum[] {
+  const rival = ['XYDATA', 'XYPOINTS', 'PEAKTABLE']
+    .map((label) => recordOf(block, label))
+    .find((each) => each !== undefined);
+  if (rival !== undefined) {
+    throw new ReadingError(
+      'structure',
+      `line ${rival.line}: ##${rival.written}= stands in a block of n-tuples`,
+    );
+  }
   const known = variables(block);
   const x = known.find((each) => each.symbol === 'X');
   const y = known.find((each) => each.symbol === 'Y');

@@ -112,7 +112,9 @@ function silentLoss(reading: SpectrumReading, bytes: Uint8Array): string | null 
   const text = new TextDecoder(utf16 ? reading.layout!.encoding : 'utf-8').decode(bytes);
   const points = reading.spectra.reduce((sum, spectrum) => sum + spectrum.x.length, 0);
   if (reading.format === 'jcamp-dx') {
-    const announced = [...text.replace(/\$\$.*/g, '').matchAll(/^[^\S\r\n]*##[ \-/_]*N[ \-/_]*P[ \-/_]*O[ \-/_]*I[ \-/_]*N[ \-/_]*T[ \-/_]*S[ \-/_]*=\s*([0-9.+E-]+)/gim)];
+    // In n-tuples each page announces its own points.
+    const pages = text.search(/^##PAGE\s*=/m);
+    const announced = [...text.slice(Math.max(0, pages)).replace(/\$\$.*/g, '').matchAll(/^[^\S\r\n]*##[ \-/_]*N[ \t\-/_]*P[ \t\-/_]*O[ \t\-/_]*I[ \t\-/_]*N[ \t\-/_]*T[ \t\-/_]*S[ \t\-/_]*=\s*([0-9.+E-]+)/gim)];
     const sum = announced.reduce((total, match) => total + Number(match[1]), 0);
     // A label that stands twice with one value announces its points once.
     const twice = /NPOINTS=(\d+)\s+##NPOINTS=\1\s/.test(text);
@@ -157,7 +159,13 @@ export function soak(
     } catch (error) {
       what = `threw ${String(error)}`;
     }
-    const took = performance.now() - before;
+    let took = performance.now() - before;
+    if (took > 500) {
+      // A second run tells a slow file from a busy machine.
+      const again = performance.now();
+      readSpectrumFile(bytes);
+      took = Math.min(took, performance.now() - again);
+    }
     slowest_ms = Math.max(slowest_ms, took);
     if (took > 2000) what ??= `took ${Math.round(took)} ms`;
     if (what !== null && findings.length < 50) findings.push({ seed, what, bytes });
