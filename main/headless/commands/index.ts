@@ -1,6 +1,8 @@
 import type { Command } from '../command';
+import { colour } from './colour';
+import { fitBands } from './fitBands';
 import { readSpectrum } from './readSpectrum';
 import { terms } from './terms';
 
 /** One file per command in this folder; the order here is the order of the help text. */
-export const commands: readonly Command[] = [readSpectrum, terms];
+export const commands: readonly Command[] = [readSpectrum, fitBands, terms, colour];
