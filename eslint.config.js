@@ -28,7 +28,7 @@ export const coreLayers = {
     'spin',
   ],
   spectrum: ['errors', 'units', 'numerics', 'library', 'transitions'],
-  colour: ['errors', 'units', 'numerics', 'library', 'spectrum'],
+  colour: ['errors', 'units', 'numerics', 'library', 'transitions', 'spectrum'],
   prediction: [
     ...['errors', 'units', 'numerics', 'library', 'symmetry', 'geometry', 'record', 'dshell', 'estimation'],
     ...['spin', 'magnetism', 'transitions', 'spectrum', 'colour'],

@@ -1,8 +1,9 @@
 import type { Command } from '../command';
+import { estimate } from './estimate';
 import { colour } from './colour';
 import { fitBands } from './fitBands';
 import { readSpectrum } from './readSpectrum';
 import { terms } from './terms';
 
 /** One file per command in this folder; the order here is the order of the help text. */
-export const commands: readonly Command[] = [readSpectrum, fitBands, terms, colour];
+export const commands: readonly Command[] = [estimate, readSpectrum, fitBands, terms, colour];

@@ -1,0 +1,109 @@
+import {
+  convertLrgbToOklab,
+  convertLrgbToRgb,
+  convertOklabToLrgb,
+  convertRgbToLrgb,
+  convertXyz65ToRgb,
+} from 'culori/fn';
+import { adapt } from './chromaticAdaptation';
+import type { Triple } from './tristimulus';
+
+/** White of sRGB, x 0.3127 and y 0.3290 (IEC 61966-2-1), Y = 100. */
+export const srgbWhite: Triple = [(100 * 0.3127) / 0.329, 100, (100 * (1 - 0.3127 - 0.329)) / 0.329];
+
+/** Linear channels may leave 0 to 1 by this much and still count as shown: far below one step of a screen. */
+const slack = 1e-4;
+
+/** One just noticeable difference in OKLab, as the mapping of CSS Color 4 takes it. */
+const noticeable = 0.02;
+
+const clip = (value: number): number => Math.max(0, Math.min(1, value));
+const step = (value: number): string =>
+  Math.round(255 * clip(value))
+    .toString(16)
+    .padStart(2, '0');
+
+/** `#rrggbb` of linear channels, each clipped to 0 to 1. */
+function hexOf([r, g, b]: Triple): string {
+  const rgb = convertLrgbToRgb({ r: clip(r), g: clip(g), b: clip(b) });
+  return `#${step(rgb.r)}${step(rgb.g)}${step(rgb.b)}`;
+}
+
+/** Linear sRGB channels (0 to 1 inside the gamut) of XYZ under any white. */
+export function linearSrgb(xyz: Triple, white: Triple): Triple {
+  const [x, y, z] = adapt(xyz, white, srgbWhite);
+  const { r, g, b } = convertRgbToLrgb(convertXyz65ToRgb({ x: x / 100, y: y / 100, z: z / 100 }));
+  return [r, g, b];
+}
+
+export const isInSrgb = (linear: Triple, within = slack): boolean =>
+  linear.every((value) => value >= -within && value <= 1 + within);
+
+/** OKLab (B. Ottosson, 2020) of linear sRGB channels, which may lie outside the gamut. */
+export function oklabOf([r, g, b]: Triple): Triple {
+  const { l, a, b: beta } = convertLrgbToOklab({ r, g, b });
+  return [l, a, beta];
+}
+
+function fromOklab(l: number, a: number, b: number): Triple {
+  const linear = convertOklabToLrgb({ l, a, b });
+  return [linear.r, linear.g, linear.b];
+}
+
+/**
+ * The nearest colour a screen can show: chroma in OKLCh is reduced until what clipping would still change cannot be
+ * noticed (gamut mapping of CSS Color Module Level 4, section 13.2), so hue and lightness stay.
+ */
+export function reduceChroma(linear: Triple): Triple {
+  if (isInSrgb(linear, 0)) return linear;
+  const [l, a, b] = oklabOf(linear);
+  if (l >= 1) return [1, 1, 1];
+  if (l <= 0) return [0, 0, 0];
+  let shown: Triple = [clip(linear[0]), clip(linear[1]), clip(linear[2])];
+  const differs = (share: number, candidate: Triple): number => {
+    shown = [clip(candidate[0]), clip(candidate[1]), clip(candidate[2])];
+    const [lightness, green, blue] = oklabOf(shown);
+    return Math.hypot(lightness - l, green - share * a, blue - share * b);
+  };
+  let [kept, refused] = [0, 1];
+  const chroma = Math.hypot(a, b);
+  while ((refused - kept) * chroma > 1e-4) {
+    const share = (kept + refused) / 2;
+    const candidate = fromOklab(l, share * a, share * b);
+    if (isInSrgb(candidate, 0) || differs(share, candidate) <= noticeable) kept = share;
+    else refused = share;
+  }
+  const reduced = fromOklab(l, kept * a, kept * b);
+  return [clip(reduced[0]), clip(reduced[1]), clip(reduced[2])];
+}
+
+export interface DisplayColour {
+  readonly inGamut: boolean;
+  /** Chroma reduced where the colour lies outside sRGB. */
+  readonly hex: string;
+  /** Channels clipped one by one: for comparison with other programs only, since it can change the hue. */
+  readonly hexClipped: string;
+  readonly linear: Triple;
+  readonly oklab: Triple;
+}
+
+/** How a screen shows XYZ seen by an eye that is adapted to `white`. */
+export function displayColour(xyz: Triple, white: Triple): DisplayColour {
+  const linear = linearSrgb(xyz, white);
+  const inGamut = isInSrgb(linear);
+  const hexClipped = hexOf(linear);
+  return {
+    inGamut,
+    hex: inGamut ? hexClipped : hexOf(reduceChroma(linear)),
+    hexClipped,
+    linear,
+    oklab: oklabOf(linear),
+  };
+}
+
+/** Only the `#rrggbb` and whether it is in gamut, for many draws. */
+export function displayHex(xyz: Triple, white: Triple): { readonly hex: string; readonly inGamut: boolean } {
+  const linear = linearSrgb(xyz, white);
+  const inGamut = isInSrgb(linear);
+  return { hex: hexOf(inGamut ? linear : reduceChroma(linear)), inGamut };
+}

@@ -1,0 +1,84 @@
+import { illuminants, observers, type IlluminantId, type ObserverId } from '../library/colourTables';
+import { visibleCount } from '../spectrum/visibleTransmission';
+
+export type Triple = readonly [number, number, number];
+
+/** How a colour is looked at. */
+export interface Viewing {
+  readonly illuminant?: IlluminantId;
+  readonly observer?: ObserverId;
+}
+
+/** Illuminant times colour-matching functions, scaled so that the perfect transmitter has Y = 100. */
+export interface ViewingWeights {
+  readonly illuminant: IlluminantId;
+  readonly observer: ObserverId;
+  readonly x: Float64Array;
+  readonly y: Float64Array;
+  readonly z: Float64Array;
+  /** XYZ of the perfect transmitter or diffuser, summed over the same grid. */
+  readonly white: Triple;
+}
+
+const sum = (values: Float64Array): number => values.reduce((total, value) => total + value, 0);
+
+function weigh(illuminant: IlluminantId, observer: ObserverId): ViewingWeights {
+  const { power } = illuminants[illuminant];
+  const matching = observers[observer];
+  const scale = 100 / power.reduce((total, value, index) => total + value * matching.y[index]!, 0);
+  const weights = (column: readonly number[]): Float64Array =>
+    Float64Array.from(column, (value, index) => scale * value * power[index]!);
+  const [x, y, z] = [weights(matching.x), weights(matching.y), weights(matching.z)];
+  return { illuminant, observer, x, y, z, white: [sum(x), sum(y), sum(z)] };
+}
+
+const kept = new Map<string, ViewingWeights>();
+
+/** Weight table of an illuminant and an observer (D65 and 2 degrees unless said), made once. */
+export function viewingWeights({ illuminant = 'D65', observer = '2deg' }: Viewing = {}): ViewingWeights {
+  const key = `${illuminant}/${observer}`;
+  const known = kept.get(key);
+  if (known !== undefined) return known;
+  const made = weigh(illuminant, observer);
+  kept.set(key, made);
+  return made;
+}
+
+/**
+ * XYZ (Y = 100 for the perfect transmitter) of light that passed a sample: plain sums over 380 to 780 nm in steps of
+ * 5 nm. CIE 15:2004, section 7.
+ *
+ * @param passed - transmittance or reflectance, 0 to 1, on the visible grid
+ * @param out - of length 3; written at `at`
+ */
+export function tristimulusInto(
+  passed: ArrayLike<number>,
+  weights: ViewingWeights,
+  out: Float64Array,
+  at = 0,
+): void {
+  let X = 0;
+  let Y = 0;
+  let Z = 0;
+  for (let point = 0; point < visibleCount; point++) {
+    const share = passed[point]!;
+    X += share * weights.x[point]!;
+    Y += share * weights.y[point]!;
+    Z += share * weights.z[point]!;
+  }
+  out[at] = X;
+  out[at + 1] = Y;
+  out[at + 2] = Z;
+}
+
+export function tristimulus(passed: ArrayLike<number>, weights: ViewingWeights): Triple {
+  const out = new Float64Array(3);
+  tristimulusInto(passed, weights, out);
+  return [out[0]!, out[1]!, out[2]!];
+}
+
+/** Chromaticity x, y; that of the white where there is no light at all. */
+export function chromaticity([X, Y, Z]: Triple, white: Triple): readonly [number, number] {
+  const total = X + Y + Z;
+  return total > 0 ? [X / total, Y / total] : chromaticity(white, white);
+}
