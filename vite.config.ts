@@ -23,7 +23,7 @@ const renderer: UserConfig = {
 };
 
 const node = (entry: Record<string, string>, outDir: string, format: 'es' | 'cjs'): UserConfig => ({
-  publicDir: false,
+  publicDir: format === 'es' ? resolve(root, 'assets/icon') : false,
   build: {
     outDir: resolve(root, outDir),
     emptyOutDir: true,

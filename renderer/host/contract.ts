@@ -46,7 +46,7 @@ export interface Calls {
   mirrorSnapshots: { payload: { projectId: string }; answer: readonly Snapshot[] };
   mirrorReadSnapshot: { payload: { projectId: string; snapshotId: string }; answer: string };
   mirrorTakeSnapshot: { payload: { copy: ProjectCopy; reason: SnapshotReason }; answer: Snapshot };
-  /** The page listens for files from outside and for commands: what came before that is handed over now. */
+  /** The page listens from now on: what came before that is handed over. */
   pageReady: { payload: null; answer: null };
   flushed: { payload: { request: number; answer: FlushAnswer }; answer: null };
 }

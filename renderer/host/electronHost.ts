@@ -1,4 +1,4 @@
-import type { Host } from './bridge';
+import type { FlushAnswer, Host, OpenedFile } from './bridge';
 import type { Answer, CallName, Calls, DesktopApi } from './contract';
 import { HostError } from './hostError';
 
@@ -16,13 +16,22 @@ export async function electronHost(api: DesktopApi): Promise<Host> {
   const done = async (call: Promise<null>): Promise<void> => void (await call);
 
   const info = await call('hostInfo', null);
-  let ready = false;
-  /** Files and commands that came before anybody listened are handed over once. */
-  const listening = (): void => {
-    if (ready) return;
-    ready = true;
-    queueMicrotask(() => void call('pageReady', null));
-  };
+  /** Files that came before anybody listened are handed over once somebody does. */
+  const early: OpenedFile[] = [];
+  let fileListener: ((file: OpenedFile) => void) | null = null;
+  api.onFileOpened((file) => (fileListener ? fileListener(file) : early.push(file)));
+
+  let flush: (() => Promise<FlushAnswer>) | null = null;
+  api.onFlush(({ request }) => {
+    const answer = flush?.() ?? Promise.resolve<FlushAnswer>({ state: 'saved' });
+    void answer
+      .catch((error: unknown): FlushAnswer => ({
+        state: 'unsaved',
+        what: error instanceof Error ? error.message.slice(0, 300) : 'the last change',
+      }))
+      .then((answer) => call('flushed', { request, answer }));
+  });
+  await call('pageReady', null);
 
   return {
     info,
@@ -31,9 +40,11 @@ export async function electronHost(api: DesktopApi): Promise<Host> {
     openFiles: ({ kind, many = false }) => call('openFiles', { kind, many }),
     dragOut: (file) => done(call('dragOut', file)),
     onFileOpened(listener) {
-      const stop = api.onFileOpened(listener);
-      listening();
-      return stop;
+      fileListener = listener;
+      early.splice(0).forEach(listener);
+      return () => {
+        if (fileListener === listener) fileListener = null;
+      };
     },
     print: () => done(call('print', null)),
     printToPdf: (request) => call('printToPdf', request),
@@ -58,14 +69,10 @@ export async function electronHost(api: DesktopApi): Promise<Host> {
     setUnsaved: (what) => void call('setUnsaved', { what: what?.slice(0, 300) ?? null }),
     openExternal: (link) => done(call('openExternal', { link })),
     onFlush(listener) {
-      return api.onFlush(({ request }) => {
-        void listener()
-          .catch((error: unknown) => ({
-            state: 'unsaved' as const,
-            what: error instanceof Error ? error.message.slice(0, 300) : 'the last change',
-          }))
-          .then((answer) => call('flushed', { request, answer }));
-      });
+      flush = listener;
+      return () => {
+        if (flush === listener) flush = null;
+      };
     },
   };
 }
