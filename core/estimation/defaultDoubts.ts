@@ -28,7 +28,9 @@ export const defaultDoubts = {
   /** B = B0 (1 - h k) itself, as a fraction of B. */
   nephelauxetic: 0.04,
   freeIonB: 0.02,
-  /** C/B, absolute. */
-  ratioCB: 0.25,
+  /** C beside what the covalency of B already says, as a fraction of C. */
+  racahC: 0.055,
+  /** The further loss of B and C in a tetrahedron, as a fraction of B. */
+  tetrahedralB: 0.05,
   zeta: 0.15,
 } as const;

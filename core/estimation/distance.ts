@@ -1,4 +1,4 @@
-import type { IonRecord, LigandRecord } from '../library';
+import type { Anchor, IonRecord, LigandRecord } from '../library';
 
 /**
  * 10Dq falls with the metal-ligand distance as r^-5 (point charges) to r^-6; A. Hauser, Top. Curr. Chem. 233 (2004)
@@ -57,4 +57,20 @@ export function spinDistances(
   if (high === undefined || low === undefined) return null;
   const donor = meanDonorRadius(donors);
   return { high_pm: high + donor, low_pm: low + donor };
+}
+
+/** Ions whose tabulated g is for the low-spin state although a high-spin one exists. */
+const lowSpinTables = new Set(['Co3+', 'Ni3+', 'Ni4+', 'Co4+', 'Cu3+']);
+
+/** The spin state whose metal-ligand distance the tabulated g of an ion goes with. */
+export const tableSpin = (ion: IonRecord): 'high' | 'low' => (lowSpinTables.has(ion.ion) ? 'low' : 'high');
+
+/** 10Dq of an anchor brought to the distance the tabulated g of its ion goes with. */
+export function onTableScale(anchor: Anchor, ligand: LigandRecord, ion: IonRecord): number {
+  const distances = spinDistances(ion, [{ ligand, places: 6 }]);
+  if (anchor.spin === null || anchor.spin === tableSpin(ion) || distances === null) return anchor.tenDq;
+  const { high_pm, low_pm } = distances;
+  return anchor.spin === 'low'
+    ? anchor.tenDq * distanceFactor(low_pm, high_pm)
+    : anchor.tenDq * distanceFactor(high_pm, low_pm);
 }

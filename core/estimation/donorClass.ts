@@ -10,7 +10,9 @@ export function donorGroup(ligand: LigandRecord): string {
 /** Groups from narrow to wide: same donors, π character and chelation; then less and less in common. */
 function groupsOf(ligand: LigandRecord): ((other: LigandRecord) => boolean)[] {
   const atoms = (record: LigandRecord): string => [...new Set(record.donorAtoms)].sort().join('');
+  const chelating = (record: LigandRecord): boolean => record.denticity > 1;
   return [
+    (other) => other.class === ligand.class && chelating(other) === chelating(ligand),
     (other) => other.class === ligand.class,
     (other) => donorGroup(other) === donorGroup(ligand),
     (other) => atoms(other) === atoms(ligand) && other.piCharacter === ligand.piCharacter,

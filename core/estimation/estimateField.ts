@@ -2,10 +2,10 @@ import { findIon, type IonRecord, type LigandRecord, type ParameterLibrary } fro
 import type { Composition } from '../record/composition';
 import type { CubicGeometry } from '../dshell/types';
 import { defaultDoubts } from './defaultDoubts';
-import { distanceExponent, distanceFactor, spinDistances } from './distance';
+import { distanceExponent, distanceFactor, spinDistances, tableSpin } from './distance';
 import { octahedralStrength, type DonorField } from './fieldStrength';
 import { applicabilityFlags, leftOutOf } from './applicability';
-import { racahB, racahC, type DonorShare } from './racah';
+import { racahParameters, type DonorShare } from './racah';
 import { estimate, notEstimated } from './uncertain';
 import type { Estimate, Flag } from './types';
 
@@ -34,9 +34,6 @@ export interface FieldEstimate {
   readonly leftOut: readonly string[];
 }
 
-/** d-electron sharing of the tables: which spin state the tabulated g of an ion is for. */
-const lowSpinScale = new Set(['Co3+', 'Ni3+', 'Ni4+', 'Co4+', 'Cu3+']);
-
 export const donorShares = (composition: Composition, library: ParameterLibrary): DonorShare[] =>
   Object.entries(composition.ligands).flatMap(([id, count]) => {
     const ligand: LigandRecord | undefined = library.ligands.get(id);
@@ -60,7 +57,7 @@ function spinFields(base: Estimate, ion: IonRecord, donors: readonly DonorShare[
   if (distances === null || base.value === null) return null;
   const { high_pm, low_pm } = distances;
   const middle_pm = (high_pm + low_pm) / 2;
-  const from = lowSpinScale.has(ion.ion) ? low_pm : high_pm;
+  const from = tableSpin(ion) === 'low' ? low_pm : high_pm;
   const at = (to: number, spin: string): Estimate => {
     if (to === from) return base;
     const factor = distanceFactor(from, to);
@@ -126,7 +123,7 @@ export function estimateField(composition: Composition, library: ParameterLibrar
     : ofGeometry(tenDq, composition, ion);
   const octahedral = composition.geometry === 'octahedral';
   const two = octahedral ? spinFields(base, ion, parts) : null;
-  const B = racahB(ion, parts, library);
+  const racah = racahParameters(ion, parts, composition.geometry, library);
   return {
     ion,
     dElectrons: ion.dElectrons,
@@ -135,8 +132,8 @@ export function estimateField(composition: Composition, library: ParameterLibrar
     donors,
     fields: two ?? { high: base, low: base, middle: base },
     twoDistances: two !== null,
-    racahB: B,
-    racahC: racahC(ion, B),
+    racahB: racah.B,
+    racahC: racah.C,
     zeta: zetaOf(ion),
     flags: applicabilityFlags(composition, ion, parts, base, library),
     leftOut: leftOutOf(composition, ion),

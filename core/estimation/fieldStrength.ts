@@ -1,5 +1,6 @@
 import type { Anchor, IonRecord, LigandRecord, ParameterLibrary } from '../library';
 import { defaultDoubts } from './defaultDoubts';
+import { onTableScale } from './distance';
 import { ligandStrength } from './ligandStrength';
 import { metalStrength } from './metalStrength';
 import type { DonorShare } from './racah';
@@ -32,7 +33,7 @@ function anchored(
   anchors: readonly Anchor[],
 ): DonorField {
   const parts = anchors.map((anchor) => ({
-    value: anchor.tenDq,
+    value: onTableScale(anchor, ligand, ion),
     sigma: defaultDoubts.anchor[anchor.confidence ?? 'low'],
   }));
   const value = parts.reduce((sum, part) => sum + part.value, 0) / parts.length;

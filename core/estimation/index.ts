@@ -3,7 +3,7 @@ export { covariance, differenceSigma, estimate, notEstimated, quadrature } from 
 export { defaultDoubts } from './defaultDoubts';
 export { donorShares, estimateField, scaled, type FieldEstimate, type SpinFields } from './estimateField';
 export { averageEnvironment, publishedProduct, type DonorField } from './fieldStrength';
-export { nephelauxeticB, ratioCB, type DonorShare } from './racah';
+export { freeIonRatio, nephelauxeticB, type DonorShare } from './racah';
 export {
   jahnTellerExpectation,
   octahedralOccupation,

@@ -1,6 +1,7 @@
 import type { IonRecord, LigandRecord, ParameterLibrary, SourcedValue } from '../library';
 import { classMean } from './donorClass';
 import { defaultDoubts } from './defaultDoubts';
+import { onTableScale } from './distance';
 import type { EstimateRoute, Reason } from './types';
 
 /** A dimensionless factor with its relative standard deviation and account. */
@@ -50,12 +51,13 @@ function publishedF(f: SourcedValue, acceptor: boolean): Evidence | null {
 /** f from 10Dq observed with the same ligand on other metals. */
 function fromRelatives(ligand: LigandRecord, ion: IonRecord, library: ParameterLibrary): Evidence[] {
   return ligand.anchors.flatMap((anchor) => {
-    const g = library.ions.get(anchor.metal)?.g.value;
-    if (g == null || anchor.metal === ion.ion) return [];
+    const other = library.ions.get(anchor.metal);
+    const g = other?.g.value;
+    if (other === undefined || g == null || anchor.metal === ion.ion) return [];
     const otherCharge = Math.abs(charge(anchor.metal) - ion.oxidationState);
     const far = ligand.piCharacter === 'acceptor' ? 0.06 : 0.025;
     const sigma = Math.hypot(confidenceSigma(anchor.confidence), 0.025, far * otherCharge);
-    const value = anchor.tenDq / g;
+    const value = onTableScale(anchor, ligand, other) / g;
     const text = `f = ${value.toFixed(2)} from 10Dq ${anchor.tenDq} of ${anchor.complex} (${anchor.source})`;
     return [{ value, sigma, route: 'metal-specific' as const, text }];
   });
@@ -88,8 +90,22 @@ function fromPlace(ligand: LigandRecord, library: ParameterLibrary): Evidence | 
   return { value, sigma, route: 'series-place', text };
 }
 
-function fromClass(ligand: LigandRecord, library: ParameterLibrary, fewest: number): Evidence | null {
-  const found = classMean(ligand, library, (other) => other.f.value, fewest);
+/** f of a ligand from its table value or its own complexes, without any appeal to its class. */
+function ownStrength(ligand: LigandRecord, ion: IonRecord, library: ParameterLibrary): number | null {
+  const acceptor = ligand.piCharacter === 'acceptor';
+  const table = publishedF(ligand.f, acceptor);
+  const relatives = table === null || acceptor ? fromRelatives(ligand, ion, library) : [];
+  const evidence = [...(table === null ? [] : [table]), ...relatives];
+  return evidence.length === 0 ? null : pool(evidence).value;
+}
+
+function fromClass(
+  ligand: LigandRecord,
+  ion: IonRecord,
+  library: ParameterLibrary,
+  fewest: number,
+): Evidence | null {
+  const found = classMean(ligand, library, (other) => ownStrength(other, ion, library), fewest);
   if (found === null) return null;
   const spread = found.spread === null ? 0.12 : found.spread / found.mean;
   const sigma = Math.max(defaultDoubts.donorClassF, spread);
@@ -125,10 +141,12 @@ export function ligandStrength(
   }
   if (relatives.length > 0) return factorOf(relatives, 'measured-relative');
   const settle = `the spectrum of [Ni(${ligand.abbreviation})n]2+, whose first band is 10Dq, would give f`;
-  const weak = [fromPlace(ligand, library), fromClass(ligand, library, 2)].filter((each) => each !== null);
+  const weak = [fromPlace(ligand, library), fromClass(ligand, ion, library, 2)].filter(
+    (each) => each !== null,
+  );
   const overlap = fromAngularOverlap(ligand, library);
   if (overlap.length > 0) return factorOf(overlap, 'measured-relative', settle);
   if (weak.length > 0) return factorOf(weak, weak[0]!.route, settle);
-  const one = fromClass(ligand, library, 1);
+  const one = fromClass(ligand, ion, library, 1);
   return one === null ? null : factorOf([{ ...one, sigma: 0.15 }], 'donor-class', settle);
 }

@@ -2,7 +2,7 @@ import type { IonRecord, LigandRecord, ParameterLibrary } from '../library';
 import { defaultDoubts } from './defaultDoubts';
 import { ligandCovalency, metalCovalency } from './nephelauxetic';
 import { estimate, notEstimated, weakestRoute } from './uncertain';
-import type { DoubtShare, Estimate, Reason } from './types';
+import type { DoubtShare, Estimate, EstimateRoute, Reason } from './types';
 
 export interface DonorShare {
   readonly ligand: LigandRecord;
@@ -16,58 +16,61 @@ export const nephelauxeticB = (freeIonB: number, h: number, k: number): number =
 /** Covalency never takes more than this share of the free-ion B in the complexes the factors were fitted to. */
 const mostReduction = 0.75;
 
-/**
- * Racah B of a complex (cm⁻¹), h averaged over the donors. Free-ion B is far too large for a complex; where no h or k
- * can be had B is not estimated.
- */
-export function racahB(ion: IonRecord, donors: readonly DonorShare[], library: ParameterLibrary): Estimate {
-  if (ion.dElectrons < 2 || ion.dElectrons > 8) {
-    return notEstimated(`B has no meaning for d${ion.dElectrons}`);
-  }
-  if (ion.B0.value === null) {
-    return notEstimated(`no free-ion B of ${ion.ion} is on file`, 'three bands of any one complex give B');
-  }
+/** Part of the ligand a donor set takes in h, and of the metal in k. */
+interface Covalency {
+  readonly hk: number;
+  readonly shares: readonly DoubtShare[];
+  readonly reasons: readonly Reason[];
+  readonly route: EstimateRoute;
+}
+
+/** h k of the average environment with the doubt that each part adds to it; a reason why not otherwise. */
+function covalency(
+  ion: IonRecord,
+  donors: readonly DonorShare[],
+  library: ParameterLibrary,
+): Covalency | string {
   const k = metalCovalency(ion, library);
   const parts = donors.map(({ ligand, places }) => ({ ligand, places, h: ligandCovalency(ligand, library) }));
   const missing = parts.filter(({ h }) => h === null).map(({ ligand }) => ligand.commonName);
-  if (k === null || missing.length > 0) {
-    return notEstimated(`nothing is known of the nephelauxetic effect of ${missing.join(', ') || ion.ion}`);
-  }
+  if (k === null || missing.length > 0) return missing.join(', ') || ion.ion;
   const total = parts.reduce((sum, { places }) => sum + places, 0);
   const mean = parts.reduce((sum, { h, places }) => sum + h!.value * places, 0) / total;
-  const reduction = Math.min(mean * k.value, mostReduction);
-  const value = ion.B0.value * (1 - reduction);
-  const slope = ion.B0.value * k.value;
-  const shares: DoubtShare[] = parts.map(({ ligand, places, h }) => ({
-    cause: `h:${ligand.id}`,
-    sigma: ((slope * places) / total) * h!.value * h!.sigma,
-  }));
-  shares.push(
-    { cause: `k:${ion.ion}`, sigma: -slope * mean * k.sigma },
-    { cause: `B0:${ion.ion}`, sigma: value * defaultDoubts.freeIonB },
-    { cause: `nephelauxetic:${ion.ion}`, sigma: value * defaultDoubts.nephelauxetic },
-  );
-  const reasons: Reason[] = [
-    { kind: 'source', text: `B0(${ion.ion}) = ${ion.B0.value} (${ion.B0.source})` },
-    ...k.reasons,
-    ...parts.flatMap(({ h }) => h!.reasons),
-  ];
-  if (mean * k.value > mostReduction) {
-    reasons.push({
-      kind: 'doubt',
-      text: `h k = ${(mean * k.value).toFixed(2)} would leave next to nothing of B; it was held at ${mostReduction}`,
-    });
-  }
-  return estimate(value, shares, weakestRoute([k.route, ...parts.map(({ h }) => h!.route)]), reasons);
+  return {
+    hk: mean * k.value,
+    shares: [
+      ...parts.map(({ ligand, places, h }) => ({
+        cause: `h:${ligand.id}`,
+        sigma: (k.value * h!.value * h!.sigma * places) / total,
+      })),
+      { cause: `k:${ion.ion}`, sigma: mean * k.value * k.sigma },
+    ],
+    reasons: [...k.reasons, ...parts.flatMap(({ h }) => h!.reasons)],
+    route: weakestRoute([k.route, ...parts.map(({ h }) => h!.route)]),
+  };
 }
 
-/** C/B of the free ion; 4 where none is on file, as the literature of the 4d and 5d ions assumes. */
-export function ratioCB(ion: IonRecord): { readonly value: number; readonly reason: Reason } {
+/**
+ * How far C falls for each part that B falls. Repulsion within t2g is reduced least, within eg most (Jorgensen's
+ * beta55 > beta35 > beta33): the low spin-flip levels are within t2g in d2 and d3,
+ * within both halves in d5, and within eg in d8. The sizes are
+ * from 2E of six chromium(III) complexes and 1E, 1T2 of nickel(II) ones.
+ */
+const reductionOfC = (dElectrons: number): number =>
+  dElectrons === 2 || dElectrons === 3 || dElectrons === 5 ? 0.75 : dElectrons === 8 ? 1.25 : 1;
+
+/**
+ * Four donors hold the electrons tighter than six: B of tetrahedral manganese(II) and cobalt(II) lies below what the h
+ * of octahedral complexes says, by 5 % in tetrabromomanganate(II) and 13 % in Co(II)-doped zinc oxide.
+ */
+const tetrahedralFactor = 0.92;
+
+/** C/B of the free ion; 4 where no C is on file, as the literature of the 4d and 5d ions assumes. */
+export function freeIonRatio(ion: IonRecord): { readonly value: number; readonly reason: Reason } {
   if (ion.C0.value !== null && ion.B0.value !== null) {
-    const value = ion.C0.value / ion.B0.value;
     return {
-      value,
-      reason: { kind: 'source', text: `C/B = ${value.toFixed(2)} of the free ion (${ion.C0.source})` },
+      value: ion.C0.value / ion.B0.value,
+      reason: { kind: 'source', text: `C0(${ion.ion}) = ${ion.C0.value} (${ion.C0.source})` },
     };
   }
   return {
@@ -76,13 +79,69 @@ export function ratioCB(ion: IonRecord): { readonly value: number; readonly reas
   };
 }
 
-export function racahC(ion: IonRecord, B: Estimate): Estimate {
-  if (B.value === null) return notEstimated('B is not estimated');
-  const ratio = ratioCB(ion);
-  const shares = (B.shares ?? []).map(({ cause, sigma }) => ({ cause, sigma: sigma * ratio.value }));
-  const doubt = B.value * defaultDoubts.ratioCB;
-  return estimate(B.value * ratio.value, [...shares, { cause: `C/B:${ion.ion}`, sigma: doubt }], B.route, [
-    ratio.reason,
-    { kind: 'doubt', text: 'C/B is taken over from the free ion', sigma: doubt },
-  ]);
+/**
+ * Racah B and C of a complex (cm⁻¹) after the nephelauxetic rule, h averaged over the donors. Free-ion values are far
+ * too large for a complex; where no h or k can be had neither is estimated.
+ */
+export function racahParameters(
+  ion: IonRecord,
+  donors: readonly DonorShare[],
+  geometry: string,
+  library: ParameterLibrary,
+): { readonly B: Estimate; readonly C: Estimate } {
+  const none = (because: string, settle?: string) => ({
+    B: notEstimated(because, settle),
+    C: notEstimated(because, settle),
+  });
+  if (ion.dElectrons < 2 || ion.dElectrons > 8) return none(`it has no meaning for d${ion.dElectrons}`);
+  if (ion.B0.value === null) {
+    return none(`no free-ion B of ${ion.ion} is on file`, 'three bands of any one complex give B');
+  }
+  const taken = covalency(ion, donors, library);
+  if (typeof taken === 'string') return none(`nothing is known of the nephelauxetic effect of ${taken}`);
+  const B0 = ion.B0.value;
+  const ratio = freeIonRatio(ion);
+  const hk = Math.min(taken.hk, mostReduction);
+  const inC = reductionOfC(ion.dElectrons);
+  const tetrahedral = geometry === 'tetrahedral' ? tetrahedralFactor : 1;
+  const of = (free: number, weight: number): { value: number; shares: DoubtShare[] } => {
+    const value = free * (1 - weight * hk) * tetrahedral;
+    const shares = taken.shares.map(({ cause, sigma }) => ({
+      cause,
+      sigma: -free * weight * tetrahedral * sigma,
+    }));
+    shares.push(
+      { cause: `B0:${ion.ion}`, sigma: value * defaultDoubts.freeIonB },
+      { cause: `nephelauxetic:${ion.ion}`, sigma: value * defaultDoubts.nephelauxetic },
+    );
+    if (tetrahedral !== 1) {
+      shares.push({ cause: `tetrahedral-B:${ion.ion}`, sigma: value * defaultDoubts.tetrahedralB });
+    }
+    return { value, shares };
+  };
+  const reasons: Reason[] = [
+    { kind: 'source', text: `B0(${ion.ion}) = ${B0} (${ion.B0.source})` },
+    ...taken.reasons,
+  ];
+  if (tetrahedral !== 1) {
+    reasons.push({ kind: 'assumption', text: `B and C ${tetrahedral} times as large in a tetrahedron` });
+  }
+  if (taken.hk > mostReduction) {
+    const text = `h k = ${taken.hk.toFixed(2)} would leave next to nothing of B; it was held at ${mostReduction}`;
+    reasons.push({ kind: 'doubt', text });
+  }
+  const b = of(B0, 1);
+  const c = of(B0 * ratio.value, inC);
+  const doubt = c.value * defaultDoubts.racahC;
+  return {
+    B: estimate(b.value, b.shares, taken.route, reasons),
+    C: estimate(c.value, [...c.shares, { cause: `C0:${ion.ion}`, sigma: doubt }], taken.route, [
+      ratio.reason,
+      ...reasons.slice(1),
+      ...(inC === 1
+        ? []
+        : [{ kind: 'assumption' as const, text: `C falls ${inC} times as fast as B with covalency` }]),
+      { kind: 'doubt', text: 'C0 and its loss are the least known part', sigma: doubt },
+    ]),
+  };
 }

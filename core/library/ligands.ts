@@ -1,3 +1,4 @@
+import { withLigandChoices } from './choices';
 import ligandFile from './data/ligands.json';
 import { sourced, unknownValue, type RawSourced, type SourcedValue, type SourceStatus } from './sourced';
 
@@ -22,6 +23,8 @@ export interface Anchor {
   readonly metal: string;
   readonly complex: string;
   readonly tenDq: number;
+  /** Spin state it was measured in, where the ion has a choice and this is not the state its g is for. */
+  readonly spin: 'high' | 'low' | null;
   readonly range: readonly [number, number] | null;
   readonly source: string;
   readonly status: SourceStatus | null;
@@ -79,7 +82,7 @@ interface RawLigand extends Omit<
   h: RawSourced;
   chiOpt: RawSourced;
   aom: (Omit<AngularOverlapSet, 'piDirections' | 'note'> & { piDirections?: number; note?: string })[];
-  anchors: (Omit<Anchor, 'note'> & { note?: string })[];
+  anchors: (Omit<Anchor, 'note' | 'spin'> & { note?: string })[];
   hazards: { text: string; ghs: string[]; source: string }[];
   ctNotes: { hidesDd: ChargeTransferWarning; text: string };
   flags?: string[];
@@ -115,6 +118,7 @@ const readLigand = (raw: RawLigand): LigandRecord => ({
     metal: anchor.metal,
     complex: anchor.complex,
     tenDq: anchor.tenDq,
+    spin: null,
     range: anchor.range,
     source: anchor.source,
     status: anchor.status,
@@ -165,9 +169,9 @@ export const ligandFromFacts = (facts: LigandFacts): LigandRecord => ({
   flags: [],
 });
 
-export const ligandRecords: readonly LigandRecord[] = (ligandFile.ligands as unknown as RawLigand[]).map(
-  readLigand,
-);
+export const ligandRecords: readonly LigandRecord[] = (ligandFile.ligands as unknown as RawLigand[])
+  .map(readLigand)
+  .map(withLigandChoices);
 
 export interface CounterIonHazard {
   readonly text: string;

@@ -13,7 +13,7 @@ export const moreLigands: readonly LigandRecord[] = [
     denticity: 1,
     donorAtoms: ['N'],
     piCharacter: 'acceptor',
-    class: 'azole',
+    class: 'heterocycle',
   }),
   ligandFromFacts({
     id: 'hbpz3',
@@ -24,7 +24,7 @@ export const moreLigands: readonly LigandRecord[] = [
     denticity: 3,
     donorAtoms: ['N', 'N', 'N'],
     piCharacter: 'donor',
-    class: 'azole-chelate',
+    class: 'heterocycle',
   }),
   ligandFromFacts({
     id: 'bpp1',
@@ -35,7 +35,7 @@ export const moreLigands: readonly LigandRecord[] = [
     denticity: 3,
     donorAtoms: ['N', 'N', 'N'],
     piCharacter: 'acceptor',
-    class: 'azole-chelate',
+    class: 'heterocycle',
   }),
   ligandFromFacts({
     id: 'tpe',

@@ -64,6 +64,7 @@ export function withParameterSet(
         metal: subject,
         complex: `${subject} with ${ligand.abbreviation}`,
         tenDq: entry.value,
+        spin: null,
         range: [entry.value - entry.sigma, entry.value + entry.sigma],
         source: entry.source,
         status: 'own',

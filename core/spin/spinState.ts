@@ -3,7 +3,6 @@ import type { CubicGeometry, CubicLevel } from '../dshell/types';
 import {
   estimate,
   octahedralOccupation,
-  ratioCB,
   strongSplittingShare,
   type DoubtShare,
   type Estimate,
@@ -220,7 +219,12 @@ export function spinState(
       temperature_K: temperature,
       nearCrossover: near,
       temperatureWindow_K: near ? temperatureWindow(gap) : null,
-      crossoverTenDqOverB: cachedCrossover(field.dElectrons, cubic, ratioCB(field.ion).value, pair),
+      crossoverTenDqOverB: cachedCrossover(
+        field.dElectrons,
+        cubic,
+        field.racahC.value / field.racahB.value,
+        pair,
+      ),
       ...moments(field, high ? pair.high : pair.low),
     },
   };
