@@ -2,6 +2,7 @@ import type { Problem } from '../errors';
 import {
   cautionsFor,
   complexFormula,
+  complexKey,
   defaultLibrary,
   findGeometry,
   withParameterSet,
@@ -15,6 +16,16 @@ import { cubicLevels } from '../dshell';
 import type { CubicLevel } from '../dshell/types';
 import { estimateField, type Estimate, type FieldEstimate, type Flag } from '../estimation';
 import { spinState, type SpinAnswer } from '../spin';
+import {
+  colourAtThreeStrengths,
+  colourBulk,
+  colourCloud,
+  colourOfSolution,
+  type IlluminantId,
+  type ObserverId,
+} from '../colour';
+import type { Band } from '../transitions/types';
+import { drawBands } from './drawBands';
 import { modelVersion } from './modelVersion';
 import { simpleBands } from './simpleBands';
 import type { Prediction, PredictionOutcome } from './types';
@@ -26,8 +37,8 @@ export interface PredictOptions {
   /** Number of draws for the colour cloud; 0 or absent for none. */
   readonly draws?: number;
   readonly temperature_K?: number;
-  readonly illuminant?: string;
-  readonly observer?: string;
+  readonly illuminant?: IlluminantId;
+  readonly observer?: ObserverId;
   readonly counterIon?: string | null;
   /** Put before every field that a problem names: `[3]`. */
   readonly place?: string;
@@ -64,6 +75,29 @@ function groundTermOf(field: FieldEstimate, levels: readonly CubicLevel[]): stri
   return 'not estimated';
 }
 
+/** Seen colour at the stated strength, at a third and three times it, and of draws from the uncertainties. */
+function seen(
+  bands: readonly Band[],
+  estimates: LevelInputs,
+  conditions: Prediction['conditions'],
+  options: PredictOptions,
+  key: string,
+): Pick<Prediction, 'colour' | 'colourAtThreeStrengths' | 'cloud'> {
+  if (bands.length === 0) return { colour: null, colourAtThreeStrengths: [], cloud: null };
+  const viewing = {
+    concentration_mM: conditions.concentration_mM,
+    path_cm: conditions.path_cm,
+    ...(options.illuminant === undefined ? {} : { illuminant: options.illuminant }),
+    ...(options.observer === undefined ? {} : { observer: options.observer }),
+  };
+  const count = options.draws ?? 0;
+  return {
+    colour: colourOfSolution(bands, viewing),
+    colourAtThreeStrengths: colourAtThreeStrengths(bands, viewing),
+    cloud: count > 0 ? colourCloud(colourBulk(drawBands(bands, estimates, count, key), viewing)) : null,
+  };
+}
+
 function predictChecked(
   input: CandidateInput,
   library: ParameterLibrary,
@@ -85,6 +119,11 @@ function predictChecked(
   const inputs = { tenDq, B: field.racahB, C: field.racahC };
   const levels = levelsOf(field, inputs);
   const geometry = findGeometry(composition.geometry);
+  const conditions = {
+    concentration_mM: input.concentration_mM ?? defaults.concentration_mM,
+    path_cm: input.path_cm ?? defaults.path_cm,
+    temperature_K,
+  };
   const bands = simpleBands({ levels, ...inputs, centrosymmetric: geometry?.centrosymmetric ?? false });
   const flags: Flag[] = [...field.flags];
   if (spin.prediction.nearCrossover) {
@@ -108,14 +147,8 @@ function predictChecked(
     groundTerm: groundTermOf(field, levels),
     levels,
     bands,
-    conditions: {
-      concentration_mM: input.concentration_mM ?? defaults.concentration_mM,
-      path_cm: input.path_cm ?? defaults.path_cm,
-      temperature_K,
-    },
-    colour: null,
-    colourAtThreeStrengths: [],
-    cloud: null,
+    conditions,
+    ...seen(bands, inputs, conditions, options, complexKey(composition)),
     flags,
     leftOut: field.leftOut,
     cautions: cautionsFor(composition, options.counterIon, library),
