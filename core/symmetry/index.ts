@@ -16,3 +16,5 @@ export { termsByDescent } from './terms/descentOfConfiguration';
 export { splitTerm, termOrigins, type TermOrigin } from './terms/correlation';
 export { binomial, countMicrostates, type Term } from './terms/term';
 export * from './rotation';
+export { carry, turned, type Operation } from './groups/operation';
+export { schoenflies, type StandingGroup } from './recognition/schoenflies';
