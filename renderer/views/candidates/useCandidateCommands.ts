@@ -1,0 +1,55 @@
+import { useMemo } from 'react';
+import { type Command, menuCommand, useCommands } from '../../app/commands';
+import { useRouter } from '../../app/router/RouterContext';
+import { filterFieldId } from './FilterBar';
+import type { RowActions } from './selection/useRowActions';
+import type { TableRow } from './tableRow';
+
+interface CandidateCommands {
+  readonly projectId: string;
+  /** The selected rows, or the row that has the focus. */
+  readonly subjects: readonly TableRow[];
+  readonly actions: RowActions;
+  readonly onTag: () => void;
+  readonly onCopy: () => void;
+  readonly onSelectAll: () => void;
+}
+
+const group = 'Candidates';
+
+export function useCandidateCommands(given: CandidateCommands): void {
+  const { projectId, subjects, actions, onTag, onCopy, onSelectAll } = given;
+  const { go } = useRouter();
+  const commands = useMemo((): readonly Command[] => {
+    const disabled = subjects.length === 0;
+    const archived = !disabled && subjects.every(({ candidate }) => candidate.archived);
+    const command = (id: string, label: string, keys: readonly string[], run: () => void): Command => ({
+      id: `candidates.${id}`,
+      label,
+      group,
+      keys,
+      run,
+      disabled,
+    });
+    return [
+      menuCommand('new-candidate', () => go({ view: 'entry', project: projectId }), { keys: ['n'] }),
+      {
+        id: 'candidates.filter',
+        label: 'Filter the candidates',
+        group,
+        keys: ['f'],
+        run: () => document.getElementById(filterFieldId)?.focus(),
+      },
+      { id: 'candidates.all', label: 'Select all that are shown', group, keys: ['Mod+A'], run: onSelectAll },
+      command('star', 'Star or unstar', ['s'], () => actions.star(subjects)),
+      command('tag', 'Tag', ['t'], onTag),
+      command('copy', 'Copy as a table for a spreadsheet', ['Mod+C'], onCopy),
+      command('duplicate', 'Duplicate', ['d'], () => actions.duplicate(subjects)),
+      command('archive', archived ? 'Take back from the archive' : 'Archive', ['a'], () =>
+        actions.archive(subjects, !archived),
+      ),
+      command('delete', 'Delete', ['Delete'], () => actions.remove(subjects)),
+    ];
+  }, [go, projectId, subjects, actions, onTag, onCopy, onSelectAll]);
+  useCommands(commands);
+}
