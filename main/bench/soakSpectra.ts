@@ -2,7 +2,7 @@ import { mkdirSync, readdirSync, readFileSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { parseArgs } from 'node:util';
 import { seeded } from '../../core/testing/seeded';
-import { soak } from '../../core/testing/spectra/mutate';
+import { soak } from '../../core/testing/mutateSpectra';
 
 const { values } = parseArgs({
   options: {

@@ -2,7 +2,7 @@ import { readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { expect, it } from 'vitest';
 import { seeded } from '../../testing/seeded';
-import { soak } from '../../testing/spectra/mutate';
+import { soak } from '../../testing/mutateSpectra';
 
 const folder = join(import.meta.dirname, '../../testing/spectra');
 const files = ['jcamp', 'csv'].flatMap((kind) =>
