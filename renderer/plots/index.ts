@@ -8,6 +8,8 @@ export { type ColourTarget } from './colourCloud/colourTarget';
 export { SaveFigureProvider, type SaveFigure } from './figure/SaveFigure';
 export { PlotTable, tableText, type PlotTableData } from './frame/PlotTable';
 export { type CandidatePlace } from './levelDiagram/CandidateMark';
+export { computedLines, type DiagramProblem } from './levelDiagram/computedLines';
+export { type DiagramAxes } from './levelDiagram/diagramUnits';
 export { LevelDiagram, type LevelDiagramProps } from './levelDiagram/LevelDiagram';
 export { crossoversOf, linesFromLevels, type Crossover, type LevelLine } from './levelDiagram/levelLine';
 export { MomentPlot, type MomentPlotProps, type MomentSeries } from './moment/MomentPlot';

@@ -1,10 +1,19 @@
 import { type Caution } from '../../../core/prediction/types';
 import './CautionList.css';
 
+interface CautionListProps {
+  readonly cautions: readonly Caution[];
+  /** Complex or list they belong to, where a page shows several. */
+  readonly of?: string;
+}
+
 /** General cautions about the substances in play. They inform, print with the page and cannot be folded away. */
-export function CautionList({ cautions }: { readonly cautions: readonly Caution[] }) {
+export function CautionList({ cautions, of }: CautionListProps) {
   return (
-    <section className="caution-list" aria-label="Safety cautions">
+    <section
+      className="caution-list"
+      aria-label={of === undefined ? 'Safety cautions' : `Safety cautions: ${of}`}
+    >
       <h3>Before anything is made</h3>
       {cautions.length === 0 ? (
         <p className="caution-none">

@@ -178,7 +178,7 @@ export function PartsPage() {
             <CautionList cautions={cautions} />
           </div>
           <div className="gallery-cell">
-            <CautionList cautions={[]} />
+            <CautionList cautions={[]} of="nothing on file" />
           </div>
         </div>
       </Section>

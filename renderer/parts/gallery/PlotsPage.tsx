@@ -1,4 +1,6 @@
 import {
+  computedLines,
+  LevelDiagram,
   BandFitPlot,
   BlandAltmanPlot,
   ColourCloudPlot,
@@ -12,6 +14,10 @@ import { fit, moments, pairs, paretoPoints } from './plotSamples';
 import { bands, chargeTransfer, cloud, grid, sumOf, violet } from './samples';
 import { Section } from './Section';
 
+const octahedral = { geometry: 'octahedral' } as const;
+const d6 = computedLines({ ...octahedral, dElectrons: 6, B: 800, C: 3_600, axes: 'over-B', upTo: 40 });
+const d5 = computedLines({ ...octahedral, dElectrons: 5, B: 800, C: 3_600, axes: 'over-B', upTo: 40 });
+const d3 = computedLines({ ...octahedral, dElectrons: 3, B: 725, C: 2_900, axes: 'absolute', upTo: 30_000 });
 const all = [...bands, chargeTransfer];
 const mean = pairs.reduce((sum, { measured, predicted }) => sum + measured - predicted, 0) / pairs.length;
 const sd = Math.sqrt(
@@ -22,6 +28,28 @@ const sd = Math.sqrt(
 export function PlotsPage() {
   return (
     <>
+      <Section title="Levels">
+        <LevelDiagram
+          title="Levels of d6, octahedral"
+          axes="over-B"
+          lines={d6}
+          candidate={{ x: 18, sigma: 1.6, name: 'candidate' }}
+        />
+        <div className="gallery-row">
+          <div className="gallery-wide">
+            <LevelDiagram
+              title="Levels of d3, octahedral"
+              axes="absolute"
+              lines={d3}
+              candidate={{ x: 17_400, sigma: 1_100, name: '[Cr(H2O)6]3+' }}
+            />
+          </div>
+          <div className="gallery-wide">
+            <LevelDiagram title="Levels of d5, octahedral" axes="over-B" lines={d5} />
+          </div>
+        </div>
+        <LevelDiagram title="No field" axes="absolute" lines={[]} />
+      </Section>
       <Section title="Spectrum">
         <SpectrumPlot
           predicted={{ wavenumber_cm1: grid, value: sumOf(all) }}

@@ -3,6 +3,7 @@ import { StrictMode } from 'react';
 import { createRoot } from 'react-dom/client';
 import { ToastProvider, UnitProvider } from '..';
 import '../../app/tokens.css';
+import '../../app/base.css';
 import './gallery.css';
 import { PartsPage } from './PartsPage';
 import { PlotsPage } from './PlotsPage';

@@ -4,7 +4,7 @@ import { colourNumbers } from '../../parts/colour';
 import { formatShare } from '../../parts/number';
 import { Axes, Plot, PlotClip, type PlotView } from '../frame';
 import { cloudLegend } from './cloudLegend';
-import { cloudHeight, cloudMargin, planeReach } from './cloudPlane';
+import { cloudHeight, cloudMargin, cloudWidest, planeReach } from './cloudPlane';
 import { LightnessColumn } from './LightnessColumn';
 import { type ColourTarget } from './colourTarget';
 import './ColourCloudPlot.css';
@@ -62,6 +62,7 @@ export function ColourCloudPlot(props: ColourCloudPlotProps) {
       summary={`${draws.length} draws from the uncertainties on the a*b* plane. ${account ?? ''}`}
       x={{ label: 'a*  (green – red)', domain: [-reach, reach] }}
       y={{ label: 'b*  (blue – yellow)', domain: [-reach, reach] }}
+      widest={cloudWidest}
       margin={cloudMargin}
       height={cloudHeight}
       zoom="xy"

@@ -8,6 +8,9 @@ export function cloudMargin(width: number): { top: number; right: number; bottom
 /** Room for the lightness scale to the right of the square, px. */
 export const lightnessColumn = 104;
 
+/** Width at which the square has its full size, px. */
+export const cloudWidest = 66 + 420 + lightnessColumn;
+
 export function cloudHeight(width: number): number {
   const { top, bottom, left, right } = cloudMargin(width);
   return width - left - right + top + bottom;

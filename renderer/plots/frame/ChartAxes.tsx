@@ -45,7 +45,7 @@ export function ChartAxes({ view, y = 'y' }: { readonly view: PlotView; readonly
           value: view.yLabel,
           angle: -90,
           position: 'insideLeft',
-          offset: 6,
+          offset: 10,
           className: 'plot-axis-label',
           style: { textAnchor: 'middle' },
         }}

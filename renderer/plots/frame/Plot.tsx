@@ -20,6 +20,8 @@ export interface PlotProps {
   readonly table: PlotTableData;
   /** Height of the drawing, CSS px; a function where it follows the width. */
   readonly height?: number | ((width: number) => number);
+  /** Widest the plot may become, CSS px, where more room would stay empty. */
+  readonly widest?: number;
   readonly margin?: Margin | ((width: number) => Margin);
   /** Which axes can be zoomed; none by default. */
   readonly zoom?: 'x' | 'xy';
@@ -103,7 +105,7 @@ export function Plot(props: PlotProps) {
   };
 
   return (
-    <figure className="plot">
+    <figure className="plot" style={props.widest === undefined ? undefined : { maxInlineSize: props.widest }}>
       <div className="plot-head">
         <h3 id={`${id}-title`}>{title}</h3>
         <PlotTools

@@ -24,13 +24,51 @@ export function labelPlaces(
     .map((place, index) => place + index * gap);
 }
 
-/** As many labels as fit, the first (lowest) ones first; places in the order of `wanted`. */
-export function fittingLabels(
-  wanted: readonly number[],
+/** A label and how much it matters; of two that crowd each other, the lower `priority` goes. */
+export interface WantedLabel {
+  readonly at: number;
+  readonly priority: number;
+}
+
+/** Neighbours of `index` that stand exactly at the gap: they push each other. */
+function crowd(places: readonly number[], index: number, gap: number): readonly [number, number] {
+  let [first, last] = [index, index];
+  while (first > 0 && places[first]! - places[first - 1]! < gap + 1e-6) first--;
+  while (last < places.length - 1 && places[last + 1]! - places[last]! < gap + 1e-6) last++;
+  return [first, last];
+}
+
+/**
+ * The labels that can stand within `reach` of where they belong, and where. Those that matter least give way; `wanted`
+ * must rise.
+ */
+export function fittingLabels<Label extends WantedLabel>(
+  wanted: readonly Label[],
   gap: number,
   span: readonly [number, number],
-): { readonly places: readonly number[]; readonly dropped: number } {
-  const most = Math.max(0, Math.floor((span[1] - span[0]) / gap + 1e-9) + 1);
-  const kept = wanted.slice(0, most);
-  return { places: labelPlaces(kept, gap, span) ?? [], dropped: wanted.length - kept.length };
+  reach: number,
+): { readonly label: Label; readonly place: number }[] {
+  const kept = [...wanted];
+  while (kept.length > 0) {
+    const places = labelPlaces(
+      kept.map(({ at }) => at),
+      gap,
+      span,
+    );
+    let [first, last] = [0, kept.length - 1];
+    if (places) {
+      const moved = places.map((place, index) => Math.abs(place - kept[index]!.at));
+      const worst = moved.indexOf(Math.max(...moved));
+      if (moved[worst]! <= reach) return kept.map((label, index) => ({ label, place: places[index]! }));
+      [first, last] = crowd(places, worst, gap);
+      // A label alone in its crowd is held by the end of the span and cannot come nearer.
+      if (first === last) return kept.map((label, index) => ({ label, place: places[index]! }));
+    }
+    let least = first;
+    for (let index = first; index <= last; index++) {
+      if (kept[index]!.priority < kept[least]!.priority) least = index;
+    }
+    kept.splice(least, 1);
+  }
+  return [];
 }

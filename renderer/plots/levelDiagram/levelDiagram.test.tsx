@@ -2,6 +2,7 @@ import { afterEach, describe, expect, it } from 'vitest';
 import { cleanup, fireEvent, render, screen } from '@testing-library/react';
 import { type CubicLevel } from '../../../core/dshell/types';
 import { UnitProvider } from '../../parts/number';
+import { computedLines } from './computedLines';
 import { fittingLabels, labelPlaces } from './labelPlaces';
 import { LevelDiagram } from './LevelDiagram';
 import { crossoversOf, linesFromLevels, type LevelLine } from './levelLine';
@@ -84,9 +85,56 @@ describe('labels', () => {
     expect(places.at(-1)).toBeLessThanOrEqual(400);
   });
 
-  it('are left out from the far end where they do not fit', () => {
+  it('stand within reach of their lines, and those that matter least give way', () => {
     expect(labelPlaces([0, 0, 0], 60, [0, 100])).toBeNull();
-    expect(fittingLabels([0, 0, 0], 60, [0, 100])).toEqual({ places: [0, 60], dropped: 1 });
+    const wanted = [
+      { at: 50, priority: 2 },
+      { at: 50, priority: 1 },
+      { at: 51, priority: 3 },
+      { at: 90, priority: 1 },
+    ];
+    const kept = fittingLabels(wanted, 14, [0, 100], 10);
+    expect(kept.map(({ label }) => label.priority)).toEqual([2, 3, 1]);
+    for (const { label, place } of kept) expect(Math.abs(place - label.at)).toBeLessThanOrEqual(10);
+    expect(fittingLabels([], 14, [0, 100], 10)).toEqual([]);
+  });
+
+  it('keep one at the end of the span although it cannot reach its line', () => {
+    expect(fittingLabels([{ at: 130, priority: 1 }], 14, [0, 100], 10)).toHaveLength(1);
+  });
+});
+
+describe('computed lines', () => {
+  // Ground-state changes at C/B = 4.5 as tabulated from the complete matrices (Tanabe and Sugano 1954; printed to 0.1).
+  it.each([
+    [4, 26.8],
+    [5, 28.4],
+    [6, 18.9],
+    [7, 21.2],
+  ])('of d%i change their ground level at 10Dq/B = %f', (dElectrons, expected) => {
+    const lines = computedLines({
+      ...{ dElectrons, geometry: 'octahedral', B: 1_000, C: 4_500, axes: 'over-B', upTo: 40, count: 41 },
+    });
+    const [crossover] = crossoversOf(lines);
+    expect(crossover!.x).toBeCloseTo(expected, 1);
+  });
+
+  it('start from the terms of the free ion and never fall below the ground level', () => {
+    const lines = computedLines({
+      ...{
+        dElectrons: 3,
+        geometry: 'octahedral',
+        B: 725,
+        C: 2_900,
+        axes: 'absolute',
+        upTo: 30_000,
+        count: 11,
+      },
+    });
+    for (const { points } of lines) for (const { y } of points) expect(y).toBeGreaterThanOrEqual(0);
+    // 4P above 4F of d3 is 15 B (Racah 1942).
+    const upper = lines.filter(({ label }) => label === '4T1g').at(-1)!;
+    expect(upper.points[0]!.y).toBeCloseTo(15 * 725, 6);
   });
 });
 
