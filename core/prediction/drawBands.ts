@@ -1,7 +1,9 @@
 import type { Estimate } from '../estimation';
 import { emptyBandDraws, type BandDraws } from '../transitions/bandDraws';
 import type { Band } from '../transitions/types';
+import { complexKey } from '../library';
 import { sharedNormals } from './sharedNormals';
+import type { Prediction } from './types';
 
 /** Widths vary by 15 % (one standard deviation), whatever the centres do. */
 const widthSigma = 0.15;
@@ -75,3 +77,15 @@ export function drawBands(
   });
   return draws;
 }
+
+/** Draws of the bands of a finished prediction, the same ones its own cloud was made of. */
+export const estimateDraws = (
+  prediction: Pick<Prediction, 'bands' | 'tenDq' | 'racahB' | 'racahC' | 'composition'>,
+  count: number,
+): BandDraws =>
+  drawBands(
+    prediction.bands,
+    { tenDq: prediction.tenDq, B: prediction.racahB, C: prediction.racahC },
+    count,
+    complexKey(prediction.composition),
+  );

@@ -1,4 +1,5 @@
 import type { Command } from '../command';
+import { agreement } from './agreement';
 import { estimate } from './estimate';
 import { colour } from './colour';
 import { fitBands } from './fitBands';
@@ -6,4 +7,4 @@ import { readSpectrum } from './readSpectrum';
 import { terms } from './terms';
 
 /** One file per command in this folder; the order here is the order of the help text. */
-export const commands: readonly Command[] = [estimate, readSpectrum, fitBands, terms, colour];
+export const commands: readonly Command[] = [estimate, agreement, readSpectrum, fitBands, terms, colour];
