@@ -111,7 +111,8 @@ export function browserHost(): Host {
     onTheme: theme.onTheme,
     mirror: loopbackMirror(mirror),
     async openExternal(link) {
-      open(externalLinks[link].url, '_blank', 'noopener,noreferrer');
+      if (mirror) await callLoopback('openExternal', { link });
+      else open(externalLinks[link].url, '_blank', 'noopener,noreferrer');
     },
     reload: async () => location.reload(),
     setUnsaved(what) {

@@ -14,6 +14,7 @@ export const loopbackCalls = [
   'mirrorSnapshots',
   'mirrorReadSnapshot',
   'mirrorTakeSnapshot',
+  'openExternal',
 ] as const satisfies readonly CallName[];
 export type LoopbackCall = (typeof loopbackCalls)[number];
 
