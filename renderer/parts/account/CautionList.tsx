@@ -1,3 +1,4 @@
+import { standingCaution } from '../../../core/library/cautions';
 import { type Caution } from '../../../core/prediction/types';
 import './CautionList.css';
 
@@ -30,10 +31,7 @@ export function CautionList({ cautions, of }: CautionListProps) {
           ))}
         </ul>
       )}
-      <p className="caution-standing">
-        General caution only. Read the current safety data sheets, assess the risk on the spot, follow local
-        rules; some work needs a licence or supervision.
-      </p>
+      <p className="caution-standing">{standingCaution}</p>
     </section>
   );
 }

@@ -1,5 +1,6 @@
 import { afterEach, describe, expect, it } from 'vitest';
 import { cleanup, render, screen } from '@testing-library/react';
+import { Configuration } from './Configuration';
 import { Formula } from './Formula';
 import { formulaPieces, spokenFormula } from './formulaPieces';
 import { spokenTerm } from './termLabel';
@@ -43,6 +44,16 @@ describe('a term symbol', () => {
       </svg>,
     );
     expect(screen.getByTestId('label').textContent).toBe('2T1g');
+  });
+});
+
+describe('a configuration', () => {
+  it('names the lower orbitals first and is read aloud', () => {
+    const { container, rerender } = render(<Configuration t2={4} e={2} geometry="octahedral" />);
+    expect(container.querySelector('[aria-hidden]')!.textContent).toBe('t2g4eg2');
+    expect(screen.getByText('t two g four, e g two')).toBeTruthy();
+    rerender(<Configuration t2={0} e={1} geometry="tetrahedral" />);
+    expect(container.querySelector('[aria-hidden]')!.textContent).toBe('e1');
   });
 });
 

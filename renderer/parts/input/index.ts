@@ -1,3 +1,4 @@
 export { Keys } from './Keys';
 export { matchOptions, type SelectOption } from './matchOptions';
 export { SearchableSelect } from './SearchableSelect';
+export { SegmentedChoice } from './SegmentedChoice';

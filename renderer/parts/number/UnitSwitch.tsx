@@ -1,27 +1,11 @@
-import { useId } from 'react';
+import { SegmentedChoice } from '../input/SegmentedChoice';
 import { useUnit } from './UnitContext';
 import { energyUnits, unitSpoken, unitText } from './unitNames';
-import './UnitSwitch.css';
+
+const options = energyUnits.map((unit) => ({ id: unit, label: unitText[unit], title: unitSpoken[unit] }));
 
 /** Radio group that sets the unit of every energy on the page. */
 export function UnitSwitch({ legend = 'Energy unit' }: { readonly legend?: string }) {
   const { unit, setUnit } = useUnit();
-  const name = useId();
-  return (
-    <fieldset className="unit-switch">
-      <legend className="visually-hidden">{legend}</legend>
-      {energyUnits.map((choice) => (
-        <label key={choice} className="unit-switch-choice" title={unitSpoken[choice]}>
-          <input
-            type="radio"
-            name={name}
-            value={choice}
-            checked={choice === unit}
-            onChange={() => setUnit(choice)}
-          />
-          <span>{unitText[choice]}</span>
-        </label>
-      ))}
-    </fieldset>
-  );
+  return <SegmentedChoice legend={legend} options={options} value={unit} onChange={setUnit} />;
 }
