@@ -56,7 +56,39 @@ export function ligandCovalency(ligand: LigandRecord, library: ParameterLibrary)
   };
 }
 
-/** Nephelauxetic factor k of an ion, from the table or the mean over ions of like charge. */
+interface Neighbour {
+  readonly ion: IonRecord;
+  readonly weight: number;
+}
+
+/**
+ * The nearest ions with a k on either side along the row, of the same charge, weighed by how near they are; of another
+ * row where there is none in its own.
+ */
+function neighbours(ion: IonRecord, library: ParameterLibrary): Neighbour[] {
+  const alike = [...library.ions.values()].filter(
+    (other) => other.k.value !== null && other.oxidationState === ion.oxidationState,
+  );
+  const row = alike.filter(({ period }) => period === ion.period);
+  const used = row.length > 0 ? row : alike;
+  const nearest = (side: readonly IonRecord[]): IonRecord | undefined =>
+    side.toSorted(
+      (a, b) => Math.abs(a.dElectrons - ion.dElectrons) - Math.abs(b.dElectrons - ion.dElectrons),
+    )[0];
+  const left = nearest(used.filter(({ dElectrons }) => dElectrons <= ion.dElectrons));
+  const right = nearest(used.filter(({ dElectrons }) => dElectrons > ion.dElectrons));
+  if (left === undefined || right === undefined) {
+    const only = left ?? right;
+    return only === undefined ? [] : [{ ion: only, weight: 1 }];
+  }
+  const span = right.dElectrons - left.dElectrons;
+  return [
+    { ion: left, weight: (right.dElectrons - ion.dElectrons) / span },
+    { ion: right, weight: (ion.dElectrons - left.dElectrons) / span },
+  ];
+}
+
+/** Nephelauxetic factor k of an ion, from the table or from its neighbours along the row. */
 export function metalCovalency(ion: IonRecord, library: ParameterLibrary): Factor | null {
   const { k } = ion;
   if (k.value !== null) {
@@ -67,13 +99,9 @@ export function metalCovalency(ion: IonRecord, library: ParameterLibrary): Facto
       reasons: [{ kind: 'source', text: `k(${ion.ion}) = ${k.value} (${k.source})` }],
     };
   }
-  const alike = [...library.ions.values()].filter(
-    (other) => other.k.value !== null && other.oxidationState === ion.oxidationState,
-  );
-  const row = alike.filter(({ period }) => period === ion.period);
-  const used = row.length > 0 ? row : alike;
-  if (used.length === 0) return null;
-  const value = used.reduce((sum, other) => sum + other.k.value!, 0) / used.length;
+  const near = neighbours(ion, library);
+  if (near.length === 0) return null;
+  const value = near.reduce((sum, { ion: other, weight }) => sum + other.k.value! * weight, 0);
   return {
     value,
     sigma: defaultDoubts.analogyK,
@@ -81,7 +109,7 @@ export function metalCovalency(ion: IonRecord, library: ParameterLibrary): Facto
     reasons: [
       {
         kind: 'assumption',
-        text: `no k is in print for ${ion.ion}; ${value.toFixed(2)} is the mean of ${used.map((other) => other.ion).join(', ')}`,
+        text: `no k is in print for ${ion.ion}; ${value.toFixed(2)} after ${near.map(({ ion: other }) => other.ion).join(' and ')}, its neighbours of like charge`,
       },
     ],
   };

@@ -2,7 +2,7 @@ import type { LigandRecord } from './ligands';
 import { netCharge, withoutCharge } from './molarMass';
 import type { ParameterLibrary } from './parameterLibrary';
 
-/** Ligands written by their formula; all others by abbreviation, in lower case as IUPAC wants it. */
+/** Ligands written by their formula where that is short; all others by abbreviation. */
 const writtenByFormula = /^(halide|O-donor|amine|pseudohalide|C-donor|C\/H-donor|S-donor|Se-donor)$/;
 
 function symbolOf(ligand: LigandRecord): string {
@@ -14,6 +14,11 @@ function symbolOf(ligand: LigandRecord): string {
 }
 
 const isOneAtom = (symbol: string): boolean => /^[A-Z][a-z]?$/.test(symbol);
+
+const alphabetical = (one: string, other: string): number => {
+  const [a, b] = [one.toLowerCase(), other.toLowerCase()];
+  return a < b ? -1 : a > b ? 1 : 0;
+};
 
 /** oxo first, then neutral, then charged ligands; alphabetical within. */
 const rank = (ligand: LigandRecord): number => (ligand.id === 'oxo' ? 0 : ligand.charge === 0 ? 1 : 2);
@@ -43,7 +48,7 @@ export function complexFormula(
   });
   parts.sort((one, other) => {
     const ranks = order === 'customary' ? rank(one.ligand) - rank(other.ligand) : 0;
-    return ranks !== 0 ? ranks : one.symbol < other.symbol ? -1 : one.symbol > other.symbol ? 1 : 0;
+    return ranks !== 0 ? ranks : alphabetical(one.symbol, other.symbol);
   });
   const text = parts
     .map(({ symbol, count }) => {

@@ -1,0 +1,2 @@
+export { demoProject, type DemoProject } from './demoProject';
+export type { DemoCandidate } from './demoCandidates';
