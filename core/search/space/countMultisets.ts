@@ -4,14 +4,17 @@ import type { Pattern } from './pattern';
 
 /**
  * How many multisets of a pattern there are for each total charge of the ligands, without visiting them: ligands count
- * by (denticity, charge) only, so this is a sum of products of falling factorials.
+ * by (shape, charge) only, so this is a sum of products of falling factorials.
  */
 export function countByCharge(pattern: Pattern, pool: LigandPool): ReadonlyMap<number, number> {
-  const sizes = new Map<number, Map<number, number>>();
-  for (const { denticity, charge } of pool.ligands) {
-    const byCharge = sizes.get(denticity) ?? new Map<number, number>();
-    byCharge.set(charge, (byCharge.get(charge) ?? 0) + 1);
-    sizes.set(denticity, byCharge);
+  const sizes = new Map<string, Map<number, number>>();
+  for (const [key, positions] of pool.byShape) {
+    const byCharge = new Map<number, number>();
+    for (const position of positions) {
+      const { charge } = pool.ligands[position]!;
+      byCharge.set(charge, (byCharge.get(charge) ?? 0) + 1);
+    }
+    sizes.set(key, byCharge);
   }
   const totals = new Map<number, number>();
   const chosen: number[] = [];
@@ -21,15 +24,15 @@ export function countByCharge(pattern: Pattern, pool: LigandPool): ReadonlyMap<n
       totals.set(charge, (totals.get(charge) ?? 0) + ways);
       return;
     }
-    const { denticity, count } = pattern[kind]!;
+    const { shape, count } = pattern[kind]!;
     const repeats = repeatsPrevious(pattern, kind);
-    for (const [each, size] of [...(sizes.get(denticity) ?? [])].sort((a, b) => a[0] - b[0])) {
+    for (const [each, size] of [...(sizes.get(shape.key) ?? [])].sort((a, b) => a[0] - b[0])) {
       // Equal kinds are unordered: charges do not fall, and among equal charges the order is divided out.
       if (repeats && each < chosen[kind - 1]!) continue;
       let used = 0;
       let equal = 1;
       for (let j = 0; j < kind; j++) {
-        if (pattern[j]!.denticity !== denticity || chosen[j] !== each) continue;
+        if (pattern[j]!.shape.key !== shape.key || chosen[j] !== each) continue;
         used++;
         if (pattern[j]!.count === count) equal++;
       }

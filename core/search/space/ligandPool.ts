@@ -1,24 +1,28 @@
-import type { LigandRecord } from '../../library/ligands';
+import { shapeKey } from '../../geometry/ligandSites';
+import type { LigandRecord } from '../../library';
 import type { Wish } from '../wish/wish';
+import type { LigandShape } from './pattern';
 
 /** The ligands that a wish admits, sorted by id; a candidate refers to them by position. */
 export interface LigandPool {
   readonly ligands: readonly LigandRecord[];
-  /** Denticity to positions in `ligands`, ascending. */
-  readonly byDenticity: ReadonlyMap<number, Int32Array>;
+  readonly shapes: readonly LigandShape[];
+  /** Key of a shape to positions in `ligands`, ascending. */
+  readonly byShape: ReadonlyMap<string, Int32Array>;
 }
 
 export function poolOf(ligands: readonly LigandRecord[]): LigandPool {
   // Plain code-unit order, the same on every machine and in every language.
   const sorted = [...ligands].sort((a, b) => (a.id < b.id ? -1 : a.id > b.id ? 1 : 0));
-  const byDenticity = new Map<number, Int32Array>();
-  for (const denticity of new Set(sorted.map((ligand) => ligand.denticity))) {
-    const positions = sorted.flatMap((ligand, position) =>
-      ligand.denticity === denticity ? [position] : [],
-    );
-    byDenticity.set(denticity, Int32Array.from(positions));
-  }
-  return { ligands: sorted, byDenticity };
+  const keys = sorted.map(shapeKey);
+  const shapes = [...new Set(keys)].map((key) => ({ key, denticity: sorted[keys.indexOf(key)]!.denticity }));
+  const byShape = new Map(
+    shapes.map(({ key }) => [
+      key,
+      Int32Array.from(keys.flatMap((each, position) => (each === key ? [position] : []))),
+    ]),
+  );
+  return { ligands: sorted, shapes, byShape };
 }
 
 /** Elements a ligand brings, from its donors and its formula. */

@@ -1,9 +1,9 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { ligandFromFacts } from '../../library/ligands';
+import { ligandFromFacts } from '../../library';
 import { countByCharge } from './countMultisets';
 import { poolOf } from './ligandPool';
-import { visitMultisets } from './multisets';
+import { multisetsOf } from './multisets';
 import { patternsFilling } from './pattern';
 
 const ligand = (id: string, denticity: number, charge: number) =>
@@ -29,7 +29,8 @@ describe('multisets of ligands', () => {
   it('number C(n, 1) + C(n, 2) x 5 + C(n, 3) x 10 for n monodentate ligands on six places (compositions of six)', () => {
     const pool = poolOf(Array.from({ length: 7 }, (_, i) => ligand(`l${i}`, 1, 0)));
     let visited = 0;
-    for (const pattern of patternsFilling(6, [1], 3)) visitMultisets(pattern, pool, () => visited++);
+    for (const pattern of patternsFilling(6, pool.shapes, 3))
+      visited += [...multisetsOf(pattern, pool)].length;
     expect(visited).toBe(7 + 21 * 5 + 35 * 10);
   });
 
@@ -37,9 +38,9 @@ describe('multisets of ligands', () => {
     fc.assert(
       fc.property(pools, fc.integer({ min: 2, max: 6 }), (pool, places) => {
         const seen = new Set<string>();
-        for (const pattern of patternsFilling(places, [...pool.byDenticity.keys()], 3)) {
+        for (const pattern of patternsFilling(places, pool.shapes, 3)) {
           const byCharge = new Map<number, number>();
-          visitMultisets(pattern, pool, (picks) => {
+          for (const picks of multisetsOf(pattern, pool)) {
             const parts = [...picks].map((position, kind) => `${position}x${pattern[kind]!.count}`);
             seen.add(parts.sort().join(' '));
             expect(new Set(picks).size).toBe(picks.length);
@@ -51,11 +52,11 @@ describe('multisets of ligands', () => {
             });
             expect(filled).toBe(places);
             byCharge.set(charge, (byCharge.get(charge) ?? 0) + 1);
-          });
+          }
           expect(new Map([...countByCharge(pattern, pool)])).toEqual(byCharge);
         }
         let counted = 0;
-        for (const pattern of patternsFilling(places, [...pool.byDenticity.keys()], 3)) {
+        for (const pattern of patternsFilling(places, pool.shapes, 3)) {
           for (const ways of countByCharge(pattern, pool).values()) counted += ways;
         }
         expect(seen.size).toBe(counted);

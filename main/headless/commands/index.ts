@@ -4,7 +4,16 @@ import { estimate } from './estimate';
 import { colour } from './colour';
 import { fitBands } from './fitBands';
 import { readSpectrum } from './readSpectrum';
+import { search } from './search';
 import { terms } from './terms';
 
 /** One file per command in this folder; the order here is the order of the help text. */
-export const commands: readonly Command[] = [estimate, agreement, readSpectrum, fitBands, terms, colour];
+export const commands: readonly Command[] = [
+  estimate,
+  search,
+  agreement,
+  readSpectrum,
+  fitBands,
+  terms,
+  colour,
+];

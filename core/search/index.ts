@@ -1,0 +1,13 @@
+export { wishSchema, type BandWindow, type ClearWindow, type Wish, type WishInput } from './wish/wish';
+export { checkWish } from './wish/checkWish';
+export { countCandidates, spaceOf, type CandidateSpace } from './space/space';
+export { candidatesIn, type SpaceCandidate } from './space/candidates';
+export { scoreWish, type WishPart, type WishScore } from './score/scoreWish';
+export {
+  leastProbability,
+  scoreCandidate,
+  searchWish,
+  type SearchOptions,
+  type SearchProgress,
+  type SearchResult,
+} from './run/searchWish';
