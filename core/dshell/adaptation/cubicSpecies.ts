@@ -1,6 +1,6 @@
 import { type CubicIrrep } from '../types';
 import { withThreefold } from './cubicStates';
-import { cosineState, sineState, type AdaptedVector } from './vector';
+import { cosineState, plainState, sineState, type AdaptedVector } from './vector';
 
 /** Dimension of each species of O. */
 export const cubicDimension: Readonly<Record<CubicIrrep, number>> = { A1: 1, A2: 1, E: 2, T1: 3, T2: 3 };
@@ -33,3 +33,24 @@ export function cubicStates(J: number, irrep: CubicIrrep): AdaptedVector[] {
       return tetragonalRow(J, 2, 'sine');
   }
 }
+
+/** |J M⟩ with M ≡ remainder (mod 4), one row of a tetragonal spinor species. */
+function spinorRow(J: number, remainder: 0.5 | 2.5): AdaptedVector[] {
+  const states: AdaptedVector[] = [];
+  for (let M = -J; M <= J; M++) if ((((M - remainder) % 4) + 4) % 4 === 0) states.push(plainState(M));
+  return states;
+}
+
+/**
+ * Rows of the spinor species of O in Bethe's numbering. The tetragonal row of M ≡ ½ holds Γ6 and Γ8, that of M ≡ −3/2 holds
+ * Γ7 and Γ8; the symmetrised threefold turn has ½ = cos 60° on Γ6 and Γ7, −¼ on each row of Γ8.
+ */
+export const cubicSpinorSpecies: readonly {
+  readonly name: string;
+  readonly degeneracy: number;
+  readonly states: (J: number) => AdaptedVector[];
+}[] = [
+  { name: 'G6', degeneracy: 2, states: (J) => withThreefold(J, spinorRow(J, 0.5), 0.5) },
+  { name: 'G7', degeneracy: 2, states: (J) => withThreefold(J, spinorRow(J, 2.5), 0.5) },
+  { name: 'G8', degeneracy: 4, states: (J) => withThreefold(J, spinorRow(J, 0.5), -0.25) },
+];

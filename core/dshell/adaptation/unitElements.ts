@@ -1,6 +1,6 @@
 import { parity } from '../angularMomentum/factorials';
 import { threeJ } from '../angularMomentum/threeJ';
-import { type FieldTensors } from '../field/tensorComponents';
+import { type FieldComponent, type FieldTensors } from '../field/tensorComponents';
 import { type AdaptedVector } from './vector';
 
 export interface Complex {
@@ -8,11 +8,11 @@ export interface Complex {
   readonly im: number;
 }
 
-const cache = new Map<string, Float64Array>();
+const cache = new Map<number, Float64Array>();
 
 /** (−1)^{J−M} (J k J′; −M q M−q) for all M (index M + J) and q (index q + k); kept, since every block asks again. */
 function geometry(J: number, k: number, JPrime: number): Float64Array {
-  const key = `${J},${k},${JPrime}`;
+  const key = (2 * J * 32 + 2 * JPrime) * 8 + k;
   let table = cache.get(key);
   if (table === undefined) {
     const width = 2 * k + 1;
@@ -37,16 +37,16 @@ export function unitElement(
   JPrime: number,
   v: AdaptedVector,
 ): Complex {
-  const table = geometry(J, k, JPrime);
   let re = 0;
   let im = 0;
-  u.M.forEach((M, i) => {
+  for (let i = 0; i < u.M.length; i++) {
+    const M = u.M[i]!;
     const j = v.M.indexOf(M - q);
-    if (j < 0) return;
-    const factor = table[(M + J) * (2 * k + 1) + q + k]!;
+    if (j < 0) continue;
+    const factor = geometry(J, k, JPrime)[(M + J) * (2 * k + 1) + q + k]!;
     re += factor * (u.re[i]! * v.re[j]! + u.im[i]! * v.im[j]!);
     im += factor * (u.re[i]! * v.im[j]! - u.im[i]! * v.re[j]!);
-  });
+  }
   return { re, im };
 }
 
@@ -54,7 +54,7 @@ export function unitElement(
 export function componentElement(
   J: number,
   u: AdaptedVector,
-  component: { readonly k: 2 | 4; readonly q: number; readonly part: 're' | 'im' },
+  component: FieldComponent,
   JPrime: number,
   v: AdaptedVector,
 ): Complex {

@@ -24,6 +24,20 @@ export function sineState(J: number, M: number): AdaptedVector | null {
 
 export const plainState = (M: number): AdaptedVector => ({ M: [M], re: [1], im: [0] });
 
+/** (|M⟩ + i(−1)^{J+M} |−M⟩)/√2 for half-integer J, which a turn by π about y multiplies by i. */
+export const turnedState = (J: number, M: number): AdaptedVector => ({
+  M: [M, -M],
+  re: [Math.SQRT1_2, 0],
+  im: [0, parity(J + M) * Math.SQRT1_2],
+});
+
+/** Time reversal: |J M⟩ goes to (−1)^{J−M} |J −M⟩, coefficients to their conjugates. */
+export const timeReversed = (J: number, { M, re, im }: AdaptedVector): AdaptedVector => ({
+  M: M.map((m) => -m),
+  re: re.map((value, i) => parity(J - M[i]!) * value),
+  im: im.map((value, i) => -parity(J - M[i]!) * value),
+});
+
 /** Σ weights[i] vectors[i] for real weights. */
 export function combine(vectors: readonly AdaptedVector[], weights: readonly number[]): AdaptedVector {
   const re = new Map<number, number>();

@@ -15,6 +15,13 @@ export interface FieldTensors {
   readonly im: Readonly<Record<2 | 4, readonly number[]>>;
 }
 
+/** One real component: U_q + (−1)^q U_−q (`re`; U_0 for q = 0) or i(U_q − (−1)^q U_−q) (`im`) of rank k. */
+export interface FieldComponent {
+  readonly k: 2 | 4;
+  readonly q: number;
+  readonly part: 're' | 'im';
+}
+
 /** ⟨m|V|m′⟩ for m, m′ = 2 … −2. */
 function overMagneticNumbers(V: FieldMatrix): { re: number[][]; im: number[][] } {
   const re: number[][] = [];

@@ -1,0 +1,94 @@
+import { type CubicGroup } from '../../symmetry';
+import { fieldFrame } from '../field/fieldFrame';
+import { checkProblem, type LevelProblem } from '../problem';
+import { irrepFinder } from './irreps';
+import { levelSets } from './levelSets';
+import { fieldNamingGroup, isSymmetric, namingGroup, type NamingGroup } from './namingGroup';
+import { parentageReader, type Parentage } from './parentage';
+
+/** A level with the names and the make-up that its eigenvectors show. */
+export interface LabelledLevel {
+  /** Relative to the ground level, cm⁻¹. */
+  readonly energy: number;
+  readonly degeneracy: number;
+  /** 2S + 1; null with spin-orbit coupling. */
+  readonly multiplicity: number | null;
+  /** Mulliken symbol without spin-orbit coupling, Bethe's G number with it; null where the states are no whole representation. */
+  readonly irrep: string | null;
+  /** Mulliken symbol also with spin-orbit coupling (`E1/2g`, `F3/2g`). */
+  readonly mulliken: string | null;
+  readonly parentage: Parentage;
+}
+
+export interface LabelledLevels {
+  readonly levels: readonly LabelledLevel[];
+  /** Schoenflies symbol of the group whose representations name the levels. */
+  readonly group: string;
+  /** Names of the cubic parents and order of their orbitals. */
+  readonly cubicGroup: CubicGroup;
+  /** Size of the cubic part of the field, cm⁻¹. */
+  readonly cubicTenDq: number;
+}
+
+export interface LabelOptions {
+  /**
+   * A group by name (`C3v`, `Oh`), in standard orientation in the laboratory, or standing as wanted. Left out: the largest group
+   * of the field. A group that is none of the field's is passed over in favour of that one.
+   */
+  readonly group?: string | NamingGroup;
+  /** Energies this close count as one level, cm⁻¹; default a rounding of the span. */
+  readonly near?: number;
+}
+
+/**
+ * All levels of d^N in zero magnetic field with representation, parent terms and leading configurations, worked out from the
+ * eigenvectors by characters. Representations that share an energy are listed apart with the parentage of their common set.
+ * Throws what `levels` throws, and `out-of-range` for a magnetic field.
+ */
+export function labelLevels(problem: LevelProblem, options: LabelOptions = {}): LabelledLevels {
+  const checked = { ...checkProblem(problem), zeeman: null };
+  const frame = fieldFrame(checked.V);
+  const naming = chosenGroup(
+    options.group,
+    () => fieldNamingGroup(checked.V, frame),
+    (wanted) => isSymmetric(checked.V, wanted),
+  );
+  const spinOrbit = checked.zeta !== 0;
+  const find = irrepFinder(naming, spinOrbit);
+  const parentage = parentageReader(checked, frame.rotation);
+  const sets = levelSets(checked, frame, options.near ?? roundingOf(problem, checked.V));
+  const ground = sets[0]!.energy;
+  const levels = sets.flatMap(({ energy, S, states }): LabelledLevel[] => {
+    const multiplicity = S === null ? null : 2 * S + 1;
+    const common = { energy: energy - ground, multiplicity, parentage: parentage.read(states) };
+    const spins = multiplicity ?? 1;
+    const found = find(states);
+    if (found === null) {
+      return [{ ...common, degeneracy: spins * states.length, irrep: null, mulliken: null }];
+    }
+    return found.flatMap(({ label, mulliken, dimension, times }) =>
+      Array.from({ length: times }, () => ({
+        ...common,
+        degeneracy: spins * dimension,
+        irrep: label,
+        mulliken,
+      })),
+    );
+  });
+  return { levels, group: naming.name, cubicGroup: parentage.cubicGroup, cubicTenDq: parentage.tenDq };
+}
+
+function chosenGroup(
+  wanted: LabelOptions['group'],
+  natural: () => NamingGroup,
+  fits: (group: NamingGroup) => boolean,
+): NamingGroup {
+  const named = typeof wanted === 'string' ? namingGroup(wanted) : wanted;
+  return named != null && fits(named) ? named : natural();
+}
+
+/** Eigenvalues of one level may differ by this much through rounding. */
+function roundingOf({ B, C, zeta = 0 }: LevelProblem, V: readonly (readonly number[])[]): number {
+  const scale = Math.max(B * 50, C * 10, zeta * 5, ...V.flat().map(Math.abs));
+  return Math.max(1e-6, 4e-11 * scale);
+}

@@ -1,0 +1,64 @@
+import { hermitianEigenvalues } from '../../numerics/eigen/hermitian';
+import { quaternionEigenvalues } from '../../numerics/eigen/quaternion';
+import { symmetricEigenvalues } from '../../numerics/eigen/symmetric';
+import { bohrMagneton_cm1_T } from '../../units';
+import { type FieldGroup } from '../adaptation/species';
+import { assemble, type Parameters } from '../blocks/assemble';
+import {
+  completeBlock,
+  symmetryBlocks,
+  type OperatorName,
+  type SymmetryBlock,
+} from '../blocks/symmetryBlocks';
+import { fieldFrame, inStandardFrame, type FieldFrame } from '../field/fieldFrame';
+import { fieldTensors } from '../field/tensorComponents';
+import { hamiltonianParameters, type CheckedProblem, type ZeemanTerm } from '../problem';
+
+/** Eigenvalues of one block, ascending, without the trace of the field. */
+export interface BlockLevels {
+  readonly block: SymmetryBlock;
+  readonly values: Float64Array;
+}
+
+/**
+ * Eigenvalues of the whole shell, block by block. The rows are those of the symmetry found in the field, or of `group` in the
+ * laboratory frame where a field is known to have it. Throws `no-convergence`.
+ */
+export function solveBlocks(problem: CheckedProblem, group?: FieldGroup): BlockLevels[] {
+  if (problem.zeeman !== null) {
+    const block = completeBlock(problem.electrons);
+    return [{ block, values: blockValues(block, magneticParameters(problem, problem.zeeman)) }];
+  }
+  const frame: FieldFrame =
+    group === undefined ? fieldFrame(problem.V) : { ...inStandardFrame(problem.V), group };
+  const parameters = hamiltonianParameters(problem, frame.tensors);
+  return symmetryBlocks(problem.electrons, frame.group, problem.zeta !== 0).map((block) => ({
+    block,
+    values: blockValues(block, parameters),
+  }));
+}
+
+function blockValues(block: SymmetryBlock, parameters: Parameters): Float64Array {
+  const matrix = assemble(block, parameters);
+  switch (block.species.algebra) {
+    case 'real':
+      return symmetricEigenvalues(matrix, block.size);
+    case 'complex':
+      return hermitianEigenvalues(matrix, block.size);
+    case 'quaternion':
+      return quaternionEigenvalues(matrix, block.size);
+  }
+}
+
+/** Parameters with the Zeeman term, laboratory frame. */
+export function magneticParameters(
+  problem: CheckedProblem,
+  { B_T, k, ge }: Required<ZeemanTerm>,
+): Map<OperatorName, number> {
+  const parameters = hamiltonianParameters(problem, fieldTensors(problem.V));
+  (['x', 'y', 'z'] as const).forEach((axis, i) => {
+    parameters.set(`L${axis}`, bohrMagneton_cm1_T * B_T[i]! * k);
+    parameters.set(`S${axis}`, bohrMagneton_cm1_T * B_T[i]! * ge);
+  });
+  return parameters;
+}

@@ -1,0 +1,110 @@
+import { hermitianEigensystem } from '../../numerics/eigen/hermitian';
+import { quaternionEigensystem } from '../../numerics/eigen/quaternion';
+import { symmetricEigensystem } from '../../numerics/eigen/symmetric';
+import { identityRotation, type Quaternion } from '../../symmetry';
+import { vectorGroup } from '../adaptation/species';
+import { assemble, type Parameters } from '../blocks/assemble';
+import { algebraWidth, completeBlock, symmetryBlocks, type SymmetryBlock } from '../blocks/symmetryBlocks';
+import { fieldFrame } from '../field/fieldFrame';
+import { freeIon } from '../freeIon/reducedElements';
+import { magneticParameters } from '../levels/solveBlocks';
+import { checkProblem, hamiltonianParameters, type CheckedProblem, type LevelProblem } from '../problem';
+import { amplitudesOf, carriedBy, reversed, type Amplitudes } from './amplitudes';
+import { determinantBasis, type DeterminantBasis } from './determinantBasis';
+import { determinantWriter } from './toDeterminants';
+
+/** All C(10, N) states with their vectors over the determinants of real orbitals. */
+export interface SolvedStates {
+  readonly basis: DeterminantBasis;
+  /** Number of states. */
+  readonly count: number;
+  /** Absolute with A = 0 and the field as given, cm⁻¹, ascending. */
+  readonly energies: Float64Array;
+  /** Twice the spin of each state; null with spin-orbit coupling or in a magnetic field. */
+  readonly twiceSpin: Int8Array | null;
+  /** Row k of length `count`: the orthonormal state of `energies[k]`. */
+  readonly re: Float64Array;
+  readonly im: Float64Array;
+  /** Row k of length terms: share of each free-ion term (order of `freeIon(N).terms`) in state k; adds up to 1. */
+  readonly termWeights: Float64Array;
+  /** The free-ion terms those shares belong to. */
+  readonly terms: readonly { readonly S: number; readonly L: number; readonly seniority: number }[];
+}
+
+interface RawState {
+  readonly energy: number;
+  readonly S: number | null;
+  readonly mS: number | null;
+  readonly amplitudes: Amplitudes;
+}
+
+/**
+ * Energies and eigenvectors of the complete problem in the laboratory frame. Degenerate states span their level; which
+ * orthonormal set is taken within a level is not defined. Throws what `levels` throws.
+ */
+export function solveStates(problem: LevelProblem): SolvedStates {
+  const checked = checkProblem(problem);
+  const raw = checked.zeeman === null ? symmetricStates(checked) : magneticStates(checked);
+  raw.sort((a, b) => a.energy - b.energy);
+  const { electrons, V } = checked;
+  const count = raw.length;
+  const centre = (V.reduce((sum, row, a) => sum + row[a]!, 0) * electrons) / 5;
+  const { terms } = freeIon(electrons);
+  const re = new Float64Array(count * count);
+  const im = new Float64Array(count * count);
+  const termWeights = new Float64Array(count * terms.length);
+  const writer = determinantWriter(electrons);
+  raw.forEach(({ amplitudes, mS }, k) => {
+    writer.write(amplitudes, mS, re, im, k * count);
+    amplitudes.multiplets.forEach(({ term }, which) => {
+      const [ar, ai] = [amplitudes.re[which]!, amplitudes.im[which]!];
+      for (let at = 0; at < ar.length; at++)
+        termWeights[k * terms.length + term]! += ar[at]! ** 2 + ai[at]! ** 2;
+    });
+  });
+  return {
+    basis: determinantBasis(electrons),
+    count,
+    energies: Float64Array.from(raw, ({ energy }) => energy + centre),
+    twiceSpin: raw[0]!.S === null ? null : Int8Array.from(raw, ({ S }) => 2 * S!),
+    re,
+    im,
+    termWeights,
+    terms: terms.map(({ S, L, seniority }) => ({ S, L, seniority })),
+  };
+}
+
+function symmetricStates(problem: CheckedProblem): RawState[] {
+  const frame = fieldFrame(problem.V);
+  const parameters = hamiltonianParameters(problem, frame.tensors);
+  const blocks = symmetryBlocks(problem.electrons, vectorGroup(frame.group), problem.zeta !== 0);
+  return blocks.flatMap((block) => blockStates(block, parameters, frame.rotation));
+}
+
+function magneticStates(problem: CheckedProblem): RawState[] {
+  const parameters = magneticParameters(problem, problem.zeeman!);
+  return blockStates(completeBlock(problem.electrons), parameters, identityRotation);
+}
+
+function blockStates(block: SymmetryBlock, parameters: Parameters, rotation: Quaternion): RawState[] {
+  const { species, size, basis, S } = block;
+  const width = algebraWidth[species.algebra];
+  const matrix = assemble(block, parameters);
+  const solve = {
+    real: symmetricEigensystem,
+    complex: hermitianEigensystem,
+    quaternion: quaternionEigensystem,
+  };
+  const { values, vectors } = solve[species.algebra](matrix, size);
+  const carry = carriedBy(rotation);
+  const found: RawState[] = [];
+  for (let k = 0; k < size; k++) {
+    const own = amplitudesOf(basis, vectors.subarray(k * size * width, (k + 1) * size * width), width);
+    const set = species.partner === 'time-reversal' ? [own, reversed(own)] : [own];
+    for (const amplitudes of set.map(carry)) {
+      if (S === null) found.push({ energy: values[k]!, S, mS: null, amplitudes });
+      else for (let mS = S; mS >= -S; mS--) found.push({ energy: values[k]!, S, mS, amplitudes });
+    }
+  }
+  return found;
+}
