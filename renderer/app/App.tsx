@@ -3,6 +3,7 @@ import { ToastProvider, UnitProvider } from '../parts';
 import type { Settings } from '../store';
 import { CommandProvider } from './commands';
 import { ExchangeProvider } from './exchange/ExchangeContext';
+import { FigureFiles } from './exchange/FigureFiles';
 import { ProjectMirror } from './mirror/projectMirror';
 import { RouterProvider, useRouter } from './router/RouterContext';
 import { type Services, ServicesProvider, SettingsProvider, useServices, useSettings } from './services';
@@ -24,7 +25,9 @@ export function App({ services, settings, views }: AppProps) {
           <RouterProvider>
             <Chosen>
               <ExchangeProvider>
-                <Frame views={views} />
+                <FigureFiles>
+                  <Frame views={views} />
+                </FigureFiles>
               </ExchangeProvider>
             </Chosen>
           </RouterProvider>

@@ -1,6 +1,7 @@
 import { TermText } from '../../parts/chemistry';
 import { formatFigures } from '../../parts/number';
 import { type PlotView } from '../frame';
+import { HaloText } from './HaloText';
 import { type Crossover } from './levelLine';
 
 interface GroundLevelsProps {
@@ -28,18 +29,18 @@ export function GroundLevels({ view, crossovers, only }: GroundLevelsProps) {
       {shown.map(({ x: at, from, to }) => (
         <g key={at}>
           <line className="level-crossover" x1={x(at)} x2={x(at)} y1={area.top} y2={area.bottom} />
-          <text className="level-crossover-text" x={x(at) + 5} y={area.bottom - 22}>
+          <HaloText className="level-crossover-text" x={x(at) + 5} y={area.bottom - 22}>
             <tspan>{formatFigures(at)}: </tspan>
             <TermText label={from} />
             <tspan dy={from.length > 2 ? '-0.2em' : 0}> → </tspan>
             <TermText label={to} />
-          </text>
+          </HaloText>
         </g>
       ))}
       {stretches.map(({ from, to, label }) => {
         if (label === null || x(to) - x(from) < 46) return null;
         return (
-          <text
+          <HaloText
             key={from}
             className="level-ground-text"
             x={(x(from) + x(to)) / 2}
@@ -47,7 +48,7 @@ export function GroundLevels({ view, crossovers, only }: GroundLevelsProps) {
             textAnchor="middle"
           >
             <TermText label={label} />
-          </text>
+          </HaloText>
         );
       })}
     </g>
