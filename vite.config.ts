@@ -19,6 +19,14 @@ const renderer: UserConfig = {
     assetsInlineLimit: 0,
     modulePreload: { polyfill: false },
     chunkSizeWarningLimit: 2500,
+    rolldownOptions: {
+      output: {
+        codeSplitting: {
+          // Splitting would otherwise run schemas before zod is told to leave `eval` alone, which the policy forbids.
+          groups: [{ name: 'zod', test: /node_modules[\\/]zod[\\/]|boot[\\/]jitless\.ts/ }],
+        },
+      },
+    },
   },
 };
 

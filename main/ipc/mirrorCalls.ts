@@ -4,19 +4,9 @@ import type { MirrorStatus } from '../../renderer/host/bridge';
 import { MirrorFolder, tryFolder } from '../files/mirror/mirrorFolder';
 import type { SettingsFile } from '../files/settings';
 import type { Handlers } from './answerCalls';
+import { mirrorHandlers, type MirrorHandlers } from './mirrorHandlers';
 
-type MirrorCalls = Pick<
-  Handlers,
-  | 'mirrorStatus'
-  | 'mirrorChooseFolder'
-  | 'mirrorRevealFolder'
-  | 'mirrorWrite'
-  | 'mirrorProjects'
-  | 'mirrorRead'
-  | 'mirrorSnapshots'
-  | 'mirrorReadSnapshot'
-  | 'mirrorTakeSnapshot'
->;
+type MirrorCalls = MirrorHandlers & Pick<Handlers, 'mirrorChooseFolder' | 'mirrorRevealFolder'>;
 
 /** The folder of copies: in the documents folder until the user chooses another one. */
 export function mirrorCalls(
@@ -37,7 +27,6 @@ export function mirrorCalls(
   return {
     idle: () => mirror.idle(),
     calls: {
-      mirrorStatus: () => mirror.status(),
       async mirrorChooseFolder(_, window) {
         const { canceled, filePaths } = await dialog.showOpenDialog(window, {
           title: 'Folder for copies of the projects',
@@ -57,12 +46,7 @@ export function mirrorCalls(
         await shell.openPath(mirror.folder);
         return null;
       },
-      mirrorWrite: (copy) => mirror.write(copy),
-      mirrorProjects: () => mirror.projects(),
-      mirrorRead: ({ projectId }) => mirror.read(projectId),
-      mirrorSnapshots: ({ projectId }) => mirror.snapshots(projectId),
-      mirrorReadSnapshot: ({ projectId, snapshotId }) => mirror.readSnapshot(projectId, snapshotId),
-      mirrorTakeSnapshot: ({ copy, reason }) => mirror.takeSnapshot(copy, reason),
+      ...mirrorHandlers(() => mirror),
     },
   };
 }

@@ -24,7 +24,7 @@ export const securityHeaders: Readonly<Record<string, string>> = {
   'cross-origin-embedder-policy': 'require-corp',
   'cross-origin-resource-policy': 'same-origin',
   'permissions-policy':
-    'camera=(), microphone=(), geolocation=(), usb=(), serial=(), hid=(), bluetooth=(), payment=(), display-capture=()',
+    'camera=(), microphone=(), geolocation=(), usb=(), serial=(), hid=(), payment=(), display-capture=()',
   'referrer-policy': 'no-referrer',
   'x-content-type-options': 'nosniff',
   // Files change with each build while their addresses partly stay.

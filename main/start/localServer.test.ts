@@ -8,6 +8,7 @@ import { toWire } from '../../renderer/host/loopback';
 import { MirrorFolder } from '../files/mirror/mirrorFolder';
 import { contentPolicy } from '../serving/contentPolicy';
 import { startLocalServer, type LocalServer } from './localServer';
+import { mirrorHandlers } from '../ipc/mirrorHandlers';
 
 let folder: string;
 let server: LocalServer;
@@ -58,13 +59,7 @@ beforeAll(async () => {
   server = await startLocalServer(
     join(folder, 'page'),
     {
-      mirrorStatus: () => mirror.status(),
-      mirrorWrite: (copy) => mirror.write(copy),
-      mirrorProjects: () => mirror.projects(),
-      mirrorRead: ({ projectId }) => mirror.read(projectId),
-      mirrorSnapshots: ({ projectId }) => mirror.snapshots(projectId),
-      mirrorReadSnapshot: ({ projectId, snapshotId }) => mirror.readSnapshot(projectId, snapshotId),
-      mirrorTakeSnapshot: ({ copy, reason }) => mirror.takeSnapshot(copy, reason),
+      ...mirrorHandlers(() => mirror),
       openExternal: ({ link }) => {
         links.push(link);
         return null;

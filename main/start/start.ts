@@ -8,6 +8,7 @@ import { findChromium, windowFlags } from './chromium';
 import { demoTable } from './demoTable';
 import { findElectron } from './electronBinary';
 import { type LocalServer, defaultPort, serverMark, startLocalServer } from './localServer';
+import { mirrorHandlers } from '../ipc/mirrorHandlers';
 import { openLink } from './openLink';
 import { dataFolder, defaultMirrorFolder } from './places';
 import { readWords, type StartWords, usage } from './words';
@@ -64,13 +65,7 @@ async function serve(port: number, mirror: MirrorFolder): Promise<LocalServer> {
   return startLocalServer(
     join(root, 'dist/renderer'),
     {
-      mirrorStatus: () => mirror.status(),
-      mirrorWrite: (copy) => mirror.write(copy),
-      mirrorProjects: () => mirror.projects(),
-      mirrorRead: ({ projectId }) => mirror.read(projectId),
-      mirrorSnapshots: ({ projectId }) => mirror.snapshots(projectId),
-      mirrorReadSnapshot: ({ projectId, snapshotId }) => mirror.readSnapshot(projectId, snapshotId),
-      mirrorTakeSnapshot: ({ copy, reason }) => mirror.takeSnapshot(copy, reason),
+      ...mirrorHandlers(() => mirror),
       openExternal: ({ link }) => {
         openLink(link);
         return null;
