@@ -10,6 +10,8 @@ export interface Band {
   readonly multiplicity: number | null;
   /** Upper level, `4T2g`, or the kind of charge transfer, `Cl- -> Co (t2g)`. */
   readonly label: string;
+  /** Which part of a band that unlike ligands split, `in the plane of 4 NH3`; absent where it is one band. */
+  readonly component?: string;
   readonly kind: BandKind;
   /** Typical molar absorptivity at the centre, L mol⁻¹ cm⁻¹, and the range it should lie in. */
   readonly molarAbsorptivity: number;

@@ -1,0 +1,14 @@
+export type { Band, BandKind } from './types';
+export type { BandInput, BandLevel, BandPrediction, DonorStrength } from './bandInput';
+export { predictBands } from './predictBands';
+export { emptyBandDraws, type BandDraws } from './bandDraws';
+export { propagatedSigma, smallestSigma_cm1 } from './bandSigma';
+export { bandWidth } from './bandWidth';
+export { coordinationSymmetry, hasInversion, type CoordinationSymmetry } from './coordinationSymmetry';
+export { axialComponents, type AxialComponent, type PlacedDonor } from './axialSplitting';
+export { assignmentDoubt } from './intensity/intensityClass';
+export { thermalFactor, thermalWidth, vibronicGain } from './vibration';
+export { ligandToMetalEnergy } from './chargeTransfer/ligandToMetal';
+export { metalPotential_V } from './chargeTransfer/metalToLigand';
+export { hushWidth_cm1 } from './chargeTransfer/intervalence';
+export { hiddenBands, type Hidden } from './chargeTransfer/hiddenBands';
