@@ -3,6 +3,7 @@ import { agreement } from './agreement';
 import { estimate } from './estimate';
 import { colour } from './colour';
 import { fitBands } from './fitBands';
+import { levels } from './levels';
 import { readSpectrum } from './readSpectrum';
 import { search } from './search';
 import { terms } from './terms';
@@ -14,6 +15,7 @@ export const commands: readonly Command[] = [
   agreement,
   readSpectrum,
   fitBands,
+  levels,
   terms,
   colour,
 ];
