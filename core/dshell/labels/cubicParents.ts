@@ -1,6 +1,6 @@
-import { pointGroup, type CubicGroup } from '../../symmetry';
-import { carriedBy, type Amplitudes } from '../states/amplitudes';
-import { overlap } from './characters';
+import { pointGroup, type CubicGroup, type Irrep } from '../../symmetry';
+import { type Amplitudes } from '../states/amplitudes';
+import { diagonal, remembered, rotationMatrix } from './diagonal';
 
 /** A term of the cubic parent with its share in a level; the name does not tell repeated terms apart. */
 export interface CubicWeight {
@@ -9,33 +9,36 @@ export interface CubicWeight {
   readonly weight: number;
 }
 
-/** Every rotation of O once, with its class. */
-const rotations = (() => {
-  const { elements, classOf } = pointGroup('O');
-  return elements.elements.flatMap(({ rotation }, i) =>
-    // Of an element and its bar the one met first.
-    i < elements.bar[i]! ? [{ carry: carriedBy(rotation), index: classOf[i]!.index }] : [],
-  );
-})();
+const O = pointGroup('O');
+const irreps = O.irreps.filter(({ spinor }) => !spinor);
 
-/**
- * Shares of the cubic terms in orbital states over the cubic axes (norms add up to `count`): ⟨ψ|P_Γ|ψ⟩ with the projector
- * P_Γ = (dimension/24) Σ_g χ_Γ(g) R(g). Largest first.
- */
+/** P_Γ = (dimension/24) Σ_g χ_Γ(g) R(g) among the states of one L. */
+function projector({ dimension, characters }: Irrep, L: number): { re: Float64Array; im: Float64Array } {
+  const sum = { re: new Float64Array((2 * L + 1) ** 2), im: new Float64Array((2 * L + 1) ** 2) };
+  O.elements.elements.forEach(({ rotation }, element) => {
+    // Every rotation occurs twice among the elements of the double group.
+    const factor = (dimension / O.order / 2) * characters[O.classOf[element]!.index]!;
+    if (factor === 0) return;
+    const { re, im } = rotationMatrix(L, rotation);
+    for (let i = 0; i < re.length; i++) {
+      sum.re[i]! += factor * re[i]!;
+      sum.im[i]! += factor * im[i]!;
+    }
+  });
+  return sum;
+}
+
+const projectors = irreps.map((irrep) => remembered((L) => projector(irrep, L)));
+
+/** Shares of the cubic terms in orbital states over the cubic axes (norms add up to `count`), largest first. */
 export function cubicWeights(parts: readonly Amplitudes[], count: number, group: CubicGroup): CubicWeight[] {
-  const O = pointGroup('O');
   const weights = new Map<string, number>();
   for (const part of parts) {
-    const diagonal = O.classes.map(() => 0);
-    for (const { carry, index } of rotations) diagonal[index]! += overlap(part, carry(part));
     const multiplicity = 2 * part.multiplets[0]!.S + 1;
-    for (const { mulliken, dimension, characters, spinor } of O.irreps) {
-      if (spinor) continue;
+    irreps.forEach(({ mulliken }, i) => {
       const label = `${multiplicity}${mulliken}${group === 'Oh' ? 'g' : ''}`;
-      const share =
-        (dimension / O.order) * diagonal.reduce((sum, value, c) => sum + characters[c]! * value, 0);
-      weights.set(label, (weights.get(label) ?? 0) + share / count);
-    }
+      weights.set(label, (weights.get(label) ?? 0) + diagonal(part, projectors[i]!) / count);
+    });
   }
   return [...weights]
     .map(([label, weight]) => ({ label, weight }))

@@ -1,5 +1,5 @@
-import { inverseRotation, termLetters, type PointGroup } from '../../symmetry';
-import { innerProduct, irrepsOf } from '../../symmetry/representations/character';
+import { inverseRotation, termLetters, type Irrep, type PointGroup } from '../../symmetry';
+import { irrepsOf } from '../../symmetry/representations/character';
 import { parity } from '../angularMomentum/factorials';
 import { carriedBy, type Amplitudes } from '../states/amplitudes';
 import { characterReader } from './characters';
@@ -34,24 +34,45 @@ export function irrepFinder(naming: NamingGroup, spinOrbit: boolean): IrrepFinde
     const toFrame = carriedBy(inverseRotation(naming.frame));
     return (states) => axial(states.map(toFrame));
   }
-  const read = characterReader(naming.group, naming.frame);
-  return (states) => finite(naming.group, read(states), isSpinor(states), spinOrbit);
+  const { group, frame } = naming;
+  const integer = candidates(group, false);
+  const halfInteger = candidates(group, true);
+  const read = characterReader(group, frame, integer.classes);
+  return (states) => finite(group, isSpinor(states) ? halfInteger : integer, read(states), spinOrbit);
 }
 
 const isSpinor = (states: readonly Amplitudes[]): boolean => states[0]!.multiplets[0]!.J % 1 !== 0;
 
+/** The representations that d electrons can have, with the classes that tell them apart. */
+interface Candidates {
+  readonly irreps: readonly Irrep[];
+  /** Places of classes in the group: where the inversion is there, rotations say everything, d states being even. */
+  readonly classes: readonly number[];
+}
+
+function candidates(group: PointGroup, spinor: boolean): Candidates {
+  const centred = group.irreps.some(({ parity: mark }) => mark === 'g');
+  return {
+    irreps: irrepsOf(group, spinor).filter(({ parity: mark }) => mark !== 'u'),
+    classes: group.classes.flatMap(({ representative }, c) =>
+      centred && representative.parity === -1 ? [] : [c],
+    ),
+  };
+}
+
 function finite(
-  group: PointGroup,
+  { classes: all }: PointGroup,
+  { irreps, classes }: Candidates,
   character: readonly number[],
-  spinor: boolean,
   spinOrbit: boolean,
 ): FoundIrrep[] | null {
-  const irreps = irrepsOf(group, spinor);
+  const product = (a: (i: number) => number, b: (i: number) => number): number =>
+    classes.reduce((sum, c, i) => sum + all[c]!.size * a(i) * b(i), 0);
   const times = whole(
     irreps.map(({ characters, degeneracy, dimension }) => {
-      // Joined conjugates have norm 2; a real spinor representation comes twice in a Kramers pair.
-      const norm = Math.round(innerProduct(group, characters, characters)) * (degeneracy / dimension);
-      return innerProduct(group, character, characters) / norm;
+      const own = (i: number): number => characters[classes[i]!]!;
+      // A real spinor representation comes twice in a Kramers pair.
+      return ((product((i) => character[i]!, own) / product(own, own)) * dimension) / degeneracy;
     }),
   );
   if (times === null) return null;

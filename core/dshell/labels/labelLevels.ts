@@ -1,12 +1,12 @@
 import { type CubicGroup } from '../../symmetry';
 import { fieldFrame } from '../field/fieldFrame';
 import { checkProblem, type LevelProblem } from '../problem';
-import { irrepFinder } from './irreps';
-import { levelSets } from './levelSets';
+import { irrepFinder, type IrrepFinder } from './irreps';
+import { levelSets, type LevelSet } from './levelSets';
 import { fieldNamingGroup, isSymmetric, namingGroup, type NamingGroup } from './namingGroup';
 import { parentageReader, type Parentage } from './parentage';
 
-/** A level with the names and the make-up that its eigenvectors show. */
+/** A level with the names that its eigenvectors show. */
 export interface LabelledLevel {
   /** Relative to the ground level, cm⁻¹. */
   readonly energy: number;
@@ -17,7 +17,6 @@ export interface LabelledLevel {
   readonly irrep: string | null;
   /** Mulliken symbol also with spin-orbit coupling (`E1/2g`, `F3/2g`). */
   readonly mulliken: string | null;
-  readonly parentage: Parentage;
 }
 
 export interface LabelledLevels {
@@ -28,6 +27,8 @@ export interface LabelledLevels {
   readonly cubicGroup: CubicGroup;
   /** Size of the cubic part of the field, cm⁻¹. */
   readonly cubicTenDq: number;
+  /** Parent terms and configurations of one of the levels; worked out when asked for. */
+  parentage(level: number): Parentage;
 }
 
 export interface LabelOptions {
@@ -41,8 +42,8 @@ export interface LabelOptions {
 }
 
 /**
- * All levels of d^N in zero magnetic field with representation, parent terms and leading configurations, worked out from the
- * eigenvectors by characters. Representations that share an energy are listed apart with the parentage of their common set.
+ * All levels of d^N in zero magnetic field with their representations, worked out from the eigenvectors by characters, and
+ * their parentage on demand. Representations that share an energy are listed apart, with the parentage of their common set.
  * Throws what `levels` throws, and `out-of-range` for a magnetic field.
  */
 export function labelLevels(problem: LevelProblem, options: LabelOptions = {}): LabelledLevels {
@@ -55,27 +56,39 @@ export function labelLevels(problem: LevelProblem, options: LabelOptions = {}): 
   );
   const spinOrbit = checked.zeta !== 0;
   const find = irrepFinder(naming, spinOrbit);
-  const parentage = parentageReader(checked, frame.rotation);
+  const reader = parentageReader(checked, frame.rotation);
   const sets = levelSets(checked, frame, options.near ?? roundingOf(problem, checked.V));
+  const rows = sets.flatMap((set) => namedLevels(set, find).map((level) => ({ set, level })));
   const ground = sets[0]!.energy;
-  const levels = sets.flatMap(({ energy, S, states }): LabelledLevel[] => {
-    const multiplicity = S === null ? null : 2 * S + 1;
-    const common = { energy: energy - ground, multiplicity, parentage: parentage.read(states) };
-    const spins = multiplicity ?? 1;
-    const found = find(states);
-    if (found === null) {
-      return [{ ...common, degeneracy: spins * states.length, irrep: null, mulliken: null }];
-    }
-    return found.flatMap(({ label, mulliken, dimension, times }) =>
-      Array.from({ length: times }, () => ({
-        ...common,
-        degeneracy: spins * dimension,
-        irrep: label,
-        mulliken,
-      })),
-    );
-  });
-  return { levels, group: naming.name, cubicGroup: parentage.cubicGroup, cubicTenDq: parentage.tenDq };
+  const known = new Map<LevelSet, Parentage>();
+  return {
+    levels: rows.map(({ level }) => ({ ...level, energy: level.energy - ground })),
+    group: naming.name,
+    cubicGroup: reader.cubicGroup,
+    cubicTenDq: reader.tenDq,
+    parentage(index) {
+      const { set } = rows[index]!;
+      let found = known.get(set);
+      if (found === undefined) known.set(set, (found = reader.read(set.states)));
+      return found;
+    },
+  };
+}
+
+function namedLevels({ energy, S, states }: LevelSet, find: IrrepFinder): LabelledLevel[] {
+  const multiplicity = S === null ? null : 2 * S + 1;
+  const spins = multiplicity ?? 1;
+  const found = find(states);
+  if (found === null) {
+    return [{ energy, multiplicity, degeneracy: spins * states.length, irrep: null, mulliken: null }];
+  }
+  return found.flatMap(({ label, mulliken, dimension, times }) =>
+    Array.from({ length: times }, () => ({
+      ...{ energy, multiplicity, degeneracy: spins * dimension },
+      irrep: label,
+      mulliken,
+    })),
+  );
 }
 
 function chosenGroup(
