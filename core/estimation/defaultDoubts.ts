@@ -20,7 +20,6 @@ export const defaultDoubts = {
   additivity: 0.02,
   /** 4/9 of the octahedral splitting: bond lengths and covalency change with the coordination number. */
   tetrahedral: 0.08,
-  squarePlanar: 0.12,
   publishedH: 0.15,
   classH: 0.3,
   analogyK: 0.3,

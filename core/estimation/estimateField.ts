@@ -3,8 +3,9 @@ import type { Composition } from '../record/composition';
 import type { CubicGeometry } from '../dshell/types';
 import { defaultDoubts } from './defaultDoubts';
 import { distanceExponent, distanceFactor, spinDistances, tableSpin } from './distance';
-import { octahedralStrength, type DonorField } from './fieldStrength';
+import { averageStrength, type DonorField } from './fieldStrength';
 import { applicabilityFlags, leftOutOf } from './applicability';
+import { besideOxo, isOxoCation } from './overlapField';
 import { racahParameters, type DonorShare } from './racah';
 import { estimate, notEstimated } from './uncertain';
 import type { Estimate, Flag } from './types';
@@ -79,17 +80,13 @@ function ofGeometry(octahedral: Estimate, composition: Composition, ion: IonReco
       'a tetrahedral field is 4/9 of the octahedral one of the same donors, with e below t2',
     );
   }
-  if (composition.geometry === 'square-planar') {
-    const radii = ion.shannonRadius_pm.value;
-    const from = radii?.oct;
-    const to = radii?.squarePlanar;
-    const factor = from !== undefined && to !== undefined ? distanceFactor(from + 140, to + 140) : 1;
+  if (isOxoCation(composition)) {
     return scaled(
       octahedral,
-      factor,
-      defaultDoubts.squarePlanar,
-      `square-planar:${ion.ion}`,
-      `shorter bonds in the square plane: ${factor.toFixed(2)} times the octahedral field`,
+      besideOxo,
+      0.06,
+      `oxo-cation:${ion.ion}`,
+      `10Dq of the donors beside the oxo ligand, ${besideOxo} times what they give without it`,
     );
   }
   return octahedral;
@@ -116,19 +113,21 @@ export function estimateField(composition: Composition, library: ParameterLibrar
   const ion = findIon(library, composition.metal, composition.oxidationState);
   if (ion === undefined) return null;
   const parts = donorShares(composition, library);
-  const { tenDq, donors } = octahedralStrength(parts, ion, library);
+  const oxoCation = isOxoCation(composition);
+  const others = oxoCation ? parts.filter(({ ligand }) => ligand.id !== 'oxo') : parts;
+  const { tenDq, donors } = averageStrength(others, ion, composition.geometry, library);
   const noField = ion.dElectrons === 0 || ion.dElectrons === 10;
   const base = noField
     ? notEstimated(`a d${ion.dElectrons} ion has no transitions within the d shell`)
     : ofGeometry(tenDq, composition, ion);
-  const octahedral = composition.geometry === 'octahedral';
-  const two = octahedral ? spinFields(base, ion, parts) : null;
+  const sixfold = composition.geometry === 'octahedral' || composition.geometry === 'tetragonal';
+  const two = sixfold && !oxoCation ? spinFields(base, ion, parts) : null;
   const racah = racahParameters(ion, parts, composition.geometry, library);
   return {
     ion,
     dElectrons: ion.dElectrons,
     composition,
-    cubic: cubicOf(composition.geometry),
+    cubic: oxoCation ? null : cubicOf(composition.geometry),
     donors,
     fields: two ?? { high: base, low: base, middle: base },
     twoDistances: two !== null,

@@ -3,6 +3,7 @@ import { defaultDoubts } from './defaultDoubts';
 import { onTableScale } from './distance';
 import { ligandStrength } from './ligandStrength';
 import { metalStrength } from './metalStrength';
+import { planarStrength } from './planarStrength';
 import type { DonorShare } from './racah';
 import { estimate, notEstimated, weakestRoute } from './uncertain';
 import type { DoubtShare, Estimate, EstimateRoute, Reason } from './types';
@@ -52,17 +53,20 @@ function anchored(
   };
 }
 
-/** 10Dq that six donors like this one would give on the ion; a reason why not where it cannot be told. */
+/** 10Dq that donors like this one in all places would give; a reason why not where it cannot be told. */
 export function donorField(
   { ligand, places }: DonorShare,
   ion: IonRecord,
+  geometry: string,
   library: ParameterLibrary,
 ): DonorField | string {
-  const anchors = ligand.anchors.filter(({ metal }) => metal === ion.ion);
+  const planar = geometry === 'square-planar';
+  const shape = planar ? 'square-planar' : null;
+  const anchors = ligand.anchors.filter((anchor) => anchor.metal === ion.ion && anchor.geometry === shape);
   if (anchors.length > 0) return anchored(ligand, places, ion, anchors);
-  const g = metalStrength(ion, library);
+  const g = planar ? planarStrength(ion, library) : metalStrength(ion, library);
   if (g === null) return `nothing is known of the field strength of ${ion.ion}`;
-  const f = ligandStrength(ligand, ion, library);
+  const f = ligandStrength(ligand, ion, library, shape);
   if (f === null) return `nothing is known of the field strength of ${ligand.commonName}`;
   const tenDq = publishedProduct(f.value, g.value);
   return {
@@ -84,13 +88,17 @@ export interface CubicStrength {
   readonly donors: readonly DonorField[];
 }
 
-/** 10Dq of the octahedral average environment (cm⁻¹), on the distance scale that the tables are for. */
-export function octahedralStrength(
+/**
+ * 10Dq of the average environment (cm⁻¹): of six donors on the distance scale that the tables are for, or of four in a
+ * square plane.
+ */
+export function averageStrength(
   parts: readonly DonorShare[],
   ion: IonRecord,
+  geometry: string,
   library: ParameterLibrary,
 ): CubicStrength {
-  const fields = parts.map((part) => donorField(part, ion, library));
+  const fields = parts.map((part) => donorField(part, ion, geometry, library));
   const why = fields.find((field) => typeof field === 'string');
   if (why !== undefined) {
     return { tenDq: notEstimated(why, 'the spectrum of one complex of this kind'), donors: [] };

@@ -11,3 +11,6 @@ export {
   type JahnTellerStrength,
 } from './jahnTeller';
 export type { SpinChoice } from './spinChoice';
+export { fieldLevels, type FieldLevel } from './fieldLevels';
+export { isOxoCation, overlapLigands } from './overlapField';
+export { donorOverlap, piRatio, type DonorOverlap } from './angularOverlap';

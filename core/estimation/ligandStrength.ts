@@ -1,4 +1,4 @@
-import type { IonRecord, LigandRecord, ParameterLibrary, SourcedValue } from '../library';
+import type { Anchor, IonRecord, LigandRecord, ParameterLibrary, SourcedValue } from '../library';
 import { classMean } from './donorClass';
 import { defaultDoubts } from './defaultDoubts';
 import { onTableScale } from './distance';
@@ -49,11 +49,16 @@ function publishedF(f: SourcedValue, acceptor: boolean): Evidence | null {
 }
 
 /** f from 10Dq observed with the same ligand on other metals. */
-function fromRelatives(ligand: LigandRecord, ion: IonRecord, library: ParameterLibrary): Evidence[] {
+function fromRelatives(
+  ligand: LigandRecord,
+  ion: IonRecord,
+  library: ParameterLibrary,
+  shape: Anchor['geometry'] = null,
+): Evidence[] {
   return ligand.anchors.flatMap((anchor) => {
     const other = library.ions.get(anchor.metal);
-    const g = other?.g.value;
-    if (other === undefined || g == null || anchor.metal === ion.ion) return [];
+    const g = shape === null ? other?.g.value : other?.gSquarePlanar.value;
+    if (other === undefined || g == null || anchor.metal === ion.ion || anchor.geometry !== shape) return [];
     const otherCharge = Math.abs(charge(anchor.metal) - ion.oxidationState);
     const far = ligand.piCharacter === 'acceptor' ? 0.06 : 0.025;
     const sigma = Math.hypot(confidenceSigma(anchor.confidence), 0.025, far * otherCharge);
@@ -131,7 +136,10 @@ export function ligandStrength(
   ligand: LigandRecord,
   ion: IonRecord,
   library: ParameterLibrary,
+  shape: Anchor['geometry'] = null,
 ): Factor | null {
+  const planar = shape === null ? [] : fromRelatives(ligand, ion, library, shape);
+  if (planar.length > 0) return factorOf(planar, 'measured-relative');
   const acceptor = ligand.piCharacter === 'acceptor';
   const table = publishedF(ligand.f, acceptor);
   const relatives = fromRelatives(ligand, ion, library);

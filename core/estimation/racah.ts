@@ -1,5 +1,6 @@
 import type { IonRecord, LigandRecord, ParameterLibrary } from '../library';
 import { defaultDoubts } from './defaultDoubts';
+import { freeIonB } from './freeIonRacah';
 import { ligandCovalency, metalCovalency } from './nephelauxetic';
 import { estimate, notEstimated, weakestRoute } from './uncertain';
 import type { DoubtShare, Estimate, EstimateRoute, Reason } from './types';
@@ -65,7 +66,7 @@ const reductionOfC = (dElectrons: number): number =>
  */
 const tetrahedralFactor = 0.92;
 
-/** C/B of the free ion; 4 where no C is on file, as the literature of the 4d and 5d ions assumes. */
+/** C/B of the free ion; 4 where no C of a 4d or 5d ion is on file, as its literature assumes, 4.5 for a 3d ion. */
 export function freeIonRatio(ion: IonRecord): { readonly value: number; readonly reason: Reason } {
   if (ion.C0.value !== null && ion.B0.value !== null) {
     return {
@@ -74,8 +75,11 @@ export function freeIonRatio(ion: IonRecord): { readonly value: number; readonly
     };
   }
   return {
-    value: 4,
-    reason: { kind: 'assumption', text: `C/B = 4, as is usually assumed where no C of ${ion.ion} is known` },
+    value: ion.period === '3d' ? 4.5 : 4,
+    reason: {
+      kind: 'assumption',
+      text: `C/B = ${ion.period === '3d' ? 4.5 : 4}, as is usually assumed where no C of ${ion.ion} is known`,
+    },
   };
 }
 
@@ -94,24 +98,25 @@ export function racahParameters(
     C: notEstimated(because, settle),
   });
   if (ion.dElectrons < 2 || ion.dElectrons > 8) return none(`it has no meaning for d${ion.dElectrons}`);
-  if (ion.B0.value === null) {
+  const free = freeIonB(ion, library);
+  if (free === null) {
     return none(`no free-ion B of ${ion.ion} is on file`, 'three bands of any one complex give B');
   }
   const taken = covalency(ion, donors, library);
   if (typeof taken === 'string') return none(`nothing is known of the nephelauxetic effect of ${taken}`);
-  const B0 = ion.B0.value;
+  const B0 = free.value;
   const ratio = freeIonRatio(ion);
   const hk = Math.min(taken.hk, mostReduction);
   const inC = reductionOfC(ion.dElectrons);
   const tetrahedral = geometry === 'tetrahedral' ? tetrahedralFactor : 1;
-  const of = (free: number, weight: number): { value: number; shares: DoubtShare[] } => {
-    const value = free * (1 - weight * hk) * tetrahedral;
+  const of = (start: number, weight: number): { value: number; shares: DoubtShare[] } => {
+    const value = start * (1 - weight * hk) * tetrahedral;
     const shares = taken.shares.map(({ cause, sigma }) => ({
       cause,
-      sigma: -free * weight * tetrahedral * sigma,
+      sigma: -start * weight * tetrahedral * sigma,
     }));
     shares.push(
-      { cause: `B0:${ion.ion}`, sigma: value * defaultDoubts.freeIonB },
+      { cause: `B0:${ion.ion}`, sigma: value * free.sigma },
       { cause: `nephelauxetic:${ion.ion}`, sigma: value * defaultDoubts.nephelauxetic },
     );
     if (tetrahedral !== 1) {
@@ -119,10 +124,7 @@ export function racahParameters(
     }
     return { value, shares };
   };
-  const reasons: Reason[] = [
-    { kind: 'source', text: `B0(${ion.ion}) = ${B0} (${ion.B0.source})` },
-    ...taken.reasons,
-  ];
+  const reasons: Reason[] = [...free.reasons, ...taken.reasons];
   if (tetrahedral !== 1) {
     reasons.push({ kind: 'assumption', text: `B and C ${tetrahedral} times as large in a tetrahedron` });
   }
@@ -132,10 +134,11 @@ export function racahParameters(
   }
   const b = of(B0, 1);
   const c = of(B0 * ratio.value, inC);
+  const route = weakestRoute([free.route, taken.route]);
   const doubt = c.value * defaultDoubts.racahC;
   return {
-    B: estimate(b.value, b.shares, taken.route, reasons),
-    C: estimate(c.value, [...c.shares, { cause: `C0:${ion.ion}`, sigma: doubt }], taken.route, [
+    B: estimate(b.value, b.shares, route, reasons),
+    C: estimate(c.value, [...c.shares, { cause: `C0:${ion.ion}`, sigma: doubt }], route, [
       ratio.reason,
       ...reasons.slice(1),
       ...(inC === 1

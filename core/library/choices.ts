@@ -8,7 +8,7 @@ import type { SourcedValue } from './sourced';
  */
 interface Choice {
   readonly ion: string;
-  readonly quantity: 'g' | 'k' | 'B0' | 'C0';
+  readonly quantity: 'g' | 'gSquarePlanar' | 'k' | 'B0' | 'C0';
   readonly value: number;
   readonly reason: string;
 }
@@ -23,6 +23,36 @@ const choices: readonly Choice[] = [
   { ion: 'Cr2+', quantity: 'C0', value: 3456, reason: nistTerm('3H = 4B + 4C', 3565) },
   { ion: 'Cr4+', quantity: 'C0', value: 4446, reason: nistTerm('1G = 12B + 2C', 4238) },
   { ion: 'Ni3+', quantity: 'C0', value: 5310, reason: nistTerm('2G = 4B + 3C', 5450) },
+  {
+    ion: 'Ni2+',
+    quantity: 'gSquarePlanar',
+    value: 20_000,
+    reason: 'exact levels for the envelope at 22 470 cm-1 of yellow [Ni(cyclam)]2+ with f of a cyclic amine',
+  },
+  {
+    ion: 'Pd2+',
+    quantity: 'gSquarePlanar',
+    value: 29_700,
+    reason:
+      'exact levels for the first spin-allowed bands of [PdCl4]2- near 22 000 cm-1, from memory of R. M. Rush, D. S. ' +
+      'Martin & R. G. LeGrand, Inorg. Chem. 1975, 14, 2543',
+  },
+  {
+    ion: 'Pt2+',
+    quantity: 'gSquarePlanar',
+    value: 35_000,
+    reason:
+      'exact levels for the first spin-allowed band of [PtCl4]2- near 26 000 cm-1, from memory of D. S. Martin et al., ' +
+      'Inorg. Chem. 1965-1968',
+  },
+  {
+    ion: 'Cu2+',
+    quantity: 'gSquarePlanar',
+    value: 16_000,
+    reason:
+      'x2-y2 to xy at 12 500 cm-1 in square-planar [CuCl4]2- (from memory of polarised crystal spectra, M. A. Hitchman ' +
+      '& P. J. Cassidy, Inorg. Chem. 1979, 18, 1745) over f = 0.78',
+  },
   {
     ion: 'Co3+',
     quantity: 'k',
@@ -103,6 +133,7 @@ const moreAnchors: Readonly<Record<string, readonly Anchor[]>> = {
       complex: '[Fe(CN)6]3-',
       tenDq: 35_000,
       spin: 'low',
+      geometry: null,
       range: [32_000, 35_000],
       source: 'from memory of H. B. Gray & N. A. Beach, J. Am. Chem. Soc. 1963, 85, 2922',
       status: 'memory',
@@ -114,10 +145,25 @@ const moreAnchors: Readonly<Record<string, readonly Anchor[]>> = {
       complex: '[Fe(CN)6]4-',
       tenDq: 33_800,
       spin: 'low',
+      geometry: null,
       range: [31_000, 34_000],
       source: 'from memory of H. B. Gray & N. A. Beach, J. Am. Chem. Soc. 1963, 85, 2922',
       status: 'memory',
       confidence: 'medium',
+      note: null,
+    },
+    {
+      metal: 'Ni2+',
+      complex: '[Ni(CN)4]2-',
+      tenDq: 30_000,
+      spin: null,
+      geometry: 'square-planar',
+      range: [24_950, 32_000],
+      source:
+        'shoulder near 22 500 cm-1 (from memory of H. B. Gray & C. J. Ballhausen, J. Am. Chem. Soc. 1963, 85, 260) with ' +
+        'exact d8 levels; the first-order formulas of that paper gave 24 950',
+      status: 'memory',
+      confidence: 'low',
       note: null,
     },
   ],
@@ -127,6 +173,7 @@ const moreAnchors: Readonly<Record<string, readonly Anchor[]>> = {
       complex: '[Ni(en)3]2+, first maximum in water',
       tenDq: 11_200,
       spin: null,
+      geometry: null,
       range: [11_200, 11_500],
       source:
         'from memory of band tables after A. B. P. Lever, Inorganic Electronic Spectroscopy (1984); sources differ',

@@ -23,6 +23,8 @@ export interface IonRecord {
   readonly period: TransitionPeriod;
   /** 10Dq = f g */
   readonly g: SourcedValue;
+  /** The same for x2-y2 above xy in a square plane of four donors. */
+  readonly gSquarePlanar: SourcedValue;
   /** B = B0 (1 - h k) */
   readonly k: SourcedValue;
   readonly B0: SourcedValue;
@@ -72,6 +74,7 @@ const readIon = (raw: RawIon): IonRecord => ({
   dElectrons: raw.dElectrons,
   period: raw.period as TransitionPeriod,
   g: sourced(raw.g),
+  gSquarePlanar: unknownValue,
   k: sourced(raw.k),
   B0: sourced(raw.B0),
   C0: sourced(raw.C0),
@@ -103,6 +106,7 @@ export const bareIon = (
   dElectrons,
   period,
   g: unknownValue,
+  gSquarePlanar: unknownValue,
   k: unknownValue,
   B0: unknownValue,
   C0: unknownValue,

@@ -25,6 +25,8 @@ export interface Anchor {
   readonly tenDq: number;
   /** Spin state it was measured in, where the ion has a choice and this is not the state its g is for. */
   readonly spin: 'high' | 'low' | null;
+  /** `square-planar` where 10Dq is x2-y2 above xy in a square; null for six donors. */
+  readonly geometry: 'square-planar' | null;
   readonly range: readonly [number, number] | null;
   readonly source: string;
   readonly status: SourceStatus | null;
@@ -82,7 +84,7 @@ interface RawLigand extends Omit<
   h: RawSourced;
   chiOpt: RawSourced;
   aom: (Omit<AngularOverlapSet, 'piDirections' | 'note'> & { piDirections?: number; note?: string })[];
-  anchors: (Omit<Anchor, 'note' | 'spin'> & { note?: string })[];
+  anchors: (Omit<Anchor, 'note' | 'spin' | 'geometry'> & { note?: string })[];
   hazards: { text: string; ghs: string[]; source: string }[];
   ctNotes: { hidesDd: ChargeTransferWarning; text: string };
   flags?: string[];
@@ -119,6 +121,7 @@ const readLigand = (raw: RawLigand): LigandRecord => ({
     complex: anchor.complex,
     tenDq: anchor.tenDq,
     spin: null,
+    geometry: null,
     range: anchor.range,
     source: anchor.source,
     status: anchor.status,

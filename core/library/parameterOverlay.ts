@@ -65,6 +65,7 @@ export function withParameterSet(
         complex: `${subject} with ${ligand.abbreviation}`,
         tenDq: entry.value,
         spin: null,
+        geometry: null,
         range: [entry.value - entry.sigma, entry.value + entry.sigma],
         source: entry.source,
         status: 'own',

@@ -9,12 +9,18 @@ import {
   type ParameterLibrary,
   type ParameterValues,
 } from '../library';
+import type { CubicLevel } from '../dshell/types';
 import { checkCandidate } from '../record/candidateCheck';
 import type { CandidateInput, Composition } from '../record/composition';
 import { parameterHash } from '../record/hash';
-import { cubicLevels } from '../dshell';
-import type { CubicLevel } from '../dshell/types';
-import { estimateField, type Estimate, type FieldEstimate, type Flag } from '../estimation';
+import {
+  estimateField,
+  fieldLevels,
+  type Estimate,
+  type FieldEstimate,
+  type FieldLevel,
+  type Flag,
+} from '../estimation';
 import { spinState, type SpinAnswer } from '../spin';
 import {
   colourAtThreeStrengths,
@@ -52,24 +58,7 @@ interface LevelInputs {
   readonly C: Estimate;
 }
 
-/** B and C have no say in a shell with one electron or one hole. */
-const orZero = (estimate: Estimate): number => estimate.value ?? 0;
-
-function levelsOf(field: FieldEstimate, { tenDq, B, C }: LevelInputs): readonly CubicLevel[] {
-  const d = field.dElectrons;
-  if (field.cubic === null || d < 1 || d > 9 || tenDq.value === null) return [];
-  const needsRepulsion = d >= 2 && d <= 8;
-  if (needsRepulsion && (B.value === null || C.value === null)) return [];
-  return cubicLevels({
-    dElectrons: d,
-    geometry: field.cubic,
-    tenDq: tenDq.value,
-    B: orZero(B),
-    C: orZero(C),
-  });
-}
-
-function groundTermOf(field: FieldEstimate, levels: readonly CubicLevel[]): string {
+function groundTermOf(field: FieldEstimate, levels: readonly FieldLevel[]): string {
   if (levels.length > 0) return levels[0]!.label;
   if (field.dElectrons === 0 || field.dElectrons === 10) return '1A1';
   return 'not estimated';
@@ -114,10 +103,10 @@ function predictChecked(
   const temperature_K = options.temperature_K ?? defaults.temperature_K;
   const field = estimateField(composition, library);
   if (field === null) throw new Error('a checked candidate has an ion');
-  const spin: SpinAnswer = spinState(field, { temperature_K });
+  const spin: SpinAnswer = spinState(field, library, { temperature_K });
   const tenDq = spin.choice === 'high' ? field.fields.high : field.fields.low;
   const inputs = { tenDq, B: field.racahB, C: field.racahC };
-  const levels = levelsOf(field, inputs);
+  const levels = fieldLevels(field, library, spin.choice, tenDq);
   const geometry = findGeometry(composition.geometry);
   const conditions = {
     concentration_mM: input.concentration_mM ?? defaults.concentration_mM,
@@ -145,7 +134,8 @@ function predictChecked(
     zeta: field.zeta,
     spin: spin.prediction,
     groundTerm: groundTermOf(field, levels),
-    levels,
+    levels: field.cubic === null ? [] : (levels as readonly CubicLevel[]),
+    ...(field.cubic === null && levels.length > 0 ? { overlapLevels: levels } : {}),
     bands,
     conditions,
     ...seen(bands, inputs, conditions, options, complexKey(composition)),

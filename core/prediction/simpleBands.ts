@@ -1,5 +1,4 @@
-import type { CubicLevel } from '../dshell/types';
-import type { Estimate } from '../estimation';
+import type { Estimate, FieldLevel } from '../estimation';
 import type { Band } from '../transitions/types';
 import { wavelength_nm } from '../units';
 
@@ -9,7 +8,7 @@ const highest_cm1 = 45_000;
 const smallestSigma_cm1 = 400;
 
 interface Inputs {
-  readonly levels: readonly CubicLevel[];
+  readonly levels: readonly FieldLevel[];
   readonly tenDq: Estimate;
   readonly B: Estimate;
   readonly C: Estimate;
@@ -34,8 +33,10 @@ export function bandSigma(
   return Math.max(smallestSigma_cm1, Math.hypot(...byCause.values()));
 }
 
-const configurationText = (level: CubicLevel, even: string): string => {
-  const { t2, e } = level.configurations[0] ?? { t2: 0, e: 0 };
+const configurationText = (level: FieldLevel, even: string): string => {
+  const first = level.configurations[0];
+  if (first === undefined) return '';
+  const { t2, e } = first;
   return `t2${even}${t2} e${even}${e}`;
 };
 

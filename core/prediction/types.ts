@@ -1,6 +1,7 @@
 import type { Problem } from '../errors';
 import type { Estimate, Flag } from '../estimation/types';
 import type { CubicLevel } from '../dshell/types';
+import type { FieldLevel } from '../estimation/fieldLevels';
 import type { SpinPrediction } from '../spin/types';
 import type { Band } from '../transitions/types';
 import type { ColourCloud, SeenColour } from '../colour/types';
@@ -25,6 +26,8 @@ export interface Prediction {
   readonly groundTerm: string;
   /** All levels at the central estimate; empty where the field is not cubic or not estimated. */
   readonly levels: readonly CubicLevel[];
+  /** Levels by angular overlap, where the field is not cubic; they are named after the symmetry that the donors have. */
+  readonly overlapLevels?: readonly FieldLevel[];
   /** Ascending energy. */
   readonly bands: readonly Band[];
   readonly conditions: {

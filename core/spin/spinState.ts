@@ -1,7 +1,10 @@
 import { cubicLevels } from '../dshell';
 import type { CubicGeometry, CubicLevel } from '../dshell/types';
+import type { ParameterLibrary } from '../library';
 import {
   estimate,
+  fieldLevels,
+  isOxoCation,
   octahedralOccupation,
   strongSplittingShare,
   type DoubtShare,
@@ -179,19 +182,70 @@ function withoutNumbers(field: FieldEstimate, pair: SpinPair): SpinAnswer {
   return byRule(field, pair, 0.5);
 }
 
+/** What relaxation of the skeleton may add to a gap in a polyhedron that is neither cubic nor known, cm⁻¹. */
+const overlapGapSigma_cm1 = 2000;
+
+/** Spin state from the levels of a field that is not cubic: one geometry, no relaxation. */
+function byLevels(field: FieldEstimate, library: ParameterLibrary, pair: SpinPair): SpinAnswer {
+  const levels = fieldLevels(field, library, 'high', field.fields.middle);
+  const ground = levels[0];
+  if (ground === undefined) return withoutNumbers(field, pair);
+  const high = levels.find(({ multiplicity }) => multiplicity === pair.high + 1);
+  const other = levels.find(({ multiplicity }) => multiplicity < pair.high + 1);
+  if (high === undefined || other === undefined) return onlyOne(field, ground.multiplicity - 1);
+  const slope = (name: 'tenDq' | 'B' | 'C'): number => other.slope[name] - high.slope[name];
+  const gap = estimate(
+    other.energy - high.energy,
+    [
+      ...scaledShares(field.fields.middle, slope('tenDq')),
+      ...scaledShares(field.racahB, slope('B')),
+      ...scaledShares(field.racahC, slope('C')),
+      { cause: `gap-model:${field.ion.ion}`, sigma: overlapGapSigma_cm1 },
+    ],
+    field.fields.middle.route,
+    [
+      {
+        kind: 'assumption',
+        text: 'exact gap in the ideal polyhedron, without relaxation',
+        sigma: overlapGapSigma_cm1,
+      },
+    ],
+  );
+  const probabilityHigh = normalCdf(gap.value! / gap.sigma!);
+  const unpaired = ground.multiplicity - 1;
+  const state = unpaired === pair.high ? 'high' : unpaired === pair.low ? 'low' : 'intermediate';
+  return {
+    choice: state === 'high' ? 'high' : 'low',
+    prediction: {
+      state,
+      probabilityHigh,
+      words: state === 'intermediate' ? 'intermediate spin likely' : spinWords(probabilityHigh),
+      gap,
+      nearCrossover: Math.max(probabilityHigh, 1 - probabilityHigh) < nearCrossoverBelow,
+      crossoverTenDqOverB: null,
+      ...moments(field, unpaired),
+    },
+  };
+}
+
 /**
  * Spin state of a complex with its probability, from the exact levels of both spins under the stated uncertainties of
  * 10Dq, B and C/B. What counts as more stable is the free energy at `temperature_K`.
  */
 export function spinState(
   field: FieldEstimate,
+  library: ParameterLibrary,
   options: { readonly temperature_K?: number } = {},
 ): SpinAnswer {
   const temperature = options.temperature_K ?? roomTemperature_K;
   const pair = spinPair(field.dElectrons, field.composition.geometry);
   if (pair === null) return onlyOne(field, hundUnpaired(field.dElectrons));
-  const { cubic } = field;
+  // A tetragonal octahedron is judged by its average field: the distortion comes with the spin state, not before it.
+  const tetragonal = field.composition.geometry === 'tetragonal' && !isOxoCation(field.composition);
+  const cubic = tetragonal ? 'octahedral' : field.cubic;
   const heavy = field.ion.period !== '3d';
+  const planarPair = field.composition.geometry === 'square-planar' && field.dElectrons === 8;
+  if (cubic === null && !heavy && !planarPair) return byLevels(field, library, pair);
   if (
     cubic === null ||
     heavy ||
