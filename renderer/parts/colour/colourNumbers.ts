@@ -1,3 +1,4 @@
+import { chromaAndHue } from '../../../core/colour/cieLab';
 import { type SeenColour } from '../../../core/colour/types';
 
 const whole = (value: number): string => String(Math.round(value)).replace('-', '−').replace(/^−0$/, '0');
@@ -8,19 +9,13 @@ export const colourNumbers = (colour: SeenColour): { lab: string; hex: string } 
   hex: colour.srgb,
 });
 
-/** Hue angle in degrees, 0 to 360, and chroma in the a*b* plane. */
-export function hueAndChroma([, a, b]: readonly [number, number, number]): { hue: number; chroma: number } {
-  const degrees = (Math.atan2(b, a) * 180) / Math.PI;
-  return { hue: (degrees + 360) % 360, chroma: Math.hypot(a, b) };
-}
-
 /** Below this chroma a hue angle is noise. */
 const greyBelow = 6;
 
 /** Colours in the order of the hue circle from red on, greys last, darker before lighter. */
 export function sortedByHue(colours: readonly SeenColour[]): SeenColour[] {
   const rank = (colour: SeenColour): number => {
-    const { hue, chroma } = hueAndChroma(colour.lab);
+    const { hue, chroma } = chromaAndHue(colour.lab);
     return chroma < greyBelow ? 400 : Math.round(hue / 4);
   };
   return [...colours].sort((one, other) => rank(one) - rank(other) || one.lab[0] - other.lab[0]);

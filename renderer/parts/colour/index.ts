@@ -1,5 +1,5 @@
 export { cloudInWords, CloudStrip } from './CloudStrip';
-export { colourNumbers, hueAndChroma, sortedByHue } from './colourNumbers';
+export { colourNumbers, sortedByHue } from './colourNumbers';
 export { passedInWords, passedRanges, transmittanceAt, type VisibleTransmittance } from './passedRanges';
 export { spectralColour, spectrumGradient, visibleFrom_nm, visibleTo_nm } from './spectralColour';
 export { Swatch } from './Swatch';

@@ -1,8 +1,9 @@
-import { LabelList, ReferenceArea, ReferenceLine, Scatter, ScatterChart } from 'recharts';
+import { LabelList, ReferenceArea, ReferenceLine, ScatterChart } from 'recharts';
 import { formatFigures } from '../../parts/number';
 import { extent, padded, Plot } from '../frame';
 import { chartBox, ChartAxes } from '../frame/ChartAxes';
-import { markerLegend, markerShape } from './markers';
+import { markerLegend } from './markers';
+import { PairScatter } from './PairScatter';
 import { pairReadings, pairTable, pairText } from './pairReadings';
 import { grouped, type Pair } from './pairs';
 import { noPairs, type PairPlotProps } from './ParityPlot';
@@ -88,21 +89,12 @@ export function BlandAltmanPlot(props: BlandAltmanPlotProps) {
             [limits.lower, limits.upper].map((limit) => (
               <ReferenceLine key={limit} y={limit} className="agreement-limit" ifOverflow="hidden" />
             ))}
-          {groups.map(([name, members], group) => (
-            <Scatter
-              key={name}
-              name={name}
-              isAnimationActive={false}
-              shape={markerShape(group)}
-              data={members.map((pair) => ({
-                x: mean(pair),
-                y: difference(pair),
-                label: outside(pair) ? pair.name : '',
-              }))}
-            >
-              <LabelList dataKey="label" position="top" offset={8} />
-            </Scatter>
-          ))}
+          <PairScatter
+            pairs={pairs}
+            place={(pair) => ({ x: mean(pair), y: difference(pair), label: outside(pair) ? pair.name : '' })}
+          >
+            <LabelList dataKey="label" position="top" offset={8} />
+          </PairScatter>
         </ScatterChart>
       )}
     </Plot>

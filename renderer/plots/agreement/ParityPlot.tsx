@@ -1,7 +1,8 @@
-import { ErrorBar, ReferenceLine, Scatter, ScatterChart } from 'recharts';
+import { ErrorBar, ReferenceLine, ScatterChart } from 'recharts';
 import { extent, padded, Plot } from '../frame';
 import { chartBox, ChartAxes } from '../frame/ChartAxes';
-import { markerLegend, markerShape } from './markers';
+import { markerLegend } from './markers';
+import { PairScatter } from './PairScatter';
 import { pairReadings, pairTable, pairText } from './pairReadings';
 import { grouped, type Pair } from './pairs';
 import './agreement.css';
@@ -85,35 +86,30 @@ export function ParityPlot(props: PairPlotProps) {
                 ifOverflow="hidden"
               />
             ))}
-            {groups.map(([name, members], group) => (
-              <Scatter
-                key={name}
-                name={name}
+            <PairScatter
+              pairs={pairs}
+              place={({ predicted, sigma, measured, u }) => ({
+                x: predicted,
+                y: measured,
+                sigma: sigma ?? 0,
+                u: u ?? 0,
+              })}
+            >
+              <ErrorBar
+                dataKey="sigma"
+                direction="x"
+                width={0}
+                stroke="var(--plot-soft)"
                 isAnimationActive={false}
-                shape={markerShape(group)}
-                data={members.map(({ predicted, sigma, measured, u }) => ({
-                  x: predicted,
-                  y: measured,
-                  sigma: sigma ?? 0,
-                  u: u ?? 0,
-                }))}
-              >
-                <ErrorBar
-                  dataKey="sigma"
-                  direction="x"
-                  width={0}
-                  stroke="var(--plot-soft)"
-                  isAnimationActive={false}
-                />
-                <ErrorBar
-                  dataKey="u"
-                  direction="y"
-                  width={0}
-                  stroke="var(--plot-soft)"
-                  isAnimationActive={false}
-                />
-              </Scatter>
-            ))}
+              />
+              <ErrorBar
+                dataKey="u"
+                direction="y"
+                width={0}
+                stroke="var(--plot-soft)"
+                isAnimationActive={false}
+              />
+            </PairScatter>
           </ScatterChart>
         );
       }}

@@ -1,8 +1,9 @@
-import { ReferenceArea, ReferenceLine, Scatter, ScatterChart } from 'recharts';
+import { ReferenceArea, ReferenceLine, ScatterChart } from 'recharts';
 import { formatFigures, formatShare } from '../../parts/number';
 import { extent, padded, Plot } from '../frame';
 import { chartBox, ChartAxes } from '../frame/ChartAxes';
-import { markerLegend, markerShape } from './markers';
+import { markerLegend } from './markers';
+import { PairScatter } from './PairScatter';
 import { pairReadings, pairTable, pairText } from './pairReadings';
 import { grouped, standardised, type Pair } from './pairs';
 import { noPairs, type PairPlotProps } from './ParityPlot';
@@ -60,15 +61,7 @@ export function ResidualPlot(props: PairPlotProps) {
           <ReferenceArea y1={-1} y2={1} className="residual-68" ifOverflow="hidden" />
           <ChartAxes view={view} />
           <ReferenceLine y={0} className="parity-line" />
-          {groups.map(([name, members], group) => (
-            <Scatter
-              key={name}
-              name={name}
-              isAnimationActive={false}
-              shape={markerShape(group)}
-              data={members.map((pair) => ({ x: pair.predicted, y: z(pair) }))}
-            />
-          ))}
+          <PairScatter pairs={drawn} place={(pair) => ({ x: pair.predicted, y: z(pair) })} />
         </ScatterChart>
       )}
     </Plot>

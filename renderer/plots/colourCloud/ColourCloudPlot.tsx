@@ -1,4 +1,5 @@
 import { useMemo } from 'react';
+import { colourDifference } from '../../../core/colour/colourDifference';
 import { type SeenColour } from '../../../core/colour/types';
 import { colourNumbers } from '../../parts/colour';
 import { formatShare } from '../../parts/number';
@@ -13,10 +14,6 @@ type Difference = (
   one: readonly [number, number, number],
   other: readonly [number, number, number],
 ) => number;
-
-/** CIE 1976: plain distance in L*a*b*. */
-const difference1976: Difference = (one, other) =>
-  Math.hypot(one[0] - other[0], one[1] - other[1], one[2] - other[2]);
 
 export interface ColourCloudPlotProps {
   /** Colours of the draws from the uncertainties. */
@@ -36,8 +33,8 @@ export function ColourCloudPlot(props: ColourCloudPlotProps) {
     draws,
     centre = null,
     target = null,
-    difference = difference1976,
-    differenceName = 'ΔE*ab (CIE 1976)',
+    difference = colourDifference,
+    differenceName = 'ΔE00 (CIEDE2000)',
   } = props;
   const inside = useMemo(
     () => draws.map(({ lab }) => target !== null && difference(lab, target.lab) <= target.tolerance),
@@ -104,7 +101,7 @@ export function ColourCloudPlot(props: ColourCloudPlotProps) {
       note={
         <>
           {account} Lightness is not on the plane; it is the column at the right.
-          {target && ' The ring is the tolerance as a distance in the plane.'}
+          {target && ' The ring is the tolerance as a plain distance in the plane, for orientation.'}
         </>
       }
     >

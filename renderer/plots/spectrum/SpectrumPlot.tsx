@@ -1,10 +1,10 @@
 import { useMemo, useState } from 'react';
+import { bandCurve } from '../../../core/spectrum';
 import { type Band } from '../../../core/transitions/types';
 import { fromWavenumber, toWavenumber } from '../../../core/units';
 import { formatFigures, unitText, UnitSwitch, useUnit } from '../../parts/number';
 import { areaPath, Axes, linePath, Plot, PlotClip, type ReadSeries } from '../frame';
 import { absorptionTop } from './absorptionTop';
-import { bandCurve } from './bandShape';
 import { BandMarks, bandRail } from './BandMarks';
 import { bandText, placeText } from './bandText';
 import { bandDash, measuredDash } from './lineDash';
@@ -198,11 +198,7 @@ function componentPath(
   lifted: (value: number) => number,
   { x, y }: View,
 ): string {
-  const value = bandCurve(wavenumber_cm1, {
-    centre: band.energy_cm1,
-    width: band.width_cm1,
-    height: band.molarAbsorptivity * factor,
-  });
+  const value = bandCurve(band, Float64Array.from(wavenumber_cm1)).map((height) => height * factor);
   const { xs, ys } = curveInUnit({ wavenumber_cm1, value }, unit);
   return linePath(xs, ys.map(lifted), x, y);
 }
