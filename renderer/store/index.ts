@@ -10,7 +10,7 @@ export {
   type TablePlan,
 } from './exchange/importProject';
 export { askForLastingStorage, type StorageState } from './persistence';
-export { type CandidateFields, type NewCandidate } from './repositories/candidates';
+export { blankCandidate, type CandidateFields, type NewCandidate } from './repositories/candidates';
 export { type ProjectFields } from './repositories/projects';
 export { defaultSettings, type Settings } from './repositories/settings';
 export { type Change, type Edit, type NewRow, type RecordTable, type RowOf } from './rows';

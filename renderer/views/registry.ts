@@ -1,15 +1,21 @@
 import type { ViewDefinition } from '../app/view';
 import { binView } from './bin';
 import { candidatesView } from './candidates';
+import { diagramView } from './diagram';
+import { entryView } from './entry';
 import { libraryView } from './library';
 import { settingsView } from './settings';
+import { sheetView } from './sheet';
 import { startView } from './start';
 
 /** All views of the workbench. A new one is a folder beside these and one line here. */
 export const views: readonly ViewDefinition[] = [
   startView,
   candidatesView,
+  entryView,
+  sheetView,
   libraryView,
+  diagramView,
   binView,
   settingsView,
 ];

@@ -1,7 +1,8 @@
 import type { PredictionOutcome } from '../../core/prediction/types';
 import type { CandidateInput } from '../../core/record/composition';
 import type { CandidateSummary } from './estimateSummary';
-import type { FromWorker, OneOptions, Overlay, ToWorker } from './protocol';
+import type { LevelLine } from '../plots/levelDiagram/levelLine';
+import type { DiagramRequest, FromWorker, OneOptions, Overlay, ToWorker } from './protocol';
 
 /** The part of a `Worker` that is used: tests put an object in its place. */
 export interface WorkerLike {
@@ -51,6 +52,12 @@ export class EstimateClient {
   ): Promise<PredictionOutcome> {
     return this.#run<PredictionOutcome>(signal, (job) => ({ kind: 'one', job, input, overlay, options }), {
       outcome: ({ outcome }, resolve) => resolve(outcome),
+    });
+  }
+
+  diagram(request: DiagramRequest, signal?: AbortSignal): Promise<readonly LevelLine[]> {
+    return this.#run<readonly LevelLine[]>(signal, (job) => ({ kind: 'diagram', job, request }), {
+      lines: ({ lines }, resolve) => resolve(lines),
     });
   }
 

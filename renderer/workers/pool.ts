@@ -1,7 +1,8 @@
 import type { PredictionOutcome } from '../../core/prediction/types';
 import type { CandidateInput } from '../../core/record/composition';
 import { EstimateClient, type TakeSummaries, type WorkerLike } from './client';
-import type { OneOptions, Overlay } from './protocol';
+import type { LevelLine } from '../plots/levelDiagram/levelLine';
+import type { DiagramRequest, OneOptions, Overlay } from './protocol';
 
 /** Rows per request: large enough to keep a worker busy, small enough to share the work evenly. */
 const portion = 200;
@@ -26,8 +27,17 @@ export class EstimatePool {
     options: OneOptions = {},
     signal?: AbortSignal,
   ): Promise<PredictionOutcome> {
+    return this.#singleClient().one(input, overlay, options, signal);
+  }
+
+  /** Level lines for a diagram. */
+  diagram(request: DiagramRequest, signal?: AbortSignal): Promise<readonly LevelLine[]> {
+    return this.#singleClient().diagram(request, signal);
+  }
+
+  #singleClient(): EstimateClient {
     this.#single ??= new EstimateClient(this.#start());
-    return this.#single.one(input, overlay, options, signal);
+    return this.#single;
   }
 
   /** Shares the list out; resolves when all is done, rejects on the first failure or when the signal aborts. */

@@ -1,6 +1,8 @@
 import type { PredictionOutcome } from '../../core/prediction/types';
 import type { CandidateInput } from '../../core/record/composition';
 import type { ParameterSet } from '../../core/record/project';
+import type { CubicGeometry } from '../../core/dshell/types';
+import type { LevelLine } from '../plots/levelDiagram/levelLine';
 import type { CandidateSummary } from './estimateSummary';
 
 /** Values laid over the library; null for the library as it is. */
@@ -28,9 +30,23 @@ export type ToWorker =
       readonly inputs: readonly CandidateInput[];
       readonly overlay: Overlay;
     }
+  | { readonly kind: 'diagram'; readonly job: number; readonly request: DiagramRequest }
   | { readonly kind: 'cancel'; readonly job: number };
 
+/** Levels of one ion over a range of fields. Energies in cm⁻¹. */
+export interface DiagramRequest {
+  readonly dElectrons: number;
+  readonly geometry: CubicGeometry;
+  readonly B: number;
+  readonly C: number;
+  /** The field runs from 0 to this 10Dq. */
+  readonly upTo: number;
+  /** `over-B`: both axes in units of B. */
+  readonly axes: 'absolute' | 'over-B';
+}
+
 export type FromWorker =
+  | { readonly kind: 'lines'; readonly job: number; readonly lines: readonly LevelLine[] }
   | { readonly kind: 'outcome'; readonly job: number; readonly outcome: PredictionOutcome }
   | {
       readonly kind: 'summaries';

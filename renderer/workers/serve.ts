@@ -1,5 +1,6 @@
 import type { PredictionOutcome } from '../../core/prediction/types';
 import type { CandidateInput } from '../../core/record/composition';
+import { diagramLines } from './diagram';
 import { type CandidateSummary, summarise } from './estimateSummary';
 import type { FromWorker, OneOptions, Overlay, ToWorker } from './protocol';
 
@@ -59,6 +60,10 @@ export function serve(
       return;
     }
     try {
+      if (message.kind === 'diagram') {
+        port.postMessage({ kind: 'lines', job, lines: diagramLines(message.request) });
+        return;
+      }
       const [outcome] = predictorFor(message.overlay)([message.input], message.options);
       port.postMessage({ kind: 'outcome', job, outcome: outcome! });
     } catch (error) {

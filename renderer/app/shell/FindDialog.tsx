@@ -1,6 +1,7 @@
 import { useCallback, useId, useMemo, useState, type KeyboardEvent } from 'react';
 import { Dialog, Formula, Keys } from '../../parts';
 import { shownCombo, useAllCommands, useCommandRegistry } from '../commands';
+import { focusFirst } from '../form';
 import { useRouter } from '../router/RouterContext';
 import { useStored } from '../services';
 import { useProjectState } from '../session/ProjectSession';
@@ -73,8 +74,7 @@ function FindField({ onClose }: Pick<FindDialogProps, 'onClose'>) {
         placeholder="en, pink, #shortlist, export …"
         autoComplete="off"
         spellCheck={false}
-        // The dialog was opened to type here.
-        autoFocus
+        ref={focusFirst}
         value={query}
         onChange={(event) => {
           setQuery(event.currentTarget.value);

@@ -22,26 +22,29 @@ export function Rail({ views }: RailProps) {
   return (
     <nav className="rail" aria-label="Tasks">
       {projectId !== null && (
-        <RailGroup title="Project" views={inOrder(views, 'project')} projectId={projectId} />
+        <RailGroup title="Project" views={inOrder(views, 'project')} projectId={projectId} all={views} />
       )}
-      <RailGroup title="Workbench" views={inOrder(views, 'workbench')} projectId={null} />
+      <RailGroup title="Workbench" views={inOrder(views, 'workbench')} projectId={null} all={views} />
     </nav>
   );
 }
 
 interface RailGroupProps extends RailProps {
+  /** With those that have no entry of their own. */
+  readonly all: readonly ViewDefinition[];
   readonly title: string;
   readonly projectId: string | null;
 }
 
-function RailGroup({ title, views, projectId }: RailGroupProps) {
+function RailGroup({ title, views, all, projectId }: RailGroupProps) {
   const { address } = useRouter();
+  const marked = all.find(({ id }) => id === address.view)?.under ?? address.view;
   return (
     <div className="rail-group">
       <h2 className="rail-title">{title}</h2>
       <ul>
         {views.map((view) => {
-          const current = view.id === address.view;
+          const current = view.id === marked;
           return (
             <li key={view.id}>
               <a

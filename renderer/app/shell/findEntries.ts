@@ -51,6 +51,21 @@ export function findCommands(commands: readonly Command[], query: string): Found
   return best(entries, ({ id }) => keywords.get(id) ?? '', query, shownPerKind.command);
 }
 
+/** How well a candidate answers: what it is comes before what was written about it. Null where a word is nowhere. */
+function gradeOf(row: Candidate, formula: string, words: readonly string[]): number | null {
+  const parts = formula.toLowerCase().split(/[^a-z0-9]+/);
+  const names = `${formula} ${row.name} ${row.composition.isomer ?? ''} ${row.tags.join(' ')}`.toLowerCase();
+  const notes = row.notes.toLowerCase();
+  let grade = 0;
+  for (const word of words) {
+    if (parts.some((part) => part === word || part.startsWith(word))) continue;
+    if (names.includes(word)) grade = Math.max(grade, 1);
+    else if (notes.includes(word)) grade = 2;
+    else return null;
+  }
+  return grade;
+}
+
 /** Candidates are looked for by formula, name, tags and notes, once something was typed. */
 export function findCandidates(
   rows: readonly Candidate[],
@@ -59,19 +74,38 @@ export function findCandidates(
 ): FoundEntry[] {
   const words = query.toLowerCase().split(/\s+/).filter(Boolean);
   if (words.length === 0) return [];
-  const found: FoundEntry[] = [];
+  const graded: { grade: number; entry: FoundEntry }[] = [];
   for (const row of rows) {
     const summary = summaryOf(row.id);
     const formula = summary?.ok ? summary.formula : row.composition.metal;
-    const text = `${formula} ${row.name} ${row.tags.join(' ')} ${row.notes}`.toLowerCase();
-    if (!words.every((word) => text.includes(word))) continue;
-    const detail = [row.composition.isomer, row.name, ...row.tags.map((tag) => `#${tag}`)]
-      .filter(Boolean)
-      .join(', ');
-    found.push({ id: row.id, kind: 'candidate', label: formula, detail, keys: null, disabled: false });
-    if (found.length >= shownPerKind.candidate) break;
+    const grade = gradeOf(
+      row,
+      formula,
+      words.map((word) => word.replace(/^#/, '')),
+    );
+    if (grade === null) continue;
+    const detail = [
+      row.composition.isomer,
+      row.name,
+      ...row.tags.map((tag) => `#${tag}`),
+      grade === 2 ? `“${row.notes.slice(0, 60)}…”` : null,
+    ];
+    graded.push({
+      grade,
+      entry: {
+        id: row.id,
+        kind: 'candidate',
+        label: formula,
+        detail: detail.filter(Boolean).join(', '),
+        keys: null,
+        disabled: false,
+      },
+    });
   }
-  return found;
+  return graded
+    .sort((one, other) => one.grade - other.grade)
+    .slice(0, shownPerKind.candidate)
+    .map(({ entry }) => entry);
 }
 
 export function findProjects(projects: readonly Project[], query: string): FoundEntry[] {

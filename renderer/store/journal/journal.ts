@@ -20,8 +20,10 @@ export class Journal {
   readonly #db: SpinhueDatabase;
   readonly #feed: ChangeFeed;
   readonly #clock: Clock;
+  readonly #kept: number;
 
-  constructor(db: SpinhueDatabase, feed: ChangeFeed, clock: Clock) {
+  constructor(db: SpinhueDatabase, feed: ChangeFeed, clock: Clock, kept = keptSteps) {
+    this.#kept = kept;
     this.#db = db;
     this.#feed = feed;
     this.#clock = clock;
@@ -138,7 +140,7 @@ export class Journal {
     const older = this.#db.changes
       .where('[scope+undone+order]')
       .between([scope, 0, minKey], [scope, 0, newest], true, true);
-    const surplus = (await older.count()) - keptSteps;
+    const surplus = (await older.count()) - this.#kept;
     if (surplus > 0) await this.#forget(await older.limit(surplus).primaryKeys());
   }
 

@@ -11,6 +11,7 @@ import {
 } from '../rows';
 import { sameContent } from '../sameContent';
 import { StoreError } from '../storeError';
+import { timeOrderedId } from './timeOrderedId';
 
 export interface Clock {
   /** ISO 8601, UTC. */
@@ -20,7 +21,7 @@ export interface Clock {
 
 export const systemClock: Clock = {
   now: () => new Date().toISOString(),
-  newId: () => crypto.randomUUID(),
+  newId: () => timeOrderedId(),
 };
 
 /** Writes rows inside one transaction and remembers what each was before. */

@@ -7,7 +7,8 @@ import { counted } from '../words';
 export type CandidateFields = Partial<Omit<Candidate, keyof Row>>;
 export type NewCandidate = Pick<Candidate, 'composition'> & CandidateFields;
 
-const blank = {
+/** What a candidate is until somebody says more. */
+export const blankCandidate = {
   name: '',
   counterIon: null,
   solvate: null,
@@ -48,7 +49,7 @@ export class CandidateRepository {
   }
 
   async create(projectId: string, given: readonly NewCandidate[], label?: string): Promise<Candidate[]> {
-    const rows = given.map((each): NewRow<'candidates'> => ({ ...blank, ...each, projectId }));
+    const rows = given.map((each): NewRow<'candidates'> => ({ ...blankCandidate, ...each, projectId }));
     return this.#journal.record(projectId, label ?? `add ${counted(rows.length, 'candidate')}`, (writer) =>
       writer.create('candidates', rows),
     );

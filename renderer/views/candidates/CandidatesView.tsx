@@ -1,8 +1,9 @@
-import { useCallback, useMemo, useState } from 'react';
+import { useCallback, useEffect, useMemo, useState } from 'react';
 import { linkTo } from '../../app/router/RouterContext';
 import { useAction, useSettings } from '../../app/services';
 import { useProject } from '../../app/session/ProjectSession';
 import { useVersion } from '../../app/session/observable';
+import { rememberOrder } from '../../app/session/shownOrder';
 import { useLibrary } from '../../app/session/useLibrary';
 import { ViewHeader } from '../../app/shell/ViewHeader';
 import { EmptyState, ErrorPanel, useToast } from '../../parts';
@@ -34,6 +35,14 @@ export default function CandidatesView() {
   const terms = useMemo(() => parseFilter(filterText, [...library.ligands.values()]), [filterText, library]);
   const [sort, setSort] = useSort(project.targetLab !== null);
   const { all, shown } = useTableRows(session, terms, sort);
+  useEffect(
+    () =>
+      rememberOrder(
+        project.id,
+        shown.map(({ candidate }) => candidate.id),
+      ),
+    [project.id, shown],
+  );
   const selection = useSelection(shown);
   const actions = useRowActions(project.id);
   const [current, setCurrent] = useState<string | null>(null);

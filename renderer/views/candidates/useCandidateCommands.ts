@@ -1,5 +1,5 @@
 import { useMemo } from 'react';
-import { type Command, menuCommand, useCommands } from '../../app/commands';
+import { type Command, useCommands } from '../../app/commands';
 import { useRouter } from '../../app/router/RouterContext';
 import { filterFieldId } from './FilterBar';
 import type { RowActions } from './selection/useRowActions';
@@ -32,7 +32,13 @@ export function useCandidateCommands(given: CandidateCommands): void {
       disabled,
     });
     return [
-      menuCommand('new-candidate', () => go({ view: 'entry', project: projectId }), { keys: ['n'] }),
+      {
+        id: 'candidates.add',
+        label: 'Add a candidate',
+        group,
+        keys: ['n'],
+        run: () => go({ view: 'entry', project: projectId }),
+      },
       {
         id: 'candidates.filter',
         label: 'Filter the candidates',

@@ -1,5 +1,6 @@
 import { useMemo } from 'react';
 import type { LigandRecord } from '../../../core/library/ligands';
+import { withoutCharge } from '../../../core/library/molarMass';
 import type { ParameterLibrary } from '../../../core/library/parameterLibrary';
 import { linkTo } from '../../app/router/RouterContext';
 import { EmptyState, Formula } from '../../parts';
@@ -85,7 +86,7 @@ function LigandTable({
               <span className="soft">{ligand.commonName}</span>
             </th>
             <td>
-              <Formula formula={chargeMarked(ligand.formula)} />
+              <Formula formula={chargeMarked(ligand)} />
             </td>
             <td>{ligand.donorAtoms.join(', ')}</td>
             <td className="number">
@@ -104,5 +105,9 @@ function LigandTable({
   );
 }
 
-/** `C2O4 2-` as the formula setter wants its charge: `C2O4^2-`. */
-const chargeMarked = (formula: string): string => formula.replace(/\s*(\d*[+-])$/, '^$1');
+/** `N3-` as the formula setter wants it: `N3^-`, since the 3 counts atoms. */
+function chargeMarked({ formula, charge }: LigandRecord): string {
+  if (charge === 0) return formula;
+  const size = Math.abs(charge) === 1 ? '' : Math.abs(charge);
+  return `${withoutCharge(formula, charge)}^${size}${charge > 0 ? '+' : '-'}`;
+}

@@ -1,5 +1,4 @@
 import { useTheme } from '../../app/services';
-import { UnitSwitch } from '../../parts';
 
 const themes = [
   ['system', 'As the system'],
@@ -21,10 +20,6 @@ export function AppearanceSection() {
           </label>
         ))}
       </fieldset>
-      <div className="stack">
-        <span className="soft small">Unit for energies of transitions</span>
-        <UnitSwitch />
-      </div>
     </section>
   );
 }

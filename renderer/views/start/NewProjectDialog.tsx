@@ -1,5 +1,5 @@
 import { useId, useState, type FormEvent } from 'react';
-import { Field } from '../../app/form';
+import { Field, focusFirst } from '../../app/form';
 import { useRouter } from '../../app/router/RouterContext';
 import { useAction, useStore } from '../../app/services';
 import { Dialog } from '../../parts';
@@ -57,7 +57,7 @@ function NewProjectForm({ id, onDone }: { readonly id: string; readonly onDone: 
         {(attributes) => (
           <input
             {...attributes}
-            autoFocus
+            ref={focusFirst}
             maxLength={200}
             value={name}
             onChange={(event) => setName(event.currentTarget.value)}

@@ -30,7 +30,6 @@ function ProjectRow({ project }: { readonly project: ListedProject }) {
         <ProjectName project={project} href={linkTo({ view: 'candidates', project: project.id })} />
         {project.notes !== '' && <p className="project-row-notes">{project.notes}</p>}
         <p className="soft small">
-          {project.demo && 'Demo: a made-up scenario to look around in. '}
           {counted(project.candidateCount, 'candidate')}, changed {dayOf(project.updatedAt)}
         </p>
       </div>

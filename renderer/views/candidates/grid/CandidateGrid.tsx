@@ -66,7 +66,7 @@ export function CandidateGrid(props: CandidateGridProps) {
   );
   const onKeyDown = useGridKeys({ shown, current, perPage: 8, selection, onMove: move, onOpen: open });
 
-  const tracks = `2.25rem 2.25rem ${columns.map(({ width }) => width).join(' ')}`;
+  const tracks = `1.9rem 1.9rem ${columns.map(({ width }) => width).join(' ')}`;
   const currentShown = shown.some(({ candidate }) => candidate.id === current);
   return (
     <div

@@ -42,7 +42,7 @@ export const columns: readonly Column[] = [
     id: 'complex',
     title: 'Complex',
     ranking: 'formula',
-    width: 'minmax(11rem, 1.3fr)',
+    width: 'minmax(9.5rem, 1.3fr)',
     fixed: true,
     cell: (row) => <ComplexCell row={row} />,
   },
@@ -50,20 +50,21 @@ export const columns: readonly Column[] = [
     id: 'strip',
     title: 'Light that passes, nm',
     under: () => <TransmissionScale />,
-    width: 'minmax(9rem, 1fr)',
+    width: 'minmax(8rem, 1fr)',
     cell: (row) => estimated(row, ({ transmittance }) => <TransmissionStrip transmittance={transmittance} />),
   },
   {
     id: 'colour',
     title: 'Seen colour',
-    width: '9.5rem',
+    width: '8.5rem',
     cell: (row) => estimated(row, ({ colour }) => <Swatch colour={colour} size="row" text="words" />),
   },
   {
     id: 'distance',
-    title: 'ΔE00 to target',
+    title: 'ΔE00',
+    under: () => 'to target',
     ranking: 'distance',
-    width: '5.5rem',
+    width: '4rem',
     cell: ({ distance }) => (
       <span className="cell-figure">{distance === null ? '–' : distance.toFixed(distance < 10 ? 1 : 0)}</span>
     ),
@@ -72,7 +73,7 @@ export const columns: readonly Column[] = [
     id: 'spin',
     title: 'Spin state',
     ranking: 'spin',
-    width: '8.5rem',
+    width: '8rem',
     cell: (row) => estimated(row, ({ spin }) => <SpinBar spin={spin} compact />),
   },
   {
@@ -80,7 +81,7 @@ export const columns: readonly Column[] = [
     title: 'First band',
     under: (unit) => unitText[unit],
     ranking: 'band',
-    width: '7.5rem',
+    width: '6.75rem',
     cell: (row) => estimated(row, (summary) => <BandCell band={firstBandOf(summary)} />),
   },
   {
@@ -88,13 +89,13 @@ export const columns: readonly Column[] = [
     title: '10Dq',
     under: (unit) => unitText[intervalUnit(unit)],
     ranking: 'tenDq',
-    width: '7.5rem',
+    width: '6.75rem',
     cell: (row) => estimated(row, ({ tenDq }) => <IntervalCell value={tenDq} />),
   },
   {
     id: 'remarks',
     title: 'Remarks',
-    width: '4.5rem',
+    width: '4.25rem',
     cell: (row) => estimated(row, ({ flags }) => <FlagMark flags={flags} />),
   },
 ];

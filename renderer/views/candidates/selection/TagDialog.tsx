@@ -1,5 +1,5 @@
 import { useId, useState, type FormEvent } from 'react';
-import { Field } from '../../../app/form';
+import { Field, focusFirst } from '../../../app/form';
 import { Dialog } from '../../../parts';
 import type { TableRow } from '../tableRow';
 
@@ -46,7 +46,7 @@ function TagForm({
         {(attributes) => (
           <input
             {...attributes}
-            autoFocus
+            ref={focusFirst}
             list={list}
             maxLength={50}
             value={tag}

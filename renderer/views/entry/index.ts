@@ -1,0 +1,13 @@
+import { lazy } from 'react';
+import { defineView } from '../../app/view';
+
+export const entryView = defineView({
+  id: 'entry',
+  title: 'New candidate',
+  place: 'project',
+  order: 1,
+  command: 'new-candidate',
+  keys: 'g n',
+  hint: 'Choose metal, oxidation state, geometry and ligands, with the estimate alongside',
+  component: lazy(() => import('./EntryView')),
+});

@@ -1,0 +1,51 @@
+import type { Estimate, EstimateRoute } from '../../../core/estimation/types';
+import type { Prediction } from '../../../core/prediction/types';
+import { NumberWithRange, Why } from '../../parts';
+
+const routeWords: Record<EstimateRoute, string> = {
+  'measured-complex': 'measured on this very complex',
+  'measured-relative': 'measured on a close relative',
+  'published-factors': 'from published factors',
+  'metal-specific': 'from values for this metal',
+  'donor-class': 'by analogy within the donor class',
+  'series-place': 'by place in the spectrochemical series',
+  'free-ion': 'from the free ion',
+  'not-estimated': 'not estimated',
+};
+
+/** The parameters of the field with range, route and account. */
+export function FieldPanel({ prediction }: { readonly prediction: Prediction }) {
+  return (
+    <section className="panel" aria-labelledby="sheet-field">
+      <h2 id="sheet-field">Field and repulsion</h2>
+      <dl className="quantities">
+        <Quantity name="10Dq" meaning="splitting of the d shell by the ligands" estimate={prediction.tenDq} />
+        <Quantity name="B" meaning="Racah parameter of electron repulsion" estimate={prediction.racahB} />
+        <Quantity name="C" meaning="second Racah parameter" estimate={prediction.racahC} />
+        <Quantity name="ζ" meaning="spin-orbit parameter of one electron" estimate={prediction.zeta} />
+      </dl>
+    </section>
+  );
+}
+
+interface QuantityProps {
+  readonly name: string;
+  readonly meaning: string;
+  readonly estimate: Estimate;
+}
+
+function Quantity({ name, meaning, estimate }: QuantityProps) {
+  return (
+    <div>
+      <div className="quantity-line">
+        <dt>
+          <abbr title={meaning}>{name}</abbr> <span className="small">{routeWords[estimate.route]}</span>
+        </dt>
+        <dd>
+          <NumberWithRange kind="interval" value={estimate.value} sigma={estimate.sigma} />
+        </dd>
+      </div>
+      <Why reasons={estimate.reasons} of={name} />
+    </div>
+  );
+}
