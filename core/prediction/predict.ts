@@ -4,7 +4,6 @@ import {
   complexFormula,
   complexKey,
   defaultLibrary,
-  findGeometry,
   withParameterSet,
   type ParameterLibrary,
   type ParameterValues,
@@ -30,10 +29,9 @@ import {
   type IlluminantId,
   type ObserverId,
 } from '../colour';
-import type { Band } from '../transitions/types';
+import { predictBands, type Band } from '../transitions';
 import { drawBands } from './drawBands';
 import { modelVersion } from './modelVersion';
-import { simpleBands } from './simpleBands';
 import type { Prediction, PredictionOutcome } from './types';
 
 export interface PredictOptions {
@@ -57,6 +55,20 @@ interface LevelInputs {
   readonly B: Estimate;
   readonly C: Estimate;
 }
+
+/** An ideal polyhedron and strengths carried over from six donors leave a level in doubt by this share of its energy. */
+const overlapDoubt = 0.05;
+
+const lessSure = (band: Band): Band =>
+  band.multiplicity === null
+    ? band
+    : { ...band, sigma_cm1: Math.hypot(band.sigma_cm1, overlapDoubt * band.energy_cm1) };
+
+const ligandsOf = (composition: Composition, library: ParameterLibrary) =>
+  Object.entries(composition.ligands).flatMap(([id, count]) => {
+    const ligand = library.ligands.get(id);
+    return ligand === undefined ? [] : [{ ligand, count }];
+  });
 
 function groundTermOf(field: FieldEstimate, levels: readonly FieldLevel[]): string {
   if (levels.length > 0) return levels[0]!.label;
@@ -107,14 +119,29 @@ function predictChecked(
   const tenDq = spin.choice === 'high' ? field.fields.high : field.fields.low;
   const inputs = { tenDq, B: field.racahB, C: field.racahC };
   const levels = fieldLevels(field, library, spin.choice, tenDq);
-  const geometry = findGeometry(composition.geometry);
   const conditions = {
     concentration_mM: input.concentration_mM ?? defaults.concentration_mM,
     path_cm: input.path_cm ?? defaults.path_cm,
     temperature_K,
   };
-  const bands = simpleBands({ levels, ...inputs, centrosymmetric: geometry?.centrosymmetric ?? false });
-  const flags: Flag[] = [...field.flags];
+  const predicted = predictBands({
+    dElectrons: field.dElectrons,
+    ion: field.ion,
+    ligands: ligandsOf(composition, library),
+    geometry: composition.geometry,
+    isomer: composition.isomer ?? null,
+    levels,
+    groundMultiplicity: spin.prediction.multiplicity,
+    tenDq,
+    racahB: field.racahB,
+    racahC: field.racahC,
+    zeta: field.zeta,
+    temperature_K,
+    donorStrengths: field.donors,
+    library,
+  });
+  const bands = field.cubic === null ? predicted.bands.map(lessSure) : predicted.bands;
+  const flags: Flag[] = [...field.flags, ...predicted.flags];
   if (spin.prediction.nearCrossover) {
     flags.push({
       code: 'near-crossover',
@@ -140,7 +167,7 @@ function predictChecked(
     conditions,
     ...seen(bands, inputs, conditions, options, complexKey(composition)),
     flags,
-    leftOut: field.leftOut,
+    leftOut: [...new Set([...field.leftOut, ...predicted.leftOut])],
     cautions: cautionsFor(composition, options.counterIon, library),
     madeWith,
   };
