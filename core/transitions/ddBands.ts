@@ -26,7 +26,7 @@ function allowedIntensity(context: DdContext, level: BandLevel, typical: number)
   const forbidden = input.geometry === 'tetrahedral' && !dipoleAllowedInTd(ground.label, level.label);
   const molarAbsorptivity =
     typical *
-    oneElectronShare(ground.configurations, level.configurations) *
+    oneElectronShare(ground.configurations, level.configurations, level.slope.tenDq) *
     (forbidden ? dipoleForbidden : 1) *
     chargeTransferGain(level.energy, edge_cm1);
   return { level, molarAbsorptivity, width_cm1: levelWidth(context, level) };

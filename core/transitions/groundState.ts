@@ -9,25 +9,18 @@ export interface GroundState {
   readonly lowSpin: boolean;
 }
 
-/** Ground configuration from the levels, or by Hund's rule where there are none. */
+/** Ground configuration from the levels; by spin alone where they do not tell it or there are none. */
 export function groundState({ dElectrons, geometry, levels }: BandInput): GroundState {
   const ground = levels[0];
-  const tetrahedral = geometry === 'tetrahedral';
   const highest = (dElectrons <= 5 ? dElectrons : 10 - dElectrons) + 1;
-  if (ground?.configurations[0] === undefined) {
-    const spin: SpinChoice = 'high';
-    const like = octahedralOccupation(tetrahedral ? 10 - dElectrons : dElectrons, spin);
-    const shell = tetrahedral ? { t2: 6 - like.t2, e: 4 - like.e } : like;
-    return { multiplicity: ground?.multiplicity ?? highest, ...shell, lowSpin: false };
-  }
-  const { t2, e } = ground.configurations[0];
-  const hasChoice = dElectrons >= 4 && dElectrons <= 7;
-  return {
-    multiplicity: ground.multiplicity,
-    t2,
-    e,
-    lowSpin: hasChoice && ground.multiplicity < highest,
-  };
+  const multiplicity = ground?.multiplicity ?? highest;
+  const lowSpin = dElectrons >= 4 && dElectrons <= 7 && multiplicity < highest;
+  const told = ground?.configurations[0];
+  if (told !== undefined) return { multiplicity, t2: told.t2, e: told.e, lowSpin };
+  const spin: SpinChoice = lowSpin ? 'low' : 'high';
+  if (geometry !== 'tetrahedral') return { multiplicity, ...octahedralOccupation(dElectrons, spin), lowSpin };
+  const holes = octahedralOccupation(10 - dElectrons, spin);
+  return { multiplicity, t2: 6 - holes.t2, e: 4 - holes.e, lowSpin };
 }
 
 /**

@@ -51,6 +51,7 @@ interface Metal {
   /** D, cm⁻¹; null where B or C is not estimated. */
   readonly D: number | null;
   readonly even: string;
+  readonly planar: boolean;
 }
 
 /** A π level hits the metal weakly, a σ level and the upper shell strongly; strength grows with the number of donors. */
@@ -76,7 +77,7 @@ function bandInto(
     kind: 'LMCT',
     energy_cm1: energy,
     sigma_cm1: analogy ? ctSigma_cm1.analogy : ctSigma_cm1.own,
-    label: `${donor.name} ${orbital} -> ${metal.name} (${acceptor.shell}${metal.even})`,
+    label: `${donor.name} ${orbital} -> ${metal.name} (${metal.planar ? 'x2-y2' : `${acceptor.shell}${metal.even}`})`,
     molarAbsorptivity: (first && orbital === 'π' ? weak : strong) * Math.sqrt(donor.places / 6),
     width_cm1,
     rule: 'ligand to metal',
@@ -137,6 +138,7 @@ export function ligandToMetalBands(input: BandInput, ground: GroundState): Ligan
         ? null
         : spinPairingParameter(racahB.value, racahC.value),
     even: tetrahedral ? '' : 'g',
+    planar: geometry === 'square-planar',
   };
   const places = acceptors({
     dElectrons: ion.dElectrons,
