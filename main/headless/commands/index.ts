@@ -3,6 +3,7 @@ import { agreement } from './agreement';
 import { estimate } from './estimate';
 import { colour } from './colour';
 import { fitBands } from './fitBands';
+import { fitField } from './fitField';
 import { levels } from './levels';
 import { readSpectrum } from './readSpectrum';
 import { search } from './search';
@@ -15,6 +16,7 @@ export const commands: readonly Command[] = [
   agreement,
   readSpectrum,
   fitBands,
+  fitField,
   levels,
   terms,
   colour,

@@ -1,0 +1,36 @@
+/** A level as people name it: multiplicity and irrep, and which of several of one name. */
+export interface NamedLevel {
+  readonly multiplicity: number;
+  /** Without g or u: `T1`; null where only the multiplicity is said. */
+  readonly irrep: string | null;
+  /** Free-ion parent where one was written, `F` or `P`. */
+  readonly parent: string | null;
+}
+
+const term = /(\d+)\s*([ABET])\s*([12]?)\s*[gu]?(?:\s*\(\s*([A-Z])\s*\))?/;
+
+const multiplets = ['singlet', 'doublet', 'triplet', 'quartet', 'quintet', 'sextet'];
+
+/**
+ * The upper level of an assignment as written: `4T2g`, `4A2g -> 4T1g(P)`, `3T1(F) → 3A2`, `singlet`. Of `4A1g,4Eg` the
+ * first is taken. Null where nothing is recognised.
+ */
+export function parseLevel(label: string): NamedLevel | null {
+  const upper = label
+    .split(/->|→|⟶|—>/)
+    .at(-1)!
+    .replace(/[_^{}$\s]/g, '');
+  const match = term.exec(upper);
+  if (match === null) {
+    const word = multiplets.findIndex((name) => upper.toLowerCase().includes(name));
+    return word < 0 ? null : { multiplicity: word + 1, irrep: null, parent: null };
+  }
+  const [, multiplicity, letter, index, parent] = match;
+  return { multiplicity: Number(multiplicity), irrep: `${letter}${index}`, parent: parent ?? null };
+}
+
+/** The ground level of an assignment with an arrow, `4A2g` of `4A2g -> 4T2g`; null without one. */
+export function parseGround(label: string): NamedLevel | null {
+  const parts = label.split(/->|→|⟶|—>/);
+  return parts.length > 1 ? parseLevel(parts[0]!) : null;
+}
