@@ -5,6 +5,8 @@ import { sortedByHue } from './colourNumbers';
 import './CloudStrip.css';
 
 const rows = 5;
+/** Patches of the compact form: a table shows many strips at once. */
+const compactPatches = 40;
 
 /** `violet 62 %, lilac 30 %, other names 8 %`. */
 export function cloudInWords({ words }: ColourCloud, shown = 3): string {
@@ -26,7 +28,10 @@ export const CloudStrip = memo(function CloudStrip({ cloud, compact = false }: C
   if (cloud === null || sorted.length === 0) {
     return <span className="cloud-strip-words">no range of colours estimated</span>;
   }
-  const columns = Math.ceil(sorted.length / rows);
+  const every = compact ? Math.max(1, Math.ceil(sorted.length / compactPatches)) : 1;
+  const patches = sorted.filter((_, index) => index % every === 0);
+  const height = compact ? 1 : rows;
+  const columns = Math.ceil(patches.length / height);
   const words = cloudInWords(cloud);
   return (
     <span className="cloud-strip" data-compact={compact || undefined}>
@@ -34,15 +39,15 @@ export const CloudStrip = memo(function CloudStrip({ cloud, compact = false }: C
         className="cloud-strip-field"
         role="img"
         aria-label={`${sorted.length} possible colours: ${words}`}
-        viewBox={`0 0 ${columns} ${rows}`}
+        viewBox={`0 0 ${columns} ${height}`}
         preserveAspectRatio="none"
         shapeRendering="crispEdges"
       >
-        {sorted.map((colour, index) => (
+        {patches.map((colour, index) => (
           <rect
             key={index}
-            x={Math.floor(index / rows)}
-            y={index % rows}
+            x={Math.floor(index / height)}
+            y={index % height}
             width={1.02}
             height={1.02}
             fill={colour.srgb}

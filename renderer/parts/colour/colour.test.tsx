@@ -130,6 +130,13 @@ describe('the cloud strip', () => {
     expect(screen.getByRole('img', { name: /4 possible colours: violet 50/ })).toBeTruthy();
   });
 
+  it('shows every fifth of 200 colours in a table row, and still counts them all', () => {
+    const draws = Array.from({ length: 200 }, () => violet);
+    render(<CloudStrip compact cloud={{ draws, words: [{ words: 'violet', share: 1 }] }} />);
+    expect(document.querySelectorAll('rect')).toHaveLength(40);
+    expect(screen.getByRole('img', { name: /200 possible colours: violet 100/ })).toBeTruthy();
+  });
+
   it('says where nothing was drawn', () => {
     render(<CloudStrip cloud={null} />);
     expect(screen.getByText('no range of colours estimated')).toBeTruthy();

@@ -1,7 +1,7 @@
 import { useMemo } from 'react';
 import { fromWavenumber, toWavenumber } from '../../../core/units';
 import { formatFigures, unitText, UnitSwitch, useUnit } from '../../parts/number';
-import { Axes, extent, linePath, padded, Plot, PlotClip, type ReadSeries } from '../frame';
+import { Axes, extent, linePath, padded, Plot, PlotClip, PlotSvg, type ReadSeries } from '../frame';
 import { placeText } from '../spectrum/bandText';
 import { axisDomain, curveInUnit, type SpectrumCurve } from '../spectrum/spectrumUnits';
 import { VisibleBand } from '../spectrum/VisibleBand';
@@ -126,7 +126,7 @@ export function BandFitPlot(props: BandFitPlotProps) {
       note={props.note}
     >
       {(view) => (
-        <svg width={view.width} height={view.height} aria-hidden="true">
+        <PlotSvg view={view}>
           <Axes view={view} xFigures={false} />
           <VisibleBand view={view} unit={unit} />
           <PlotClip view={view}>
@@ -165,7 +165,7 @@ export function BandFitPlot(props: BandFitPlotProps) {
           {residual && (
             <ResidualPanel view={view} xs={data.xs} residual={residual} noise={noise} room={residualRoom} />
           )}
-        </svg>
+        </PlotSvg>
       )}
     </Plot>
   );

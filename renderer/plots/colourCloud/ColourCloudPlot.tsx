@@ -3,7 +3,7 @@ import { colourDifference } from '../../../core/colour/colourDifference';
 import { type SeenColour } from '../../../core/colour/types';
 import { colourNumbers } from '../../parts/colour';
 import { formatShare } from '../../parts/number';
-import { Axes, Plot, PlotClip, type PlotView } from '../frame';
+import { Axes, Plot, PlotClip, PlotSvg, type PlotView } from '../frame';
 import { cloudLegend } from './cloudLegend';
 import { cloudHeight, cloudMargin, cloudWidest, planeReach } from './cloudPlane';
 import { LightnessColumn } from './LightnessColumn';
@@ -106,7 +106,7 @@ export function ColourCloudPlot(props: ColourCloudPlotProps) {
       }
     >
       {(view) => (
-        <svg width={view.width} height={view.height} aria-hidden="true">
+        <PlotSvg view={view}>
           <rect
             className="cloud-surround"
             x={view.area.left}
@@ -140,7 +140,7 @@ export function ColourCloudPlot(props: ColourCloudPlotProps) {
             {target && <TargetMark view={view} target={target} />}
           </PlotClip>
           <LightnessColumn view={view} draws={draws} centre={centre} target={target} />
-        </svg>
+        </PlotSvg>
       )}
     </Plot>
   );

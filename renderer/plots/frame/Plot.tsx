@@ -99,7 +99,12 @@ export function Plot(props: PlotProps) {
     };
     const act = acts[event.key];
     if (act) act();
-    else if (!reading.onKey(event)) return;
+    else {
+      const next = reading.onKey(event);
+      if (!next) return;
+      const { xs, ys } = series[next.series]!;
+      zoom.show({ x: xs[next.index]!, y: ys[next.index]! });
+    }
     event.preventDefault();
     event.stopPropagation();
   };

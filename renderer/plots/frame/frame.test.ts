@@ -3,7 +3,7 @@ import { areaPath, linePath } from './path';
 import { extent, linearScale, logScale, padded } from './scale';
 import { nearestPoint, stepReading, type ReadSeries } from './series';
 import { linearTicks, logTicks, niceStep } from './ticks';
-import { isZoomed, zoomAbout, zoomTo } from './zoom';
+import { isZoomed, windowWith, zoomAbout, zoomTo } from './zoom';
 
 const plain = (texts: readonly string[]) => texts.map((text) => text.replace(/\u202f/g, ' '));
 
@@ -95,6 +95,17 @@ describe('zoom', () => {
     expect(zoomTo(whole, { x: 80, y: 9 }, { x: 20, y: 1 }, 'xy')).toEqual({ x: [20, 80], y: [1, 9] });
     expect(zoomTo(whole, { x: 80, y: 9 }, { x: 20, y: 1 }, 'x').y).toEqual([0, 10]);
     expect(isZoomed(whole, whole)).toBe(false);
+  });
+});
+
+describe('a zoomed window', () => {
+  const whole = { x: [0, 100], y: [0, 10] } as const;
+  const part = { x: [10, 30], y: [2, 4] } as const;
+
+  it('follows the point being read, without changing its size or leaving the whole', () => {
+    expect(windowWith(part, whole, { x: 50, y: 3 }, 'xy')).toEqual({ x: [40, 60], y: [2, 4] });
+    expect(windowWith(part, whole, { x: 100, y: 9.5 }, 'xy')).toEqual({ x: [80, 100], y: [8, 10] });
+    expect(windowWith(part, whole, { x: 20, y: 9 }, 'x')).toEqual(part);
   });
 });
 

@@ -10,8 +10,8 @@ export interface PlotReading {
     place: readonly [number, number],
     alongX: boolean,
   ) => void;
-  /** True when the key moved the reading. */
-  readonly onKey: (event: KeyboardEvent) => boolean;
+  /** The point that the key led to; null for a key that reads nothing. */
+  readonly onKey: (event: KeyboardEvent) => ReadPoint | null;
   readonly clear: () => void;
 }
 
@@ -26,7 +26,7 @@ export function usePlotReading(series: readonly ReadSeries[]): PlotReading {
     onKey: (event) => {
       const next = stepReading(series, there, event.key, event.shiftKey ? 10 : 1);
       if (next) setAt(next);
-      return next !== null;
+      return next;
     },
     clear: () => setAt(null),
   };

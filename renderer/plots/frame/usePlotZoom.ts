@@ -1,5 +1,5 @@
 import { useState } from 'react';
-import { isZoomed, zoomAbout, zoomTo, type Window } from './zoom';
+import { isZoomed, windowWith, zoomAbout, zoomTo, type Window } from './zoom';
 
 interface Place {
   readonly x: number;
@@ -11,6 +11,8 @@ export interface PlotZoom {
   readonly zoomed: boolean;
   readonly by: (factor: number, about?: Place) => void;
   readonly to: (one: Place, other: Place) => void;
+  /** Brings a place into sight where only a part is shown. */
+  readonly show: (place: Place) => void;
   readonly reset: () => void;
 }
 
@@ -28,6 +30,9 @@ export function usePlotZoom(whole: Window, axes: 'x' | 'xy'): PlotZoom {
     by: (factor, about = { x: middle(shown.x), y: middle(shown.y) }) =>
       keep(zoomAbout(shown, whole, about, factor, axes)),
     to: (one, other) => keep(zoomTo(whole, one, other, axes)),
+    show: (place) => {
+      if (isZoomed(shown, whole)) keep(windowWith(shown, whole, place, axes));
+    },
     reset: () => setState(null),
   };
 }

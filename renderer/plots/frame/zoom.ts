@@ -49,6 +49,24 @@ export function zoomTo(
   };
 }
 
+const follow = (shown: Interval, whole: Interval, value: number): Interval => {
+  const [low, high] = forwards(shown) ? shown : [shown[1], shown[0]];
+  if (value >= low && value <= high) return shown;
+  const half = (shown[1] - shown[0]) / 2;
+  return inside([value - half, value + half], whole);
+};
+
+/** The window moved, not resized, so that a place comes into sight; y moves only where it can be zoomed. */
+export const windowWith = (
+  now: Window,
+  whole: Window,
+  at: { x: number; y: number },
+  axes: 'x' | 'xy',
+): Window => ({
+  x: follow(now.x, whole.x, at.x),
+  y: axes === 'x' ? now.y : follow(now.y, whole.y, at.y),
+});
+
 /** Whether less than the whole is shown. */
 export const isZoomed = (now: Window, whole: Window): boolean =>
   now.x[0] !== whole.x[0] || now.x[1] !== whole.x[1] || now.y[0] !== whole.y[0] || now.y[1] !== whole.y[1];

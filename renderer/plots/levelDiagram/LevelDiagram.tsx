@@ -2,7 +2,7 @@ import { useMemo, useState } from 'react';
 import { fromWavenumber } from '../../../core/units';
 import { multiplicityName, spokenTerm } from '../../parts/chemistry';
 import { formatFigures, intervalUnit, unitText, useUnit } from '../../parts/number';
-import { Axes, extent, linePath, Plot, PlotClip, type Interval } from '../frame';
+import { Axes, extent, linePath, Plot, PlotClip, PlotSvg, type Interval } from '../frame';
 import { CandidateExtent, CandidateMark, type CandidatePlace } from './CandidateMark';
 import { summaryOf } from './diagramSummary';
 import { ceilingOf, inUnit, placeInUnit, type DiagramAxes } from './diagramUnits';
@@ -123,7 +123,7 @@ export function LevelDiagram(props: LevelDiagramProps) {
       note={props.note}
     >
       {(view) => (
-        <svg width={view.width} height={view.height} aria-hidden="true">
+        <PlotSvg view={view}>
           {place && (
             <PlotClip view={view}>
               <CandidateExtent view={view} place={place} />
@@ -153,7 +153,7 @@ export function LevelDiagram(props: LevelDiagramProps) {
           </PlotClip>
           <GroundLevels view={view} crossovers={crossovers} only={ground} />
           <LevelLabels view={view} lines={visible} />
-        </svg>
+        </PlotSvg>
       )}
     </Plot>
   );

@@ -3,7 +3,7 @@ import { bandCurve } from '../../../core/spectrum';
 import { type Band } from '../../../core/transitions/types';
 import { fromWavenumber, toWavenumber } from '../../../core/units';
 import { formatFigures, unitText, UnitSwitch, useUnit } from '../../parts/number';
-import { areaPath, Axes, linePath, Plot, PlotClip, type ReadSeries } from '../frame';
+import { areaPath, Axes, linePath, Plot, PlotClip, PlotSvg, type ReadSeries } from '../frame';
 import { absorptionTop } from './absorptionTop';
 import { BandMarks, bandRail } from './BandMarks';
 import { bandText, placeText } from './bandText';
@@ -137,7 +137,7 @@ export function SpectrumPlot(props: SpectrumPlotProps) {
       }
     >
       {(view) => (
-        <svg width={view.width} height={view.height} aria-hidden="true">
+        <PlotSvg view={view}>
           <Axes view={view} />
           <VisibleBand view={view} unit={unit} />
           <PlotClip view={view}>
@@ -169,7 +169,7 @@ export function SpectrumPlot(props: SpectrumPlotProps) {
             })}
           </PlotClip>
           {bandsShown && <BandMarks view={view} bands={bands} unit={unit} />}
-        </svg>
+        </PlotSvg>
       )}
     </Plot>
   );
