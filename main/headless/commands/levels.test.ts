@@ -13,7 +13,7 @@ interface Answer {
   readonly error?: { code: string; message: string; field: string };
 }
 
-const run = async (input: unknown): Promise<Answer[]> => {
+const run = async (input: unknown, ...flags: string[]): Promise<Answer[]> => {
   const refuse = () => Promise.reject(new Error('not used'));
   const io: CommandIo = {
     readJson: () => Promise.resolve(input),
@@ -21,7 +21,8 @@ const run = async (input: unknown): Promise<Answer[]> => {
     readText: refuse,
     note: () => {},
   };
-  return (await levels.run({ operands: ['levels.json'], options: new Map() }, io)) as Answer[];
+  const options = new Map(flags.map((flag) => [flag, true] as const));
+  return (await levels.run({ operands: ['levels.json'], options }, io)) as Answer[];
 };
 
 const chromium = { id: 'cr', dElectrons: 3, B: 725, C: 2900, field: { type: 'oct', tenDq: 17_400 } };
@@ -50,6 +51,29 @@ describe('levels', () => {
     expect(unnamed!.levels!.every(({ label }) => label === null)).toBe(true);
   });
 
+  it('names the levels of lower groups too, by request or as the field has it', async () => {
+    const trigonal = { type: 'trigonal', tenDq: 17_400, Dsigma: 200, Dtau: 100 };
+    const [own, asked, foreign] = await run([
+      { ...chromium, field: trigonal },
+      { ...chromium, field: trigonal, labelGroup: 'C3' },
+      { ...chromium, field: trigonal, labelGroup: 'C4v' },
+    ]);
+    expect(own!.levels![0]).toMatchObject({ degeneracy: 4, multiplicity: 4, label: 'A2g' });
+    expect(asked!.levels![0]).toMatchObject({ degeneracy: 4, multiplicity: 4, label: 'A' });
+    expect(foreign!.levels!.every(({ label }) => label === null)).toBe(true);
+  });
+
+  it('accounts for each level on request: 4T2g of d3 from 4F, one electron from t2g to eg', async () => {
+    const [answer] = await run([chromium], 'account');
+    const band = answer!.levels!.find(({ multiplicity, label }) => multiplicity === 4 && label === 'T2g');
+    expect(band).toMatchObject({
+      electronJump: 1,
+      freeIon: [{ label: '4F', weight: expect.closeTo(1, 9) as number }],
+      cubic: [{ label: '4T2g' }],
+      configurations: [{ configuration: 't2g^2 eg^1', weight: expect.closeTo(1, 9) as number }],
+    });
+  });
+
   it('answers a bad entry with code and field and leaves the others alone', async () => {
     const ligand = { theta: 0, phi: 0, psi: 0, e_sigma: 1000, e_pi_x: 0, e_pi_y: 0 };
     const bad: [Record<string, unknown>, string, string][] = [
@@ -59,6 +83,7 @@ describe('levels', () => {
       [{ C: 'much' }, 'wrong-type', 'C'],
       [{ zeta: -5 }, 'out-of-range', 'zeta'],
       [{ field: undefined }, 'missing-field', 'field'],
+      [{ labelGroup: 'heptagon' }, 'unknown-field-value', 'labelGroup'],
       [{ field: { type: 'heptagon' } }, 'unknown-field-value', 'field.type'],
       [{ field: { type: 'oct', tenDq: Number.NaN } }, 'not-finite', 'field.tenDq'],
       [{ field: { type: 'aom', ligands: [] } }, 'missing-field', 'field.ligands'],
