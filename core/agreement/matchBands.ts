@@ -19,18 +19,20 @@ function namedTerms(assignment: string | null): { term: string; parent: string |
 
 const isDd = (kind: string): boolean => kind === 'spin-allowed' || kind === 'spin-forbidden';
 
-/** The predicted bands that bear the name a measured band is assigned to; the upper one where the parent term is P. */
+/**
+ * For each term named in the assignment the lowest predicted band of that name, or the one above it where the parent term
+ * is P. An envelope over several terms has several.
+ */
 function byName(measured: MeasuredBand, bands: readonly Band[]): Band[] {
-  for (const { term, parent } of namedTerms(measured.assignment)) {
+  return namedTerms(measured.assignment).flatMap(({ term, parent }) => {
     const bare = term.replace(/[gu]$/, '');
     const named = bands.filter(
       ({ label, kind }) => kind === measured.kind && label.replace(/[gu]$/, '') === bare,
     );
-    if (named.length === 0) continue;
-    if (parent === 'P' && named.length > 1) return named.slice(1);
-    return named;
-  }
-  return [];
+    const [lowest, upper] = named;
+    if (lowest === undefined) return [];
+    return [parent === 'P' && upper !== undefined ? upper : lowest];
+  });
 }
 
 const nearest = (energy: number, bands: readonly Band[]): Band | undefined =>
@@ -51,14 +53,11 @@ export function matchBands(measured: readonly MeasuredBand[], predicted: readonl
   const sorted = measured.filter(({ kind }) => isDd(kind)).toSorted((a, b) => a.energy_cm1 - b.energy_cm1);
   return sorted.flatMap((band): BandPair[] => {
     const free = predicted.filter((each) => !taken.has(each));
-    const named = byName(band, free);
-    const partner =
-      named.length > 0
-        ? named[0]
-        : nearest(
-            band.energy_cm1,
-            free.filter(({ kind }) => kind === band.kind),
-          );
+    // Components of one split level share the band that stands for it.
+    const first = byName(band, free);
+    const named = first.length > 0 ? first : byName(band, predicted);
+    const alike = free.filter(({ kind }) => kind === band.kind);
+    const partner = nearest(band.energy_cm1, named.length > 0 ? named : alike);
     if (partner === undefined) return [];
     taken.add(partner);
     return [{ measured: band, predicted: partner }];

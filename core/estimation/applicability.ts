@@ -1,3 +1,4 @@
+import { isomersOfComposition } from '../geometry/ligandSites';
 import type { IonRecord, LigandRecord, ParameterLibrary } from '../library';
 import type { Composition } from '../record/composition';
 import { jahnTellerExpectation } from './jahnTeller';
@@ -9,6 +10,9 @@ const flag = (code: string, severity: Flag['severity'], message: string): Flag =
   severity,
   message,
 });
+
+/** f from which an acceptor other than a diimine or carbon donor is counted among the strong ones, as nitrite is. */
+const strongAcceptor = 1.3;
 
 const isDiimine = ({ piCharacter, denticity, donorAtoms }: LigandRecord): boolean =>
   piCharacter === 'acceptor' && denticity >= 2 && donorAtoms.every((atom) => atom === 'N');
@@ -52,6 +56,16 @@ function acceptorFlags(ion: IonRecord, ligands: readonly LigandRecord[]): Flag[]
     );
   } else if (diimines.length > 0) {
     flags.push(flag('pi-acceptor', 'caution', `${names(diimines)} is a π acceptor: f depends on the metal.`));
+  }
+  const strong = others.filter(({ f }) => (f.value ?? 0) >= strongAcceptor);
+  if (strong.length > 0 && electronRich) {
+    flags.push(
+      flag(
+        'pi-acceptor-divalent',
+        'invalid',
+        `${names(strong)} on ${ion.ion}: back donation is outside the model; the spin state is not to be trusted.`,
+      ),
+    );
   }
   if (others.some(({ donorAtoms }) => donorAtoms.some((atom) => atom === 'P' || atom === 'As'))) {
     flags.push(
@@ -108,18 +122,19 @@ export function applicabilityFlags(
   library: ParameterLibrary,
 ): Flag[] {
   const ligands = parts.map(({ ligand }) => ligand);
+  const isomers = isomersOfComposition(composition, library);
   const flags = [...ligandFlags(ligands), ...acceptorFlags(ion, ligands)];
   if (!library.ions.has(ion.ion)) {
     flags.push(
       flag('unlisted-ion', 'caution', `${ion.ion} is not in the tables; only its d count is known.`),
     );
   }
-  if (ion.dElectrons === 0 || ion.dElectrons === 10) {
+  if (isomers.length === 0) {
     flags.push(
       flag(
-        'no-d-d-bands',
-        'note',
-        `d${ion.dElectrons}: no d-d bands; any colour is charge transfer or the ligand's own.`,
+        'chelate-span',
+        'caution',
+        `A chelate of this set cannot span ${composition.geometry} places without strain.`,
       ),
     );
   }
@@ -136,6 +151,16 @@ export function applicabilityFlags(
   if (tenDq.route === 'donor-class' || tenDq.route === 'series-place') {
     flags.push(
       flag('analogy', 'caution', '10Dq rests on analogy, not on a published value; its range is wide.'),
+    );
+  }
+  if ((composition.isomer ?? null) === null && isomers.length > 1) {
+    const named = isomers.flatMap(({ name }) => name ?? []);
+    flags.push(
+      flag(
+        'isomer-not-named',
+        'note',
+        `This set has ${isomers.length} isomers (${named.slice(0, 4).join(', ')}); none is named, so the answer is for their common mean.`,
+      ),
     );
   }
   if (parts.length > 1) {

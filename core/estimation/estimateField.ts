@@ -1,4 +1,11 @@
-import { findIon, type IonRecord, type LigandRecord, type ParameterLibrary } from '../library';
+import {
+  complexKey,
+  findIon,
+  type IonRecord,
+  type LigandRecord,
+  type ParameterLibrary,
+  type SourcedValue,
+} from '../library';
 import type { Composition } from '../record/composition';
 import type { CubicGeometry } from '../dshell/types';
 import { defaultDoubts } from './defaultDoubts';
@@ -92,6 +99,16 @@ function ofGeometry(octahedral: Estimate, composition: Composition, ion: IonReco
   return octahedral;
 }
 
+/** A value measured on this very complex, from the record: it beats every estimate. */
+function measuredHere(value: SourcedValue | undefined, composition: Composition): Estimate | null {
+  if (value?.value == null) return null;
+  const sigma = value.sigma ?? value.value * defaultDoubts.anchor.medium;
+  const shares = [{ cause: `measured:${complexKey(composition)}`, sigma }];
+  return estimate(value.value, shares, 'measured-complex', [
+    { kind: 'source', text: `measured on this complex: ${value.source}` },
+  ]);
+}
+
 function zetaOf(ion: IonRecord): Estimate {
   if (ion.zeta0.value === null) return notEstimated(`no spin-orbit parameter of ${ion.ion} is on file`);
   const value = ion.zeta0.value * 0.85;
@@ -117,11 +134,13 @@ export function estimateField(composition: Composition, library: ParameterLibrar
   const others = oxoCation ? parts.filter(({ ligand }) => ligand.id !== 'oxo') : parts;
   const { tenDq, donors } = averageStrength(others, ion, composition.geometry, library);
   const noField = ion.dElectrons === 0 || ion.dElectrons === 10;
+  const known = library.complexes.get(complexKey(composition));
   const base = noField
     ? notEstimated(`a d${ion.dElectrons} ion has no transitions within the d shell`)
-    : ofGeometry(tenDq, composition, ion);
+    : (measuredHere(known?.tenDq, composition) ?? ofGeometry(tenDq, composition, ion));
   const sixfold = composition.geometry === 'octahedral' || composition.geometry === 'tetragonal';
-  const two = sixfold && !oxoCation ? spinFields(base, ion, parts) : null;
+  // A measured 10Dq belongs to the spin state it was measured in: there is nothing to scale.
+  const two = known?.tenDq === undefined && sixfold && !oxoCation ? spinFields(base, ion, parts) : null;
   const racah = racahParameters(ion, parts, composition.geometry, library);
   return {
     ion,
@@ -131,8 +150,8 @@ export function estimateField(composition: Composition, library: ParameterLibrar
     donors,
     fields: two ?? { high: base, low: base, middle: base },
     twoDistances: two !== null,
-    racahB: racah.B,
-    racahC: racah.C,
+    racahB: measuredHere(known?.B, composition) ?? racah.B,
+    racahC: measuredHere(known?.C, composition) ?? racah.C,
     zeta: zetaOf(ion),
     flags: applicabilityFlags(composition, ion, parts, base, library),
     leftOut: leftOutOf(composition, ion),

@@ -62,13 +62,15 @@ interface Neighbour {
 }
 
 /**
- * The nearest ions with a k on either side along the row, of the same charge, weighed by how near they are; of another
- * row where there is none in its own.
+ * The nearest ions with a k on either side along the row, of the same charge (else of the nearest), weighed by how near
+ * they are; of another row where there is none in its own.
  */
 function neighbours(ion: IonRecord, library: ParameterLibrary): Neighbour[] {
-  const alike = [...library.ions.values()].filter(
-    (other) => other.k.value !== null && other.oxidationState === ion.oxidationState,
-  );
+  const known = [...library.ions.values()].filter((other) => other.k.value !== null);
+  const charges = [...new Set(known.map(({ oxidationState }) => oxidationState))];
+  const away = (charge: number): number => Math.abs(charge - ion.oxidationState);
+  const charge = charges.toSorted((a, b) => away(a) - away(b))[0];
+  const alike = known.filter(({ oxidationState }) => oxidationState === charge);
   const row = alike.filter(({ period }) => period === ion.period);
   const used = row.length > 0 ? row : alike;
   const nearest = (side: readonly IonRecord[]): IonRecord | undefined =>
@@ -109,7 +111,7 @@ export function metalCovalency(ion: IonRecord, library: ParameterLibrary): Facto
     reasons: [
       {
         kind: 'assumption',
-        text: `no k is in print for ${ion.ion}; ${value.toFixed(2)} after ${near.map(({ ion: other }) => other.ion).join(' and ')}, its neighbours of like charge`,
+        text: `no k is in print for ${ion.ion}; ${value.toFixed(2)} after ${near.map(({ ion: other }) => other.ion).join(' and ')}, its neighbours`,
       },
     ],
   };

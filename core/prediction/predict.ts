@@ -20,6 +20,7 @@ import {
   type FieldLevel,
   type Flag,
 } from '../estimation';
+import { isomersOfComposition } from '../geometry/ligandSites';
 import { spinState, type SpinAnswer } from '../spin';
 import {
   colourAtThreeStrengths,
@@ -230,7 +231,9 @@ export function predictMany(
   const placeOf = options.placeOf ?? ((index: number) => `[${index}]`);
   return inputs.map((input, index): PredictionOutcome => {
     if (wrong !== null) return { ok: false, id: idOf(input), problems: [wrong] };
-    const checked = checkCandidate(input, { library, place: placeOf(index) });
+    const isomersOf = (composition: Composition): string[] =>
+      isomersOfComposition(composition, library).flatMap(({ name }) => name ?? []);
+    const checked = checkCandidate(input, { library, place: placeOf(index), isomersOf });
     if (!checked.ok) return { ok: false, id: idOf(input), problems: checked.problems };
     return { ok: true, prediction: predictChecked(checked.value, library, madeWith, options) };
   });
