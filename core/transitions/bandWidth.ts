@@ -3,9 +3,9 @@ import { thermalWidth } from './vibration';
 /** Line width left where the level does not move with 10Dq, cm⁻¹. */
 const lineWidth_cm1 = 120;
 /** Width of a band of slope 1 at 10Dq = 15 000 cm⁻¹ and room temperature, cm⁻¹. */
-const unitWidth_cm1 = 3000;
+const unitWidth_cm1 = 3300;
 /** Slopes beyond this (jumps of two electrons) are not followed: their bands were never resolved so wide. */
-const steepest = 1.4;
+const steepest = 1.25;
 
 export interface WidthParts {
   /** Derivative of the energy with respect to 10Dq. */

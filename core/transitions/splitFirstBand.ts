@@ -60,7 +60,8 @@ export function splitFirstBand(context: DdContext, band: Band): Band[] {
   }
   return components.map(({ shift_cm1, count, plane }) => {
     const energy_cm1 = band.energy_cm1 + slope * shift_cm1;
-    const molarAbsorptivity = roundAbsorptivity((band.molarAbsorptivity * count) / 2);
+    // Not in proportion to its share: in trans-[Cr(en)2Cl2]+ both components are equally strong.
+    const molarAbsorptivity = roundAbsorptivity(band.molarAbsorptivity * Math.sqrt(count / 2));
     return {
       ...band,
       energy_cm1,

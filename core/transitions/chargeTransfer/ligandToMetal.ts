@@ -4,6 +4,7 @@ import type { GroundState } from '../groundState';
 import type { Band } from '../types';
 import { acceptors, type Acceptor } from './acceptor';
 import { ctBand, ctSigma_cm1 } from './ctBand';
+import { donorOrbitals, type DonorOrbital } from './donorOrbitals';
 import {
   ligandElectronegativity,
   metalElectronegativity,
@@ -15,13 +16,8 @@ import { spinPairingParameter } from './spinPairing';
 /** Energy of one unit of optical electronegativity (C. K. Jorgensen), cm⁻¹. */
 export const perUnit_cm1 = 30_000;
 
-/** σ orbitals of the halides lie this much below their π orbitals (F 4.4 and 3.9, Cl 3.4 and 3.0, Br 3.3 and 2.8). */
-const sigmaBelowPi = 0.45;
-/** Second band of the tetraoxo anions of d0 metals above the first: 26 900 and 36 500 in chromate, cm⁻¹. */
-const secondOfOxo_cm1 = 9600;
-
-/** Bands beyond this lie outside the range shown, cm⁻¹. */
-const highest_cm1 = 60_000;
+/** Bands outside these are not shown, cm⁻¹. */
+const [lowest_cm1, highest_cm1] = [3000, 60_000] as const;
 
 /** nu = 30 000 (chi of the ligand - chi of the metal) + 10Dq for the upper shell + spin-pairing term, cm⁻¹. */
 export const ligandToMetalEnergy = (
@@ -39,115 +35,91 @@ export interface LigandToMetal {
 
 interface Donor {
   readonly name: string;
-  readonly halide: boolean;
-  readonly oxo: boolean;
   readonly places: number;
   readonly chi: Electronegativity;
 }
 
-interface Metal {
+/** Where the electron goes, with everything the metal adds to the energy. */
+interface Place {
   readonly name: string;
   readonly chi: MetalElectronegativity;
-  /** D, cm⁻¹; null where B or C is not estimated. */
-  readonly D: number | null;
-  readonly even: string;
-  readonly planar: boolean;
+  readonly fieldTerm_cm1: number;
+  readonly pairingTerm_cm1: number;
 }
 
-/** A π level hits the metal weakly, a σ level and the upper shell strongly; strength grows with the number of donors. */
-const weak = 3500;
-const strong = 14_000;
-const width_cm1 = 5000;
-
-function bandInto(
-  donor: Donor,
-  metal: Metal,
-  acceptor: Acceptor,
-  orbital: 'π' | 'σ',
-  first: boolean,
-): Band | null {
-  const { chi } = metal;
-  if (chi.needsSpinPairing && metal.D === null) return null;
-  const pairing = chi.needsSpinPairing ? acceptor.pairing * metal.D! : 0;
-  const ligandChi = donor.chi.value + (orbital === 'σ' ? sigmaBelowPi : 0);
-  const energy = ligandToMetalEnergy(ligandChi, chi.value, acceptor.fieldTerm_cm1, pairing);
-  if (energy > highest_cm1 || energy < 3000) return null;
-  const analogy = donor.chi.analogy || chi.analogy;
-  return ctBand({
-    kind: 'LMCT',
-    energy_cm1: energy,
-    sigma_cm1: analogy ? ctSigma_cm1.analogy : ctSigma_cm1.own,
-    label: `${donor.name} ${orbital} -> ${metal.name} (${metal.planar ? 'x2-y2' : `${acceptor.shell}${metal.even}`})`,
-    molarAbsorptivity: (first && orbital === 'π' ? weak : strong) * Math.sqrt(donor.places / 6),
-    width_cm1,
-    rule: 'ligand to metal',
-    ...(acceptor.fieldTerm_cm1 > 0 ? { slopeTenDq: 1 } : {}),
-    reasons: [
-      'nu = 30 000 (chi ligand - chi metal), C. K. Jorgensen; solvent and ion pairing not included',
-      chi.reason,
-      donor.chi.reason,
-      ...(acceptor.fieldTerm_cm1 > 0 ? ['10Dq added for the upper shell'] : []),
-      ...(chi.needsSpinPairing ? ['spin-pairing term added, as this value of the metal asks for'] : []),
-      ...(analogy ? ['by analogy: only good to 5000 cm-1'] : []),
-    ],
-  });
-}
-
-function bandsOfDonor(donor: Donor, metal: Metal, places: readonly Acceptor[]): Band[] {
-  const pairing = (acceptor: Acceptor): number =>
-    acceptor.fieldTerm_cm1 + (metal.chi.needsSpinPairing ? acceptor.pairing * (metal.D ?? 0) : 0);
-  const [lowest, next] = places.toSorted((a, b) => pairing(a) - pairing(b));
-  if (lowest === undefined) return [];
-  const bands = [bandInto(donor, metal, lowest, 'π', true)];
-  if (next !== undefined) bands.push(bandInto(donor, metal, next, 'π', false));
-  if (donor.halide) bands.push(bandInto(donor, metal, lowest, 'σ', false));
-  return bands.filter((band) => band !== null);
-}
-
-/** d0 ions have no 10Dq on file: the second band of oxo anions is put where chromate has it. */
-function secondOxo(first: Band): Band {
-  return ctBand({
-    kind: 'LMCT',
-    energy_cm1: first.energy_cm1 + secondOfOxo_cm1,
-    sigma_cm1: 4000,
-    label: `${first.label}, second`,
-    molarAbsorptivity: first.molarAbsorptivity,
-    width_cm1,
-    rule: 'ligand to metal',
-    reasons: [...first.reasons, 'second band as far above the first as in chromate (9600 cm-1)'],
-  });
-}
-
-/** LMCT bands of every kind of donor, lowest first, by optical electronegativities. */
-export function ligandToMetalBands(input: BandInput, ground: GroundState): LigandToMetal {
-  const { ion, ligands, geometry, racahB, racahC, library = defaultLibrary } = input;
-  const chi = metalElectronegativity(ion, geometry);
-  const donating = ligands.filter(({ ligand }) =>
-    ['LMCT', 'both', 'mixed'].includes(ligand.chargeTransfer.hides),
-  );
-  if (ion.dElectrons === 10) return { bands: [], withoutNumber: [] };
-  if (chi === null) {
-    return { bands: [], withoutNumber: donating.map(({ ligand }) => ligand.commonName) };
-  }
+/** The places in order of energy. The uncorrected column holds the pairing of the lower shell already. */
+function placesOf(input: BandInput, ground: GroundState, chi: MetalElectronegativity): Place[] | null {
+  const { ion, geometry, racahB, racahC, tenDq } = input;
   const tetrahedral = geometry === 'tetrahedral';
-  const metal: Metal = {
-    name: ion.symbol,
-    chi,
-    D:
-      racahB.value === null || racahC.value === null
-        ? null
-        : spinPairingParameter(racahB.value, racahC.value),
-    even: tetrahedral ? '' : 'g',
-    planar: geometry === 'square-planar',
-  };
-  const places = acceptors({
+  const D =
+    racahB.value === null || racahC.value === null ? null : spinPairingParameter(racahB.value, racahC.value);
+  if (chi.needsSpinPairing && D === null) return null;
+  const shells = acceptors({
     dElectrons: ion.dElectrons,
     t2: ground.t2,
     e: ground.e,
     multiplicity: ground.multiplicity,
-    tenDq: input.tenDq.value,
+    tenDq: tenDq.value,
     tetrahedral,
   });
+  const counted = chi.needsSpinPairing ? 0 : (shells[0]?.pairing ?? 0);
+  const shellName = ({ shell }: Acceptor): string =>
+    geometry === 'square-planar' ? 'x2-y2' : `${shell}${tetrahedral ? '' : 'g'}`;
+  return shells
+    .map((acceptor) => ({
+      name: `${ion.symbol} (${shellName(acceptor)})`,
+      chi,
+      fieldTerm_cm1: acceptor.fieldTerm_cm1,
+      pairingTerm_cm1: (acceptor.pairing - counted) * (D ?? 0),
+    }))
+    .sort((a, b) => a.fieldTerm_cm1 + a.pairingTerm_cm1 - (b.fieldTerm_cm1 + b.pairingTerm_cm1));
+}
+
+function bandInto(donor: Donor, orbital: DonorOrbital, place: Place): Band[] {
+  const { chi, fieldTerm_cm1, pairingTerm_cm1 } = place;
+  const energy_cm1 = ligandToMetalEnergy(
+    donor.chi.value + orbital.below,
+    chi.value,
+    fieldTerm_cm1,
+    pairingTerm_cm1,
+  );
+  if (energy_cm1 > highest_cm1 || energy_cm1 < lowest_cm1) return [];
+  const analogy = donor.chi.analogy || chi.analogy;
+  return [
+    ctBand({
+      kind: 'LMCT',
+      energy_cm1,
+      sigma_cm1: Math.hypot(analogy ? ctSigma_cm1.analogy : ctSigma_cm1.own, orbital.sigma_cm1),
+      label: `${donor.name} ${orbital.name} -> ${place.name}`,
+      molarAbsorptivity: orbital.molarAbsorptivity * Math.sqrt(donor.places / 6),
+      width_cm1: orbital.width_cm1,
+      rule: 'ligand to metal',
+      ...(fieldTerm_cm1 > 0 ? { slopeTenDq: 1 } : {}),
+      reasons: [
+        'nu = 30 000 (chi ligand - chi metal), C. K. Jorgensen; solvent and ion pairing not included',
+        chi.reason,
+        donor.chi.reason,
+        ...(orbital.reason === null ? [] : [orbital.reason]),
+        ...(fieldTerm_cm1 > 0 ? ['10Dq added for the upper shell'] : []),
+        ...(chi.needsSpinPairing ? ['spin-pairing term added, as this value of the metal asks for'] : []),
+        ...(analogy ? ['by analogy: only good to 5000 cm-1'] : []),
+      ],
+    }),
+  ];
+}
+
+/** LMCT bands of every kind of donor, lowest first, by optical electronegativities. */
+export function ligandToMetalBands(input: BandInput, ground: GroundState): LigandToMetal {
+  const { ion, ligands, geometry, library = defaultLibrary } = input;
+  if (ion.dElectrons === 10) return { bands: [], withoutNumber: [] };
+  const donating = ligands.filter(({ ligand }) =>
+    ['LMCT', 'both', 'mixed'].includes(ligand.chargeTransfer.hides),
+  );
+  const chi = metalElectronegativity(ion, geometry);
+  const places = chi === null ? null : placesOf(input, ground, chi);
+  if (places === null || places.length === 0) {
+    return { bands: [], withoutNumber: donating.map(({ ligand }) => ligand.commonName) };
+  }
   const withoutNumber: string[] = [];
   const bands = ligands.flatMap(({ ligand, count }) => {
     const ligandChi = ligandElectronegativity(ligand, library);
@@ -157,13 +129,19 @@ export function ligandToMetalBands(input: BandInput, ground: GroundState): Ligan
     }
     const donor: Donor = {
       name: ligand.abbreviation,
-      halide: ligand.class === 'halide',
-      oxo: ligand.id === 'oxo',
       places: count * ligand.denticity,
       chi: ligandChi,
     };
-    const own = bandsOfDonor(donor, metal, places);
-    return donor.oxo && ion.dElectrons === 0 && own[0] !== undefined ? [...own, secondOxo(own[0])] : own;
+    return donorOrbitals(ligand, geometry, ion.dElectrons).flatMap((orbital) =>
+      places
+        .slice(0, orbital.places)
+        .flatMap((place, index) =>
+          bandInto(donor, index === 0 ? orbital : { ...orbital, ...intoUpperShell }, place),
+        ),
+    );
   });
   return { bands: bands.sort((a, b) => a.energy_cm1 - b.energy_cm1), withoutNumber };
 }
+
+/** The upper shell points at the donors: its bands are strong and broad whatever orbital the electron leaves. */
+const intoUpperShell = { molarAbsorptivity: 14_000, width_cm1: 5000 } as const;

@@ -18,6 +18,8 @@ export interface MetalElectronegativity extends Electronegativity {
 /** What is added for an ion or ligand without a value in the library, each from one measured band. */
 const fromOneBand: Readonly<Record<string, { readonly value: number; readonly from: string }>> = {
   oxo: { value: 3.2, from: 'the value that the figures of the d0 oxo anions in the library rest on' },
+  ono_o: { value: 2.57, from: 'the 30 300 cm-1 band of [Co(NH3)5(ONO)]2+ (from memory)' },
+  no2_n: { value: 2.57, from: 'its linkage isomer in [Co(NH3)5(ONO)]2+, 30 300 cm-1 (from memory)' },
   cn: {
     value: 2.9,
     from: 'the 23 800 cm-1 band of [Fe(CN)6]3- (J. J. Alexander and H. B. Gray 1968, from memory)',

@@ -12,8 +12,15 @@ export const borrowing = (band_cm1: number, edge_cm1: number): number =>
 /** Where the edge is taken to be for ions and ligands of which nothing is known, cm⁻¹. */
 const usualEdge_cm1 = 50_000;
 
-/** The same held within what is seen (0.6 to 2 times); twice for a band at or above the edge. */
+/**
+ * Share of the intensity that follows it. Most comes from elsewhere: second bands of Cr(III) and Co(III) are about as
+ * strong as the first, though they lie nearer to the edge.
+ */
+const borrowedShare = 0.2;
+
+/** Gain of a d-d band from charge transfer, between 0.7 and 2; 2 at or above the edge. */
 export function chargeTransferGain(band_cm1: number, edge_cm1: number | null): number {
   const edge = edge_cm1 ?? usualEdge_cm1;
-  return edge - band_cm1 < 3000 ? 2 : Math.max(0.6, Math.min(2, borrowing(band_cm1, edge)));
+  if (edge - band_cm1 < 3000) return 2;
+  return Math.max(0.7, Math.min(2, 1 - borrowedShare + borrowedShare * borrowing(band_cm1, edge)));
 }
