@@ -1,15 +1,15 @@
-import { cubicLevels } from '../../core/dshell';
-import { linesFromLevels, type LevelLine } from '../plots/levelDiagram/levelLine';
+import { computedLines } from '../plots/levelDiagram/computedLines';
+import { type LevelLine } from '../plots/levelDiagram/levelLine';
 import type { DiagramRequest } from './protocol';
 
 const columns = 73;
 
-/** Levels at equal steps of the field, joined into lines. */
+/** Levels along the field, joined into lines. */
 export function diagramLines({ dElectrons, geometry, B, C, upTo, axes }: DiagramRequest): LevelLine[] {
-  const scale = axes === 'over-B' && B > 0 ? 1 / B : 1;
-  const computed = Array.from({ length: columns }, (_, step) => {
-    const tenDq = (upTo * step) / (columns - 1);
-    return { x: tenDq * scale, levels: cubicLevels({ dElectrons, geometry, tenDq, B, C }) };
+  const overB = axes === 'over-B' && B > 0;
+  return computedLines({
+    ...{ dElectrons, geometry, B, C, count: columns },
+    axes: overB ? 'over-B' : 'absolute',
+    upTo: overB ? upTo / B : upTo,
   });
-  return linesFromLevels(computed, scale);
 }

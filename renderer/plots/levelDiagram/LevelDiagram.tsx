@@ -74,7 +74,7 @@ export function LevelDiagram(props: LevelDiagramProps) {
         ys: line.points.map(({ y }) => y),
         text: (index) => {
           const { x, y } = line.points[index]!;
-          return `${spokenTerm(line.label)}${line.id.slice(line.label.length)}: ${said(y)} at ${xName} ${said(x)}`;
+          return `${ordinalOf(line)}${spokenTerm(line.label)}: ${said(y)} at ${xName} ${said(x)}`;
         },
       }))}
       table={{
@@ -151,12 +151,18 @@ export function LevelDiagram(props: LevelDiagramProps) {
             })}
             {place && <CandidateMark view={view} place={place} lines={visible} />}
           </PlotClip>
-          <GroundLevels view={view} crossovers={crossovers} only={ground} />
+          {view.y.domain[0] === 0 && <GroundLevels view={view} crossovers={crossovers} only={ground} />}
           <LevelLabels view={view} lines={visible} />
         </PlotSvg>
       )}
     </Plot>
   );
+}
+
+/** `2nd ` for the second level of its label from below; nothing for the only one. */
+function ordinalOf({ id, label }: LevelLine): string {
+  const place = Number(id.slice(label.length).replace(' #', ''));
+  return place === 0 ? '' : `${place}${['st', 'nd', 'rd'][place - 1] ?? 'th'} `;
 }
 
 /** One multiplicity always stays. */

@@ -1,6 +1,6 @@
 import { afterEach, describe, expect, it } from 'vitest';
 import { cleanup, fireEvent, render, screen } from '@testing-library/react';
-import { type CubicLevel } from '../../../core/dshell/types';
+import { groundCrossovers, type CubicLevel } from '../../../core/dshell';
 import { UnitProvider } from '../../parts/number';
 import { computedLines } from './computedLines';
 import { fittingLabels, labelPlaces } from './labelPlaces';
@@ -117,6 +117,24 @@ describe('computed lines', () => {
     });
     const [crossover] = crossoversOf(lines);
     expect(crossover!.x).toBeCloseTo(expected, 1);
+  });
+
+  it('have a point at the kink itself', () => {
+    const lines = computedLines({
+      ...{
+        dElectrons: 6,
+        geometry: 'octahedral',
+        B: 800,
+        C: 3_600,
+        axes: 'absolute',
+        upTo: 30_000,
+        count: 7,
+      },
+    });
+    expect(lines[0]!.points).toHaveLength(8);
+    const [one, ...more] = crossoversOf(lines);
+    expect(more).toHaveLength(0);
+    expect(one!.x / 800).toBeCloseTo(groundCrossovers(6, 4.5)[0]!.tenDqOverB, 6);
   });
 
   it('start from the terms of the free ion and never fall below the ground level', () => {

@@ -68,10 +68,11 @@ export function crossoversOf(lines: readonly LevelLine[]): Crossover[] {
     // Difference of the two levels: negative before, positive after.
     const gap = (at: number): number => before.points[at]!.y - after.points[at]!.y;
     const [first, last] = [gap(column - 1), gap(column)];
-    if (Math.abs(first) < 1e-9 || last === first) continue;
     const [left, right] = [before.points[column - 1]!.x, before.points[column]!.x];
+    // Without a field the levels of one free-ion term coincide; that is no crossover.
+    if (last === first || (left === 0 && Math.abs(first) < 1e-6)) continue;
     crossovers.push({
-      x: left - (first / (last - first)) * (right - left),
+      x: left + Math.max(0, Math.min(1, -first / (last - first))) * (right - left),
       from: before.label,
       to: after.label,
     });
