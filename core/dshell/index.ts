@@ -4,7 +4,8 @@ export { groundCrossovers, type GroundCrossover, type GroundLevelName } from './
 export { type AngularOverlapLigand, type FieldSpec } from './field/fieldSpec';
 export { type FieldMatrix } from './field/tensorComponents';
 export { fieldMatrix } from './field/fieldMatrix';
-export { fieldFrame, turnedField, type FieldFrame } from './field/fieldFrame';
+export { fieldFrame, type FieldFrame } from './field/fieldFrame';
+export { turnedField } from './field/symmetryAxes';
 export { type LevelProblem, type ZeemanTerm } from './problem';
 export { levels, type Level, type LevelList, type LevelOptions } from './levels/levels';
 export { labelGroups, type LabelGroup } from './levels/labelGroup';

@@ -22,44 +22,49 @@ export interface FieldComponent {
   readonly part: 're' | 'im';
 }
 
-/** ⟨m|V|m′⟩ for m, m′ = 2 … −2. */
-function overMagneticNumbers(V: FieldMatrix): { re: number[][]; im: number[][] } {
-  const re: number[][] = [];
-  const im: number[][] = [];
-  for (let i = 0; i < 5; i++) {
-    re.push([0, 0, 0, 0, 0]);
-    im.push([0, 0, 0, 0, 0]);
-    for (let j = 0; j < 5; j++) {
-      for (let a = 0; a < 5; a++) {
-        for (let b = 0; b < 5; b++) {
-          const [xr, xi] = [realOrbitals.re[i]![a]!, realOrbitals.im[i]![a]!];
-          const [yr, yi] = [realOrbitals.re[j]![b]!, -realOrbitals.im[j]![b]!];
-          re[i]![j]! += V[a]![b]! * (xr * yr - xi * yi);
-          im[i]![j]! += V[a]![b]! * (xr * yi + xi * yr);
-        }
+/**
+ * Weights of the 25 elements of V in v_kq = (2k + 1) Σ_m (−1)^{2−m} (2 k 2; −m q m−q) ⟨m|V|m−q⟩ (orthogonality of the 3j
+ * symbols), real and imaginary part.
+ */
+function componentWeights(k: number, q: number): { re: Float64Array; im: Float64Array } {
+  const re = new Float64Array(25);
+  const im = new Float64Array(25);
+  for (let m = Math.max(-2, q - 2); m <= Math.min(2, q + 2); m++) {
+    const geometry = (2 * k + 1) * parity(2 - m) * threeJ(2, k, 2, -m, q, m - q);
+    for (let a = 0; a < 5; a++) {
+      for (let b = 0; b < 5; b++) {
+        const [xr, xi] = [realOrbitals.re[2 - m]![a]!, realOrbitals.im[2 - m]![a]!];
+        const [yr, yi] = [realOrbitals.re[2 - m + q]![b]!, -realOrbitals.im[2 - m + q]![b]!];
+        re[5 * a + b]! += geometry * (xr * yr - xi * yi);
+        im[5 * a + b]! += geometry * (xr * yi + xi * yr);
       }
     }
   }
   return { re, im };
 }
 
-/** Splits a field into its tensor components (orthogonality of the 3j symbols). Ranks 0, 2 and 4 are all a real field has. */
-export function fieldTensors(V: FieldMatrix): FieldTensors {
-  const { re, im } = overMagneticNumbers(V);
-  const component = (part: readonly number[][], k: number, q: number): number => {
-    let sum = 0;
-    for (let m = -2; m <= 2; m++) {
-      const mPrime = m - q;
-      if (Math.abs(mPrime) > 2) continue;
-      sum += parity(2 - m) * threeJ(2, k, 2, -m, q, mPrime) * part[2 - m]![2 - mPrime]!;
-    }
-    return (2 * k + 1) * sum;
-  };
-  const list = (part: readonly number[][], k: number): number[] =>
-    Array.from({ length: k + 1 }, (_, q) => component(part, k, q));
-  return {
-    trace: V.reduce((sum, row, a) => sum + row[a]!, 0),
-    re: { 2: list(re, 2), 4: list(re, 4) },
-    im: { 2: list(im, 2), 4: list(im, 4) },
-  };
+const weights = {
+  2: [0, 1, 2].map((q) => componentWeights(2, q)),
+  4: [0, 1, 2, 3, 4].map((q) => componentWeights(4, q)),
+} as const;
+
+function weighed(V: FieldMatrix, weight: Float64Array): number {
+  let sum = 0;
+  for (let a = 0; a < 5; a++) {
+    const row = V[a]!;
+    for (let b = 0; b < 5; b++) sum += weight[5 * a + b]! * row[b]!;
+  }
+  return sum;
 }
+
+/** Splits a field into its tensor components. Ranks 0, 2 and 4 are all that a real field over d orbitals has. */
+export function fieldTensors(V: FieldMatrix): FieldTensors {
+  const part = (name: 're' | 'im') => ({
+    2: weights[2].map((weight) => weighed(V, weight[name])),
+    4: weights[4].map((weight) => weighed(V, weight[name])),
+  });
+  return { trace: fieldTrace(V), re: part('re'), im: part('im') };
+}
+
+export const fieldTrace = (V: FieldMatrix): number =>
+  V[0]![0]! + V[1]![1]! + V[2]![2]! + V[3]![3]! + V[4]![4]!;

@@ -1,4 +1,5 @@
-import { checkProblem, type LevelProblem } from '../problem';
+import { fieldTrace } from '../field/tensorComponents';
+import { checkProblem, type CheckedProblem, type LevelProblem } from '../problem';
 import { hasRows, naturalLabelGroup, rowLabel, rowsOf, type LabelGroup } from './labelGroup';
 import { solveBlocks, type BlockLevels } from './solveBlocks';
 
@@ -37,29 +38,30 @@ export interface LevelList {
  */
 export function levels(problem: LevelProblem, options: LevelOptions = {}): LevelList {
   const checked = checkProblem(problem);
-  const group = namingOf(problem, options);
+  const tetrahedral = problem.field.type === 'tet' || problem.field.type === 'cube';
+  const group = namingOf(checked, tetrahedral, options.labelGroup);
   const solved = solveBlocks(checked, group === null ? undefined : rowsOf[group]);
-  const spinOrbit = checked.zeta !== 0;
-  const raw = group === null ? [] : solved.flatMap((each) => namedLevels(each, group, spinOrbit));
-  const list = group === null ? groupedLevels(solved, options.tolerance) : raw;
+  const list =
+    group === null
+      ? groupedLevels(solved, options.tolerance)
+      : solved.flatMap((each) => namedLevels(each, group, checked.zeta !== 0));
   list.sort((a, b) => a.energy - b.energy || (b.multiplicity ?? 0) - (a.multiplicity ?? 0));
   const ground = list[0]!.energy;
-  const trace = checked.V.reduce((sum, row, a) => sum + row[a]!, 0);
   return {
     levels: list.map((level) => ({ ...level, energy: level.energy - ground })),
-    groundAbsolute: ground + (trace * checked.electrons) / 5,
+    groundAbsolute: ground + (fieldTrace(checked.V) * checked.electrons) / 5,
     labelGroup: group,
   };
 }
 
-function namingOf(problem: LevelProblem, { labelGroup }: LevelOptions): LabelGroup | null {
-  const checked = checkProblem(problem);
-  if (checked.zeeman !== null) return null;
-  if (labelGroup === undefined) {
-    const tetrahedral = problem.field.type === 'tet' || problem.field.type === 'cube';
-    return naturalLabelGroup(checked.V, tetrahedral);
-  }
-  return labelGroup !== null && hasRows(checked.V, rowsOf[labelGroup]) ? labelGroup : null;
+function namingOf(
+  { V, zeeman }: CheckedProblem,
+  tetrahedral: boolean,
+  wanted: LabelGroup | null | undefined,
+): LabelGroup | null {
+  if (zeeman !== null || wanted === null) return null;
+  if (wanted === undefined) return naturalLabelGroup(V, tetrahedral);
+  return hasRows(V, rowsOf[wanted]) ? wanted : null;
 }
 
 const multiplicityOf = ({ block }: BlockLevels): number | null => (block.S === null ? null : 2 * block.S + 1);

@@ -6,6 +6,7 @@ import { vectorGroup } from '../adaptation/species';
 import { assemble, type Parameters } from '../blocks/assemble';
 import { algebraWidth, completeBlock, symmetryBlocks, type SymmetryBlock } from '../blocks/symmetryBlocks';
 import { fieldFrame } from '../field/fieldFrame';
+import { fieldTrace } from '../field/tensorComponents';
 import { freeIon } from '../freeIon/reducedElements';
 import { magneticParameters } from '../levels/solveBlocks';
 import { checkProblem, hamiltonianParameters, type CheckedProblem, type LevelProblem } from '../problem';
@@ -48,7 +49,7 @@ export function solveStates(problem: LevelProblem): SolvedStates {
   raw.sort((a, b) => a.energy - b.energy);
   const { electrons, V } = checked;
   const count = raw.length;
-  const centre = (V.reduce((sum, row, a) => sum + row[a]!, 0) * electrons) / 5;
+  const centre = (fieldTrace(V) * electrons) / 5;
   const { terms } = freeIon(electrons);
   const re = new Float64Array(count * count);
   const im = new Float64Array(count * count);

@@ -1,4 +1,8 @@
 import { tridiagonalEigenvalues, tridiagonalEigenvectors } from './tridiagonal';
+import { scratchVectors } from './workspace';
+
+const reductionScratch = scratchVectors(4);
+const solutionScratch = scratchVectors(3);
 
 /**
  * Householder reduction of a Hermitian matrix to real tridiagonal form. `a` is row-major with real and imaginary part side
@@ -14,26 +18,29 @@ function reduce(
   scales: Float64Array,
   phases: Float64Array,
 ): void {
-  const u = new Float64Array(2 * n);
-  const p = new Float64Array(2 * n);
+  let [u, q, v, p] = reductionScratch(2 * n) as [Float64Array, Float64Array, Float64Array, Float64Array];
+  let pending = false;
   for (let i = n - 1; i > 0; i--) {
     const row = 2 * i * n;
+    if (pending) subtractFromRow(a, row, i, u, q);
     diagonal[i] = a[row + 2 * i]!;
     const lastRe = a[row + 2 * i - 2]!;
     const lastIm = -a[row + 2 * i - 1]!;
     let tail = 0;
     for (let k = 0; k < 2 * i - 2; k++) tail += a[row + k]! * a[row + k]!;
     const last = Math.hypot(lastRe, lastIm);
+    const phaseRe = last === 0 ? 1 : lastRe / last;
+    const phaseIm = last === 0 ? 0 : lastIm / last;
     if (tail === 0) {
       offDiagonal[i - 1] = last;
       scales[i] = 0;
-      phases[2 * i] = last === 0 ? 1 : lastRe / last;
-      phases[2 * i + 1] = last === 0 ? 0 : lastIm / last;
+      phases[2 * i] = phaseRe;
+      phases[2 * i + 1] = phaseIm;
+      if (pending) for (let j = 0; j < i; j++) subtractFromRow(a, 2 * j * n, j, u, q);
+      pending = false;
       continue;
     }
     const length = Math.sqrt(tail + last * last);
-    const phaseRe = last === 0 ? 1 : lastRe / last;
-    const phaseIm = last === 0 ? 0 : lastIm / last;
     offDiagonal[i - 1] = length;
     phases[2 * i] = -phaseRe;
     phases[2 * i + 1] = -phaseIm;
@@ -41,63 +48,89 @@ function reduce(
     a[row + 2 * i - 1] = -(lastIm + phaseIm * length);
     const h = length * (length + last);
     scales[i] = h;
-    for (let k = 0; k < i; k++) {
-      u[2 * k] = a[row + 2 * k]!;
-      u[2 * k + 1] = -a[row + 2 * k + 1]!;
+    for (let k = 0; k < 2 * i; k += 2) {
+      v[k] = a[row + k]!;
+      v[k + 1] = -a[row + k + 1]!;
+      p[k] = 0;
+      p[k + 1] = 0;
     }
-    multiplyLower(a, n, i, u, p);
-    let up = 0;
-    for (let k = 0; k < 2 * i; k++) up += u[k]! * p[k]!;
-    const shift = up / (2 * h * h);
-    for (let k = 0; k < 2 * i; k++) p[k] = p[k]! / h - shift * u[k]!;
-    subtractRankTwo(a, n, i, u, p);
+    if (!pending) {
+      u.fill(0, 0, 2 * i);
+      q.fill(0, 0, 2 * i);
+    }
+    updateAndMultiply(a, n, i, u, q, v, p);
+    let vp = 0;
+    for (let k = 0; k < 2 * i; k++) vp += v[k]! * p[k]!;
+    const shift = vp / (2 * h * h);
+    for (let k = 0; k < 2 * i; k++) p[k] = p[k]! / h - shift * v[k]!;
+    [u, v] = [v, u];
+    [q, p] = [p, q];
+    pending = true;
   }
+  if (pending) subtractFromRow(a, 0, 0, u, q);
   diagonal[0] = a[0]!;
   phases[0] = 1;
   phases[1] = 0;
   accumulatePhases(phases, n);
 }
 
-/** p = A u over the leading m × m part. */
-function multiplyLower(a: Float64Array, n: number, m: number, u: Float64Array, p: Float64Array): void {
-  p.fill(0, 0, 2 * m);
-  for (let j = 0; j < m; j++) {
-    const at = 2 * j * n;
-    const ur = u[2 * j]!;
-    const ui = u[2 * j + 1]!;
-    let sr = a[at + 2 * j]! * ur;
-    let si = a[at + 2 * j]! * ui;
-    for (let k = 0; k < 2 * j; k += 2) {
-      const xr = a[at + k]!;
-      const xi = a[at + k + 1]!;
-      const vr = u[k]!;
-      const vi = u[k + 1]!;
-      sr += xr * vr - xi * vi;
-      si += xr * vi + xi * vr;
-      p[k]! += xr * ur + xi * ui;
-      p[k + 1]! += xr * ui - xi * ur;
-    }
-    p[2 * j]! += sr;
-    p[2 * j + 1]! += si;
+/** Row j of A − q u† − u q† up to the diagonal. */
+function subtractFromRow(a: Float64Array, at: number, j: number, u: Float64Array, q: Float64Array): void {
+  const ur = u[2 * j]!;
+  const ui = u[2 * j + 1]!;
+  const qr = q[2 * j]!;
+  const qi = q[2 * j + 1]!;
+  for (let k = 0; k <= 2 * j; k += 2) {
+    const vr = u[k]!;
+    const vi = u[k + 1]!;
+    const wr = q[k]!;
+    const wi = q[k + 1]!;
+    a[at + k]! -= qr * vr + qi * vi + ur * wr + ui * wi;
+    a[at + k + 1]! -= qi * vr - qr * vi + ui * wr - ur * wi;
   }
 }
 
-/** A − q u† − u q† over the leading m × m part. */
-function subtractRankTwo(a: Float64Array, n: number, m: number, u: Float64Array, q: Float64Array): void {
+/** A ← A − q u† − u q† and p += A v in one pass over the leading m × m part. */
+function updateAndMultiply(
+  a: Float64Array,
+  n: number,
+  m: number,
+  u: Float64Array,
+  q: Float64Array,
+  v: Float64Array,
+  p: Float64Array,
+): void {
   for (let j = 0; j < m; j++) {
     const at = 2 * j * n;
-    const ur = u[2 * j]!;
-    const ui = u[2 * j + 1]!;
-    const qr = q[2 * j]!;
-    const qi = q[2 * j + 1]!;
-    for (let k = 0; k <= 2 * j; k += 2) {
-      const vr = u[k]!;
-      const vi = u[k + 1]!;
-      const wr = q[k]!;
-      const wi = q[k + 1]!;
-      a[at + k]! -= qr * vr + qi * vi + ur * wr + ui * wi;
-      a[at + k + 1]! -= qi * vr - qr * vi + ui * wr - ur * wi;
+    const end = 2 * j;
+    const ur = u[end]!;
+    const ui = u[end + 1]!;
+    const qr = q[end]!;
+    const qi = q[end + 1]!;
+    const vr = v[end]!;
+    const vi = v[end + 1]!;
+    const corner = a[at + end]! - 2 * (qr * ur + qi * ui);
+    a[at + end] = corner;
+    let sr = corner * vr;
+    let si = corner * vi;
+    for (let k = 0; k < end; k += 2) {
+      const xu = u[k]!;
+      const yu = u[k + 1]!;
+      const xq = q[k]!;
+      const yq = q[k + 1]!;
+      const re = a[at + k]! - (qr * xu + qi * yu + ur * xq + ui * yq);
+      const im = a[at + k + 1]! - (qi * xu - qr * yu + ui * xq - ur * yq);
+      a[at + k] = re;
+      a[at + k + 1] = im;
+      const xv = v[k]!;
+      const yv = v[k + 1]!;
+      sr += re * xv - im * yv;
+      si += re * yv + im * xv;
+      p[k]! += re * vr + im * vi;
+      p[k + 1]! += re * vi - im * vr;
     }
+    p[end]! += sr;
+    p[end + 1]! += si;
   }
 }
 
@@ -117,8 +150,8 @@ function accumulatePhases(phases: Float64Array, n: number): void {
  */
 export function hermitianEigenvalues(a: Float64Array, n: number, values = new Float64Array(n)): Float64Array {
   if (n === 0) return values;
-  const offDiagonal = new Float64Array(n);
-  reduce(a, n, values, offDiagonal, new Float64Array(n), new Float64Array(2 * n));
+  const [offDiagonal, scales, phases] = solutionScratch(2 * n) as [Float64Array, Float64Array, Float64Array];
+  reduce(a, n, values, offDiagonal, scales, phases);
   tridiagonalEigenvalues(values, offDiagonal, n);
   return values;
 }
@@ -134,9 +167,7 @@ export function hermitianEigensystem(
   const values = new Float64Array(n);
   const vectors = new Float64Array(2 * n * n);
   if (n === 0) return { values, vectors };
-  const offDiagonal = new Float64Array(n);
-  const scales = new Float64Array(n);
-  const phases = new Float64Array(2 * n);
+  const [offDiagonal, scales, phases] = solutionScratch(2 * n) as [Float64Array, Float64Array, Float64Array];
   reduce(a, n, values, offDiagonal, scales, phases);
   const real = new Float64Array(n * n);
   for (let i = 0; i < n; i++) real[i * n + i] = 1;

@@ -26,6 +26,9 @@ function splitFrom(from: number, size: number, diagonal: Float64Array, squares: 
   return m;
 }
 
+/** Below this a squared quantity is treated as zero, so that its reciprocal stays finite. */
+const tiny = 1e-290;
+
 /**
  * Eigenvalues of a symmetric tridiagonal matrix, ascending, in place of `diagonal`. `offDiagonal[i]` couples i and i + 1
  * and is destroyed. Root-free QL iteration with implicit shift (Pal, Walker and Kahan; B. N. Parlett, The Symmetric
@@ -43,10 +46,15 @@ export function tridiagonalEigenvalues(
     for (let sweep = 0; ; sweep++) {
       const m = splitFrom(l, size, diagonal, squares);
       if (m === l) break;
+      if (m === l + 1) {
+        solvePair(diagonal, squares, l);
+        l++;
+        break;
+      }
       if (sweep === sweepLimit) throw noConvergence(size);
       const below = Math.sqrt(squares[l]!);
       const half = (diagonal[l + 1]! - diagonal[l]!) / (2 * below);
-      const root = Math.hypot(half, 1);
+      const root = Math.sqrt(half * half + 1);
       const shift = diagonal[l]! - below / (half + (half >= 0 ? root : -root));
       let c = 1;
       let s = 0;
@@ -55,23 +63,48 @@ export function tridiagonalEigenvalues(
       for (let i = m - 1; i >= l; i--) {
         const bb = squares[i]!;
         const r = p + bb;
-        if (i !== m - 1) squares[i + 1] = s * r;
-        const oldC = c;
+        squares[i + 1] = s * r;
         const inverse = 1 / r;
+        // The two divisions do not wait for one another.
+        const stretch = p > tiny ? r / p : 0;
+        const oldC = c;
         c = p * inverse;
         s = bb * inverse;
         const oldGamma = gamma;
         const alpha = diagonal[i]!;
         gamma = c * (alpha - shift) - s * oldGamma;
         diagonal[i + 1] = oldGamma + (alpha - gamma);
-        p = c !== 0 ? (gamma * gamma) / c : oldC * bb;
+        p = stretch !== 0 ? gamma * gamma * stretch : oldC * bb;
       }
       squares[l] = s * p;
       diagonal[l] = shift + gamma;
       if (Number.isNaN(diagonal[l]!)) throw noConvergence(size);
     }
   }
-  diagonal.subarray(0, size).sort();
+  sortAscending(diagonal, size);
+}
+
+/** Both eigenvalues of the 2 × 2 matrix at l, which nothing couples to the rest. */
+function solvePair(diagonal: Float64Array, squares: Float64Array, l: number): void {
+  const mean = 0.5 * (diagonal[l]! + diagonal[l + 1]!);
+  const half = 0.5 * (diagonal[l]! - diagonal[l + 1]!);
+  const reach = Math.sqrt(half * half + squares[l]!);
+  if (Number.isNaN(reach)) throw noConvergence(2);
+  diagonal[l] = mean - reach;
+  diagonal[l + 1] = mean + reach;
+}
+
+function sortAscending(values: Float64Array, size: number): void {
+  if (size > 40) {
+    values.subarray(0, size).sort();
+    return;
+  }
+  for (let i = 1; i < size; i++) {
+    const value = values[i]!;
+    let j = i - 1;
+    for (; j >= 0 && values[j]! > value; j--) values[j + 1] = values[j]!;
+    values[j + 1] = value;
+  }
 }
 
 /**
@@ -98,7 +131,7 @@ export function tridiagonalEigenvectors(
       if (m === l) break;
       if (sweep === sweepLimit) throw noConvergence(size);
       const half = (diagonal[l + 1]! - diagonal[l]!) / (2 * offDiagonal[l]!);
-      const root = Math.hypot(half, 1);
+      const root = Math.sqrt(half * half + 1);
       let g = diagonal[m]! - diagonal[l]! + offDiagonal[l]! / (half + (half >= 0 ? root : -root));
       let s = 1;
       let c = 1;
