@@ -1,4 +1,5 @@
 import { molesPerLitre } from '../spectrum/beerLambert';
+import { gaussianReach, tabulatedGaussian } from '../spectrum/gaussianTable';
 import { visibleCount, visibleWavenumbers_cm1 } from '../spectrum/visibleTransmission';
 import type { BandDraws } from '../transitions/bandDraws';
 import { labInto } from './cieLab';
@@ -14,25 +15,32 @@ export interface BulkColours {
   readonly lab: Float64Array;
 }
 
-const fourLn2 = 4 * Math.LN2;
 const passed = new Float64Array(visibleCount);
+/** Wavenumber falls along the grid; the first and the last bound every search in it. */
+const [firstPlace, lastPlace] = [visibleWavenumbers_cm1[0]!, visibleWavenumbers_cm1[visibleCount - 1]!];
+/** A band that adds less than this to the optical density (natural) anywhere cannot be seen. */
+const invisible = 3e-4;
+const [from_nm, step_nm] = [1e7 / firstPlace, (1e7 / lastPlace - 1e7 / firstPlace) / (visibleCount - 1)];
+
+/** First point of the grid at or below a wavenumber. */
+const firstBelow = (wavenumber: number): number =>
+  wavenumber >= firstPlace ? 0 : Math.ceil((1e7 / wavenumber - from_nm) / step_nm);
 
 /** Optical density of draw `draw` on the visible grid, into `passed`. */
 function densityOfDraw(draws: BandDraws, draw: number, strength: number): void {
   passed.fill(0);
   for (let band = draw * draws.bandCount; band < (draw + 1) * draws.bandCount; band++) {
+    const height = draws.molarAbsorptivity[band]! * strength;
+    if (!(height > invisible)) continue;
     const centre = draws.energy[band]!;
     const width = draws.width[band]!;
-    const height = draws.molarAbsorptivity[band]! * strength;
-    // A band that adds less than 1e-5 to the density anywhere cannot be seen.
-    if (height < 1e-5) continue;
-    const reach = width * Math.sqrt(Math.log(height / 1e-6) / fourLn2);
-    const steepness = fourLn2 / (width * width);
-    for (let point = 0; point < visibleCount; point++) {
-      const from = visibleWavenumbers_cm1[point]! - centre;
-      if (from <= reach && from >= -reach) {
-        passed[point] = passed[point]! + height * Math.exp(-steepness * from * from);
-      }
+    const reach = width * Math.min(gaussianReach, Math.sqrt(Math.log(height / invisible) / (4 * Math.LN2)));
+    const lowest = centre - reach;
+    const perWidth = 1 / width;
+    for (let point = firstBelow(centre + reach); point < visibleCount; point++) {
+      const place = visibleWavenumbers_cm1[point]!;
+      if (place < lowest) break;
+      passed[point] = passed[point]! + height * tabulatedGaussian(Math.abs(place - centre) * perWidth);
     }
   }
 }

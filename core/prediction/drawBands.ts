@@ -8,6 +8,11 @@ import type { Prediction } from './types';
 /** Widths vary by 15 % (one standard deviation), whatever the centres do. */
 const widthSigma = 0.15;
 const lowest_cm1 = 200;
+/**
+ * How much of the doubt about strengths (as a share of its variance) all bands of one kind have in common: whether a
+ * complex absorbs strongly is known to a factor of three, how strongly one band does beside the next to half of itself.
+ */
+const commonStrength = 0.75;
 
 export interface ParameterEstimates {
   readonly tenDq: Estimate;
@@ -59,10 +64,13 @@ export function drawBands(
     const rest = Math.sqrt(Math.max(0, band.sigma_cm1 ** 2 - sigmaThrough(band, estimates) ** 2));
     const own = sharedNormals(`band:${id}:${band.label}:${at}`, count);
     const width = sharedNormals(`width:${id}:${band.kind}`, count);
-    const height = sharedNormals(`height:${id}:${band.kind}:${at}`, count);
+    const together = sharedNormals(`height:${id}:${band.kind}`, count);
+    const apart = sharedNormals(`height:${id}:${band.kind}:${at}`, count);
     const [low, high] = band.molarAbsorptivityRange;
     // The range is meant to hold 95 % of complexes, on a logarithmic scale.
     const logSigma = low > 0 && high > low ? Math.log(high / low) / 3.92 : 0;
+    const logTogether = logSigma * Math.sqrt(commonStrength);
+    const logApart = logSigma * Math.sqrt(1 - commonStrength);
     for (let draw = 0; draw < count; draw++) {
       const moved =
         (band.slopeTenDq ?? 0) * tenDq[draw]! +
@@ -72,7 +80,8 @@ export function drawBands(
       const index = draw * bands.length + at;
       draws.energy[index] = Math.max(lowest_cm1, band.energy_cm1 + moved);
       draws.width[index] = band.width_cm1 * Math.exp(widthSigma * width[draw]!);
-      draws.molarAbsorptivity[index] = band.molarAbsorptivity * Math.exp(logSigma * height[draw]!);
+      const stronger = logTogether * together[draw]! + logApart * apart[draw]!;
+      draws.molarAbsorptivity[index] = band.molarAbsorptivity * Math.exp(stronger);
     }
   });
   return draws;
