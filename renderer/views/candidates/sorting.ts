@@ -36,7 +36,10 @@ const formulaOf = ({ candidate, summary }: TableRow): string =>
 
 const collator = new Intl.Collator('en', { numeric: true });
 
-/** Rows in order; those without the quantity come last whichever way it is sorted, ties keep their order. */
+/** Ids rise in the order of entry, so that a row that was deleted and brought back is where it was. */
+const asEntered = (one: TableRow, other: TableRow): number => (one.candidate.id < other.candidate.id ? -1 : 1);
+
+/** Rows in order; those without the quantity come last whichever way it is sorted, equals in the order of entry. */
 export function sortRows(rows: readonly TableRow[], { by, descending }: Sort): TableRow[] {
   const sign = descending ? -1 : 1;
   if (by === 'formula') {
@@ -47,10 +50,8 @@ export function sortRows(rows: readonly TableRow[], { by, descending }: Sort): T
   const places = Uint32Array.from(rows, (_, index) => index);
   places.sort((one, other) => {
     const [a, b] = [keys[one]!, keys[other]!];
-    if (a === b) return one - other;
-    if (Number.isNaN(a)) return Number.isNaN(b) ? one - other : 1;
-    if (Number.isNaN(b)) return -1;
-    return sign * (a - b) || one - other;
+    if (Number.isNaN(a) !== Number.isNaN(b)) return Number.isNaN(a) ? 1 : -1;
+    return a === b || Number.isNaN(a) ? asEntered(rows[one]!, rows[other]!) : sign * (a - b);
   });
   return Array.from(places, (place) => rows[place]!);
 }
