@@ -8,6 +8,16 @@ interface ConfigurationProps {
   readonly geometry: CubicGeometry;
 }
 
+const written = /^t2g?\^?(\d) eg?\^?(\d)$/;
+
+/** A configuration as the core writes it, `t2g2 eg1`, in type; other text stays as it is. */
+export function ConfigurationLabel({ text }: { readonly text: string }) {
+  const match = written.exec(text);
+  if (!match) return <span>{text}</span>;
+  const geometry = text.startsWith('t2g') ? 'octahedral' : 'tetrahedral';
+  return <Configuration t2={Number(match[1])} e={Number(match[2])} geometry={geometry} />;
+}
+
 const counts = ['none', 'one', 'two', 'three', 'four', 'five', 'six'];
 
 /** A strong-field configuration in type, the lower orbitals first: t₂g⁴e_g² in an octahedron, e²t₂⁴ in a tetrahedron. */

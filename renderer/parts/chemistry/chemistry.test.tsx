@@ -1,6 +1,6 @@
 import { afterEach, describe, expect, it } from 'vitest';
 import { cleanup, render, screen } from '@testing-library/react';
-import { Configuration } from './Configuration';
+import { Configuration, ConfigurationLabel } from './Configuration';
 import { Formula } from './Formula';
 import { formulaPieces, spokenFormula } from './formulaPieces';
 import { spokenTerm } from './termLabel';
@@ -54,6 +54,15 @@ describe('a configuration', () => {
     expect(screen.getByText('t two g four, e g two')).toBeTruthy();
     rerender(<Configuration t2={0} e={1} geometry="tetrahedral" />);
     expect(container.querySelector('[aria-hidden]')!.textContent).toBe('e1');
+  });
+});
+
+describe('a configuration as the core writes it', () => {
+  it('is set in type, and other text left alone', () => {
+    const { container, rerender } = render(<ConfigurationLabel text="t2g2 eg1" />);
+    expect(container.querySelector('[aria-hidden]')!.textContent).toBe('t2g2eg1');
+    rerender(<ConfigurationLabel text="charge transfer" />);
+    expect(container.textContent).toBe('charge transfer');
   });
 });
 

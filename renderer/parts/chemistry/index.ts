@@ -1,4 +1,4 @@
-export { Configuration } from './Configuration';
+export { Configuration, ConfigurationLabel } from './Configuration';
 export { Formula } from './Formula';
 export { multiplicityName, parseTermLabel, spokenTerm, type TermLabel } from './termLabel';
 export { TermSymbol } from './TermSymbol';

@@ -1,3 +1,4 @@
+import { observers, type ObserverId } from '../../../core/library/colourTables';
 import { type SeenColour } from '../../../core/colour/types';
 import { formatGiven } from '../number';
 import { colourNumbers } from './colourNumbers';
@@ -12,6 +13,9 @@ interface SwatchTrioProps {
 
 const factorText = (factor: number): string =>
   Math.abs(factor - 1 / 3) < 0.01 ? '⅓ ×' : `${formatGiven(factor)} ×`;
+
+/** A stored colour names its observer by id. */
+const observerName = (id: string): string => observers[id as ObserverId]?.name ?? id;
 
 /** The same solution at several strengths, side by side on one surround: hue moves with concentration. */
 export function SwatchTrio({ strengths, concentration_mM, path_cm }: SwatchTrioProps) {
@@ -43,7 +47,7 @@ export function SwatchTrio({ strengths, concentration_mM, path_cm }: SwatchTrioP
       </div>
       <figcaption>
         Transmitted light, {formatGiven(path_cm)} cm path, {strengths[0]!.colour.illuminant},{' '}
-        {strengths[0]!.colour.observer}
+        {observerName(strengths[0]!.colour.observer)}
       </figcaption>
     </figure>
   );

@@ -59,6 +59,12 @@ describe('three strengths', () => {
     expect(screen.getByText(/1 cm path, D65/)).toBeTruthy();
   });
 
+  it('write the observer out', () => {
+    const colour = { ...violet, observer: '2deg' };
+    render(<SwatchTrio strengths={[{ factor: 1, colour }]} concentration_mM={10} path_cm={1} />);
+    expect(screen.getByText('Transmitted light, 1 cm path, D65, CIE 1931, 2 degrees')).toBeTruthy();
+  });
+
   it('say so where there is nothing to show', () => {
     render(<SwatchTrio strengths={[]} concentration_mM={10} path_cm={1} />);
     expect(screen.getByText('No colour could be estimated.')).toBeTruthy();
