@@ -20,12 +20,38 @@ function groupsOf(ligand: LigandRecord): ((other: LigandRecord) => boolean)[] {
   ];
 }
 
+const hardDonors = new Set(['F', 'O', 'N']);
+const isHard = ({ donorAtoms }: LigandRecord): boolean => donorAtoms.every((atom) => hardDonors.has(atom));
+
 export interface ClassMean {
   readonly mean: number;
   /** Standard deviation of the members about the mean; null for one member. */
   readonly spread: number | null;
   readonly members: readonly string[];
 }
+
+type Quantity = (ligand: LigandRecord) => number | null;
+
+function meanOf(members: readonly LigandRecord[], quantity: Quantity): ClassMean {
+  const values = members.map((member) => quantity(member)!);
+  const mean = values.reduce((sum, value) => sum + value, 0) / values.length;
+  const variance = values.reduce((sum, value) => sum + (value - mean) ** 2, 0) / (values.length - 1 || 1);
+  return {
+    mean,
+    spread: values.length > 1 ? Math.sqrt(variance) : null,
+    members: members.map(({ id }) => id),
+  };
+}
+
+const membersOf = (
+  ligand: LigandRecord,
+  library: ParameterLibrary,
+  quantity: Quantity,
+  belongs: (other: LigandRecord) => boolean,
+): LigandRecord[] =>
+  [...library.ligands.values()].filter(
+    (other) => other.id !== ligand.id && belongs(other) && quantity(other) !== null,
+  );
 
 /**
  * Mean of a published ligand quantity over the nearest donor class that has at least `fewest` members with a value;
@@ -34,22 +60,22 @@ export interface ClassMean {
 export function classMean(
   ligand: LigandRecord,
   library: ParameterLibrary,
-  quantity: (ligand: LigandRecord) => number | null,
+  quantity: Quantity,
   fewest = 2,
 ): ClassMean | null {
   for (const belongs of groupsOf(ligand)) {
-    const members = [...library.ligands.values()].filter(
-      (other) => other.id !== ligand.id && belongs(other) && quantity(other) !== null,
-    );
-    if (members.length < fewest) continue;
-    const values = members.map((member) => quantity(member)!);
-    const mean = values.reduce((sum, value) => sum + value, 0) / values.length;
-    const variance = values.reduce((sum, value) => sum + (value - mean) ** 2, 0) / (values.length - 1 || 1);
-    return {
-      mean,
-      spread: values.length > 1 ? Math.sqrt(variance) : null,
-      members: members.map(({ id }) => id),
-    };
+    const members = membersOf(ligand, library, quantity, belongs);
+    if (members.length >= fewest) return meanOf(members, quantity);
   }
   return null;
+}
+
+/** The same over all hard (F, O, N) or all soft donors: the last resort for covalency, which follows softness. */
+export function softnessMean(
+  ligand: LigandRecord,
+  library: ParameterLibrary,
+  quantity: Quantity,
+): ClassMean | null {
+  const members = membersOf(ligand, library, quantity, (other) => isHard(other) === isHard(ligand));
+  return members.length === 0 ? null : meanOf(members, quantity);
 }

@@ -14,3 +14,5 @@ export type { SpinChoice } from './spinChoice';
 export { fieldLevels, type FieldLevel } from './fieldLevels';
 export { isOxoCation, overlapLigands } from './overlapField';
 export { donorOverlap, piRatio, type DonorOverlap } from './angularOverlap';
+export { extraPairs, ligandFieldStabilisation } from './stabilisation';
+export { distanceExponent, distanceFactor, spinDistances, type SpinDistances } from './distance';

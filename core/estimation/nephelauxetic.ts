@@ -1,5 +1,5 @@
 import type { IonRecord, LigandRecord, ParameterLibrary } from '../library';
-import { classMean } from './donorClass';
+import { classMean, softnessMean } from './donorClass';
 import { defaultDoubts } from './defaultDoubts';
 import type { Factor } from './ligandStrength';
 
@@ -44,7 +44,8 @@ export function ligandCovalency(ligand: LigandRecord, library: ParameterLibrary)
   }
   const ordered = fromOrder(ligand, library);
   if (ordered !== null) return ordered;
-  const found = classMean(ligand, library, (other) => other.h.value, 1);
+  const published = (other: LigandRecord): number | null => other.h.value;
+  const found = classMean(ligand, library, published, 1) ?? softnessMean(ligand, library, published);
   if (found === null) return null;
   return {
     value: found.mean,
