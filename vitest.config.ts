@@ -19,7 +19,7 @@ export default defineConfig({
         extends: true,
         // The real `electron` package would try to download a binary as soon as it is loaded.
         resolve: { alias: { electron: resolve(root, 'main/testing/fakeElectron.ts') } },
-        test: { name: 'main', environment: 'node', include: ['main/**/*.test.ts'] },
+        test: { name: 'main', environment: 'node', include: ['main/**/*.test.ts', 'e2e/**/*.test.ts'] },
       },
     ],
   },
