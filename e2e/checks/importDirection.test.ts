@@ -1,7 +1,6 @@
 import { resolve } from 'node:path';
 import { ESLint } from 'eslint';
 import { describe, expect, it } from 'vitest';
-import { coreLayers } from '../../eslint.config.js';
 
 const root = resolve(import.meta.dirname, '../..');
 const eslint = new ESLint({ cwd: root });
@@ -83,8 +82,12 @@ describe('the import rule bites', () => {
     );
   });
 
-  it('the table of layers itself has no cycle', () => {
-    const layers: Readonly<Record<string, readonly string[]>> = coreLayers;
+  it('the table of layers itself has no cycle', async () => {
+    // A name that the compiler cannot follow: the linter's configuration is plain JavaScript.
+    const configuration = '../../eslint.config.js';
+    const { coreLayers: layers } = (await import(configuration)) as {
+      coreLayers: Readonly<Record<string, readonly string[]>>;
+    };
     const done = new Set<string>();
     const visit = (name: string, path: readonly string[]): void => {
       expect(path, `${path.join(' -> ')} -> ${name}`).not.toContain(name);
