@@ -57,6 +57,8 @@ export const parameterSetSchema = z.strictObject({
     z.string(),
     z.strictObject({ value: z.number(), sigma: z.number().nonnegative(), source: z.string() }),
   ),
+  /** Complexes whose measurements went into the values: their agreement is in-sample. One key per complex. */
+  informedBy: z.array(z.string().max(300)).max(100_000).optional(),
 });
 export type ParameterSet = z.infer<typeof parameterSetSchema>;
 

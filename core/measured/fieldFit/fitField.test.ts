@@ -219,6 +219,9 @@ describe('labels', () => {
     ['^{4}A_{2g} → ^{4}T_{1g}(F)', { multiplicity: 4, irrep: 'T1', parent: 'F' }],
     ['6A1g -> 4A1g,4Eg(G)', { multiplicity: 4, irrep: 'A1', parent: null }],
     ['a singlet', { multiplicity: 1, irrep: null, parent: null }],
+    ['1A1 -> 1E (1T1g)', { multiplicity: 1, irrep: 'T1', parent: null }],
+    ['4B1g -> 4B2g (4T2g)', { multiplicity: 4, irrep: 'T2', parent: null }],
+    ['2B1g -> 2B2g', null],
     ['charge transfer', null],
   ])('%s is understood', (label, wanted) => expect(parseLevel(label)).toEqual(wanted));
 

@@ -13,19 +13,22 @@ const multiplets = ['singlet', 'doublet', 'triplet', 'quartet', 'quintet', 'sext
 
 /**
  * The upper level of an assignment as written: `4T2g`, `4A2g -> 4T1g(P)`, `3T1(F) → 3A2`, `singlet`. Of `4A1g,4Eg` the
- * first is taken. Null where nothing is recognised.
+ * first is taken; of `1E(1T1g)` the cubic level. Null where nothing is recognised.
  */
 export function parseLevel(label: string): NamedLevel | null {
-  const upper = label
+  const whole = label
     .split(/->|→|⟶|—>/)
     .at(-1)!
     .replace(/[_^{}$\s]/g, '');
+  // Of a component of low symmetry, `1E(1T1g)`, the cubic level stands in the brackets.
+  const upper = /\((\d[AET][12]?[gu]?)\b.*\)/.exec(whole)?.[1] ?? whole;
   const match = term.exec(upper);
   if (match === null) {
     const word = multiplets.findIndex((name) => upper.toLowerCase().includes(name));
     return word < 0 ? null : { multiplicity: word + 1, irrep: null, parent: null };
   }
   const [, multiplicity, letter, index, parent] = match;
+  if (letter === 'B') return null;
   return { multiplicity: Number(multiplicity), irrep: `${letter}${index}`, parent: parent ?? null };
 }
 

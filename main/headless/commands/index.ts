@@ -6,6 +6,7 @@ import { fitBands } from './fitBands';
 import { fitField } from './fitField';
 import { levels } from './levels';
 import { readSpectrum } from './readSpectrum';
+import { recalibrate } from './recalibrate';
 import { search } from './search';
 import { terms } from './terms';
 
@@ -17,6 +18,7 @@ export const commands: readonly Command[] = [
   readSpectrum,
   fitBands,
   fitField,
+  recalibrate,
   levels,
   terms,
   colour,

@@ -1,0 +1,10 @@
+export { observationOf, type Observation } from './observations';
+export {
+  recalibrate,
+  type ErrorPair,
+  type PartResult,
+  type Recalibration,
+  type RecalibrateOptions,
+} from './recalibrate';
+export { type ParameterChange } from './proposal';
+export { parameterSetFrom, type Adoption } from './parameterSet';
