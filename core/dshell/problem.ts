@@ -2,6 +2,7 @@ import { requireElectronCount, requireFinite, requireNotNegative } from './check
 import { fieldMatrix } from './field/fieldMatrix';
 import { type FieldSpec } from './field/fieldSpec';
 import { type FieldMatrix, type FieldTensors } from './field/tensorComponents';
+import { fieldComponents } from './adaptation/species';
 import { operatorName, type OperatorName } from './blocks/symmetryBlocks';
 
 /** A magnetic field: H = μ_B B·(k L + g_e S). */
@@ -81,10 +82,10 @@ export function hamiltonianParameters(
     ['alpha', alpha],
     ['zeta', zeta],
   ]);
-  for (const part of ['re', 'im'] as const)
-    for (const k of [2, 4] as const)
-      tensors[part][k].forEach((value, q) => {
-        if (q > 0 || part === 're') parameters.set(operatorName({ k, q, part }), value);
-      });
+  for (const [name, k, q, part] of componentNames) parameters.set(name, tensors[part][k][q]!);
   return parameters;
 }
+
+const componentNames = fieldComponents.C1.map(
+  ({ k, q, part }) => [operatorName({ k, q, part }), k, q, part] as const,
+);

@@ -4,8 +4,8 @@ import { algebraWidth, type OperatorName, type SymmetryBlock } from './symmetryB
 export type Parameters = ReadonlyMap<OperatorName, number>;
 
 /**
- * Σ parameter · operator of one block, lower triangle, row-major, `width` numbers per element one after the other. The
- * rest of `matrix` is left as it is.
+ * Σ parameter · operator of one block, lower triangle, row-major, `width` numbers per element one after the other. `matrix`
+ * may be longer than needed.
  */
 export function assemble(
   block: SymmetryBlock,
@@ -13,7 +13,7 @@ export function assemble(
   matrix = new Float64Array(block.size * block.size * algebraWidth[block.species.algebra]),
 ): Float64Array {
   const width = algebraWidth[block.species.algebra];
-  matrix.fill(0);
+  matrix.fill(0, 0, block.size * block.size * width);
   for (const [name, { places, values }] of block.operators) {
     const factor = parameters.get(name) ?? 0;
     if (factor === 0) continue;

@@ -44,38 +44,58 @@ export function cubicLevels(problem: CubicProblem): CubicLevel[] {
 
 function rawLevels(block: CubicBlock, problem: CubicProblem, sign: 1 | -1): RawLevel[] {
   const { dElectrons, tenDq, B, C } = problem;
+  const { size } = block;
   const { values, vectors } = blockStates(block, dElectrons, sign * tenDq, B, C);
-  return Array.from(values, (energy, k) => {
-    const vector = vectors.subarray(k * block.size, (k + 1) * block.size);
-    const eMean = vector.reduce((sum, c, i) => sum + c * c * block.eCount[i]!, 0);
-    return {
+  const found: RawLevel[] = [];
+  for (let k = 0; k < size; k++) {
+    const weights = eWeights(block, vectors, k * size);
+    let eMean = 0;
+    for (let e = 1; e <= 4; e++) eMean += e * weights[e]!;
+    found.push({
       block,
-      energy,
-      configurations: configurationWeights(block, dElectrons, vector),
+      energy: values[k]!,
+      configurations: configurationsFrom(weights, block, dElectrons),
       slope: {
         tenDq: sign * (eMean - 0.4 * dElectrons),
-        B: expectation(block.repulsionB, vector),
-        C: expectation(block.repulsionC, vector),
+        B: expectation(block.repulsionB, vectors, k * size, size),
+        C: expectation(block.repulsionC, vectors, k * size, size),
       },
-    };
-  });
+    });
+  }
+  return found;
 }
 
-function configurationWeights(
-  block: CubicBlock,
+/** Weight of e^0 … e^4 in the eigenvector that starts at `at`. */
+function eWeights({ eCount, size }: CubicBlock, vectors: Float64Array, at: number): number[] {
+  const weights = [0, 0, 0, 0, 0];
+  for (let i = 0; i < size; i++) weights[eCount[i]!]! += vectors[at + i]! * vectors[at + i]!;
+  return weights;
+}
+
+/** The configurations that occur in the block, largest weight first. */
+function configurationsFrom(
+  weights: readonly number[],
+  { eCount }: CubicBlock,
   electrons: number,
-  vector: Float64Array,
 ): ConfigurationWeight[] {
-  const weights = new Map<number, number>();
-  vector.forEach((c, i) => weights.set(block.eCount[i]!, (weights.get(block.eCount[i]!) ?? 0) + c * c));
-  return [...weights]
-    .map(([e, weight]) => ({ t2: electrons - e, e, weight }))
-    .sort((a, b) => b.weight - a.weight);
+  const list: ConfigurationWeight[] = [];
+  for (let e = 0; e <= 4; e++) {
+    if (!eCount.includes(e)) continue;
+    const weight = weights[e]!;
+    let place = list.length;
+    while (place > 0 && list[place - 1]!.weight < weight) place--;
+    list.splice(place, 0, { t2: electrons - e, e, weight });
+  }
+  return list;
 }
 
-function expectation(matrix: Float64Array, vector: Float64Array): number {
-  const n = vector.length;
+function expectation(matrix: Float64Array, vectors: Float64Array, at: number, n: number): number {
   let sum = 0;
-  for (let i = 0; i < n; i++) for (let j = 0; j < n; j++) sum += vector[i]! * matrix[i * n + j]! * vector[j]!;
+  for (let i = 0; i < n; i++) {
+    const row = i * n;
+    let inner = 0.5 * matrix[row + i]! * vectors[at + i]!;
+    for (let j = 0; j < i; j++) inner += matrix[row + j]! * vectors[at + j]!;
+    sum += 2 * vectors[at + i]! * inner;
+  }
   return sum;
 }

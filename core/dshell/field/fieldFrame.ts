@@ -58,33 +58,47 @@ function isCubic({ re }: FieldTensors, rounding: number): boolean {
   return Math.abs(re[4][4]! - Math.sqrt(5 / 14) * re[4][0]!) <= rounding;
 }
 
-const isAllowed = Object.fromEntries(
-  groups.map((group) => [
-    group,
-    (k: 2 | 4, q: number, part: 're' | 'im') =>
-      fieldComponents[group].some((each) => each.k === k && each.q === q && each.part === part),
-  ]),
-) as Record<FieldGroup, (k: 2 | 4, q: number, part: 're' | 'im') => boolean>;
+/** For each group, part and rank whether the component q = 0 … k may differ from zero. */
+const allowed = Object.fromEntries(
+  groups.map((group) => {
+    const table = (part: 're' | 'im', k: 2 | 4): boolean[] =>
+      Array.from({ length: k + 1 }, (_, q) =>
+        fieldComponents[group].some((each) => each.k === k && each.q === q && each.part === part),
+      );
+    return [
+      group,
+      { re: { 2: table('re', 2), 4: table('re', 4) }, im: { 2: table('im', 2), 4: table('im', 4) } },
+    ];
+  }),
+) as Record<FieldGroup, Record<'re' | 'im', Record<2 | 4, boolean[]>>>;
 
 /** Largest component that a field of the group cannot have. */
-function foreignScale(tensors: FieldTensors, group: FieldGroup): number {
+function foreignScale({ re, im }: FieldTensors, group: FieldGroup): number {
+  const table = allowed[group];
   let largest = 0;
-  for (const part of ['re', 'im'] as const)
-    for (const k of [2, 4] as const)
-      for (let q = 0; q <= k; q++) {
-        const size = Math.abs(tensors[part][k][q]!);
-        if (size > largest && !isAllowed[group](k, q, part)) largest = size;
-      }
+  const look = (values: readonly number[], may: readonly boolean[]): void => {
+    for (let q = 0; q < values.length; q++) {
+      const size = Math.abs(values[q]!);
+      if (size > largest && !may[q]!) largest = size;
+    }
+  };
+  look(re[2], table.re[2]);
+  look(re[4], table.re[4]);
+  look(im[2], table.im[2]);
+  look(im[4], table.im[4]);
   return largest;
 }
 
 /** The components that a field of the group can have. */
-function reducedTo(tensors: FieldTensors, group: FieldGroup): FieldTensors {
-  const part = (name: 're' | 'im') => ({
-    2: tensors[name][2].map((value, q) => (isAllowed[group](2, q, name) ? value : 0)),
-    4: tensors[name][4].map((value, q) => (isAllowed[group](4, q, name) ? value : 0)),
-  });
-  return { trace: tensors.trace, re: part('re'), im: part('im') };
+function reducedTo({ trace, re, im }: FieldTensors, group: FieldGroup): FieldTensors {
+  const table = allowed[group];
+  const keep = (values: readonly number[], may: readonly boolean[]): number[] =>
+    values.map((value, q) => (may[q]! ? value : 0));
+  return {
+    trace,
+    re: { 2: keep(re[2], table.re[2]), 4: keep(re[4], table.re[4]) },
+    im: { 2: keep(im[2], table.im[2]), 4: keep(im[4], table.im[4]) },
+  };
 }
 
 /** Largest component. */

@@ -5,6 +5,7 @@ import { bohrMagneton_cm1_T } from '../../units';
 import { type FieldGroup } from '../adaptation/species';
 import { assemble, type Parameters } from '../blocks/assemble';
 import {
+  algebraWidth,
   completeBlock,
   symmetryBlocks,
   type OperatorName,
@@ -38,8 +39,12 @@ export function solveBlocks(problem: CheckedProblem, group?: FieldGroup): BlockL
   }));
 }
 
+let scratch = new Float64Array(0);
+
 function blockValues(block: SymmetryBlock, parameters: Parameters): Float64Array {
-  const matrix = assemble(block, parameters);
+  const length = block.size * block.size * algebraWidth[block.species.algebra];
+  if (scratch.length < length) scratch = new Float64Array(length);
+  const matrix = assemble(block, parameters, scratch);
   switch (block.species.algebra) {
     case 'real':
       return symmetricEigenvalues(matrix, block.size);
