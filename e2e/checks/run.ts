@@ -19,7 +19,7 @@ export function run(
   return new Promise((done) => {
     const child = spawn(tool, words, {
       cwd: root,
-      env: { ...process.env, ...env, FORCE_COLOR: '0' },
+      env: { ...process.env, ...env, FORCE_COLOR: '0', NO_COLOR: '1' },
       stdio: ['ignore', 'pipe', 'pipe'],
       shell: process.platform === 'win32',
     });
