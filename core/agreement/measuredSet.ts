@@ -69,17 +69,30 @@ function furtherLigands(meta: unknown): LigandRecord[] {
   });
 }
 
-/** The library with the denticity that a ligand shows in this very complex. */
-function withDenticities(library: ParameterLibrary, used: unknown): ParameterLibrary {
-  if (!isObject(used)) return library;
+/**
+ * A ligand that binds with fewer donors in this very complex is another ligand: it gets a name of its own (`edta/5`),
+ * in the set and in the library.
+ */
+function withDenticities(
+  library: ParameterLibrary,
+  set: unknown,
+  used: unknown,
+): { readonly library: ParameterLibrary; readonly set: unknown } {
+  if (!isObject(used) || !isObject(set)) return { library, set };
   const ligands = new Map(library.ligands);
+  const renamed: Raw = { ...set };
   for (const [id, value] of Object.entries(used)) {
     const ligand = ligands.get(id);
     const denticity = number(value);
-    if (ligand === undefined || denticity === null || denticity < 1 || denticity > 8) continue;
-    ligands.set(id, { ...ligand, denticity, donorAtoms: ligand.donorAtoms.slice(0, denticity) });
+    if (ligand === undefined || denticity === null || denticity < 1 || denticity >= ligand.denticity)
+      continue;
+    if (renamed[id] === undefined) continue;
+    const name = `${id}/${denticity}`;
+    ligands.set(name, { ...ligand, id: name, denticity, donorAtoms: ligand.donorAtoms.slice(0, denticity) });
+    renamed[name] = renamed[id];
+    delete renamed[id];
   }
-  return { ...library, ligands };
+  return { library: { ...library, ligands }, set: renamed };
 }
 
 function readBand(raw: unknown): MeasuredBand[] {
@@ -99,6 +112,7 @@ function readBand(raw: unknown): MeasuredBand[] {
 
 function readComplex(raw: Raw, library: ParameterLibrary): MeasuredComplex {
   const published = isObject(raw.published) ? raw.published : {};
+  const bound = withDenticities(library, raw.ligands, raw.denticityUsed);
   return {
     id: text(raw.id)!,
     formula: text(raw.formula) ?? '',
@@ -107,7 +121,7 @@ function readComplex(raw: Raw, library: ParameterLibrary): MeasuredComplex {
       metal: raw.metal,
       oxidationState: raw.oxidationState,
       geometry: raw.geometry,
-      ligands: raw.ligands,
+      ligands: bound.set,
       isomer: raw.isomer,
     },
     bands: (Array.isArray(raw.bands) ? raw.bands : []).flatMap(readBand),
@@ -119,7 +133,7 @@ function readComplex(raw: Raw, library: ParameterLibrary): MeasuredComplex {
     medium: text(raw.medium),
     useForTuning: raw.useForTuning === true,
     flags: texts(raw.flags),
-    library: withDenticities(library, raw.denticityUsed),
+    library: bound.library,
   };
 }
 

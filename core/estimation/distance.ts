@@ -39,7 +39,7 @@ const meanDonorRadius = (donors: readonly { ligand: LigandRecord; places: number
 };
 
 /** 10Dq at distance `to` over 10Dq at distance `from` (same unit). */
-export const distanceFactor = (from: number, to: number, exponent = distanceExponent.value): number =>
+export const distanceFactor = (from: number, to: number, exponent: number = distanceExponent.value): number =>
   (from / to) ** exponent;
 
 export interface SpinDistances {
