@@ -19,14 +19,16 @@ const smallest = 1e-6;
 /** 2T2: a quartet at −ζ/2 whose moments cancel, a doublet at +ζ. x = ζ/kT. */
 function oneElectron(x: number): number {
   if (Math.abs(x) < smallest) return 5;
-  const e = Math.exp(-1.5 * x);
-  return (8 + (3 * x - 8) * e) / (x * (2 + e));
+  // Populations relative to the lower of the two levels, so that nothing overflows.
+  const [quartet, doublet] = x > 0 ? [1, Math.exp(-1.5 * x)] : [Math.exp(1.5 * x), 1];
+  return (8 * quartet + (3 * x - 8) * doublet) / (x * (2 * quartet + doublet));
 }
 
 /** 3T1: J = 2, 1, 0 of an effective L = 1 at −ζ/2, +ζ/2, +ζ. */
 function twoElectrons(x: number): number {
   if (Math.abs(x) < smallest) return 10;
-  const [e2, e3] = [Math.exp(-x), Math.exp(-1.5 * x)];
-  const above = 2.5 * x + 15 + (0.5 * x + 9) * e2 - 24 * e3;
-  return (3 * above) / (x * (5 + 3 * e2 + e3));
+  const [p2, p1, p0] =
+    x > 0 ? [1, Math.exp(-x), Math.exp(-1.5 * x)] : [Math.exp(1.5 * x), Math.exp(0.5 * x), 1];
+  const above = (2.5 * x + 15) * p2 + (0.5 * x + 9) * p1 - 24 * p0;
+  return (3 * above) / (x * (5 * p2 + 3 * p1 + p0));
 }

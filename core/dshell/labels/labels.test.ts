@@ -1,7 +1,7 @@
 import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { compose, rotationAbout } from '../../symmetry';
-import { turnedField } from '../field/fieldFrame';
+import { turnedField } from '../field/symmetryAxes';
 import { fieldMatrix } from '../field/fieldMatrix';
 import { type FieldSpec } from '../field/fieldSpec';
 import { type LevelProblem } from '../problem';

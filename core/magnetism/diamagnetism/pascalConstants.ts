@@ -23,9 +23,16 @@ const both = (value: number, recalled: number): SourcedValue =>
     alternatives: [{ value: recalled, source: collection, status: 'memory' }],
   });
 
+/** As recalled of the collection; the page's figure does not fit the size of the ion and is kept as the alternative only. */
+const doubted = (recalled: number, onPage: number): SourcedValue =>
+  sourced({
+    ...{ value: recalled, source: collection, status: 'memory' },
+    alternatives: [{ value: onPage, source: table, status: 'page' }],
+  });
+
 export const cations: PascalTable = {
   ...{ 'Li+': page(-1.0), 'Na+': page(-6.8), 'K+': page(-14.9), 'Rb+': page(-22.5), 'Cs+': page(-35) },
-  ...{ 'NH4+': both(-40, -13.3), 'Mg2+': page(-5), 'Ca2+': memory(-10.4), 'Ba2+': memory(-26.5) },
+  ...{ 'NH4+': doubted(-13.3, -40), 'Mg2+': page(-5), 'Ca2+': memory(-10.4), 'Ba2+': memory(-26.5) },
   ...{ 'Ti3+': memory(-9), 'V2+': memory(-15), 'V3+': memory(-10), 'V4+': memory(-7) },
   ...{
     'Cr2+': memory(-15),

@@ -1,10 +1,12 @@
 import type { Command } from '../command';
 import { agreement } from './agreement';
 import { estimate } from './estimate';
+import { checkProject } from './checkProject';
 import { colour } from './colour';
 import { fitBands } from './fitBands';
 import { fitField } from './fitField';
 import { levels } from './levels';
+import { magnetism } from './magnetism';
 import { readSpectrum } from './readSpectrum';
 import { recalibrate } from './recalibrate';
 import { search } from './search';
@@ -20,6 +22,8 @@ export const commands: readonly Command[] = [
   fitField,
   recalibrate,
   levels,
+  magnetism,
   terms,
   colour,
+  checkProject,
 ];
