@@ -1,5 +1,5 @@
 import type { BulkColours } from './colourBulk';
-import { seenColour } from './seenColour';
+import { seenColourOf } from './seenColour';
 import { chromaAndHue, hueDistance } from './cieLab';
 import { colourInWords, type Matter } from './words';
 import type { ColourCloud, SeenColour } from './types';
@@ -11,27 +11,42 @@ export const tripleAt = (values: Float64Array, index: number): Triple => [
   values[3 * index + 2]!,
 ];
 
-/** Words that occur among the draws, most frequent first (alphabetical where equal), with their share. */
-export function wordsOfCloud(
-  colours: BulkColours,
-  matter: Matter = 'solution',
+/** Words with the share of the draws that bear them, most frequent first (alphabetical where equal). */
+function countWords(
+  words: Iterable<string>,
+  of: number,
 ): { readonly words: string; readonly share: number }[] {
   const counts = new Map<string, number>();
-  for (let index = 0; index < colours.count; index++) {
-    const words = colourInWords(tripleAt(colours.lab, index), matter);
-    counts.set(words, (counts.get(words) ?? 0) + 1);
-  }
+  for (const each of words) counts.set(each, (counts.get(each) ?? 0) + 1);
   return [...counts]
-    .map(([words, count]) => ({ words, share: count / colours.count }))
+    .map(([each, count]) => ({ words: each, share: count / of }))
     .sort((one, other) => other.share - one.share || (one.words < other.words ? -1 : 1));
 }
 
+/** Words that occur among the draws, without making their swatches. */
+export const wordsOfCloud = (
+  colours: BulkColours,
+  matter: Matter = 'solution',
+): { readonly words: string; readonly share: number }[] =>
+  countWords(
+    Array.from({ length: colours.count }, (_, index) => colourInWords(tripleAt(colours.lab, index), matter)),
+    colours.count,
+  );
+
 /** Colours of all draws with their words: what one swatch cannot say. */
 export function colourCloud(colours: BulkColours, matter: Matter = 'solution'): ColourCloud {
-  const draws: SeenColour[] = Array.from({ length: colours.count }, (_, index) =>
-    seenColour(tripleAt(colours.XYZ, index), colours.weights, matter),
-  );
-  return { draws, words: wordsOfCloud(colours, matter) };
+  const draws: SeenColour[] = [];
+  for (let index = 0; index < colours.count; index++) {
+    const [XYZ, lab] = [tripleAt(colours.XYZ, index), tripleAt(colours.lab, index)];
+    draws.push(seenColourOf(XYZ, lab, colours.weights, matter));
+  }
+  return {
+    draws,
+    words: countWords(
+      draws.map(({ words }) => words),
+      colours.count,
+    ),
+  };
 }
 
 /**

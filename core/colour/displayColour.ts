@@ -5,7 +5,7 @@ import {
   convertRgbToLrgb,
   convertXyz65ToRgb,
 } from 'culori/fn';
-import { adapt } from './chromaticAdaptation';
+import { adapt, apply } from './chromaticAdaptation';
 import type { Triple } from './tristimulus';
 
 /** White of sRGB, x 0.3127 and y 0.3290 (IEC 61966-2-1), Y = 100. */
@@ -29,15 +29,36 @@ function hexOf([r, g, b]: Triple): string {
   return `#${step(rgb.r)}${step(rgb.g)}${step(rgb.b)}`;
 }
 
-/** Linear sRGB channels (0 to 1 inside the gamut) of XYZ under any white. */
-export function linearSrgb(xyz: Triple, white: Triple): Triple {
+function adaptedLinear(xyz: Triple, white: Triple): Triple {
   const [x, y, z] = adapt(xyz, white, srgbWhite);
   const { r, g, b } = convertRgbToLrgb(convertXyz65ToRgb({ x: x / 100, y: y / 100, z: z / 100 }));
   return [r, g, b];
 }
 
-export const isInSrgb = (linear: Triple, within = slack): boolean =>
-  linear.every((value) => value >= -within && value <= 1 + within);
+/** Both steps are linear, so each white has one matrix; its columns are what becomes of X, Y and Z alone. */
+const matrices = new WeakMap<Triple, readonly [Triple, Triple, Triple]>();
+
+function matrixFor(white: Triple): readonly [Triple, Triple, Triple] {
+  const known = matrices.get(white);
+  if (known !== undefined) return known;
+  const [X, Y, Z] = [
+    adaptedLinear([100, 0, 0], white),
+    adaptedLinear([0, 100, 0], white),
+    adaptedLinear([0, 0, 100], white),
+  ];
+  const row = (channel: 0 | 1 | 2): Triple => [X[channel] / 100, Y[channel] / 100, Z[channel] / 100];
+  const matrix = [row(0), row(1), row(2)] as const;
+  matrices.set(white, matrix);
+  return matrix;
+}
+
+/** Linear sRGB channels (0 to 1 inside the gamut) of XYZ under any white. */
+export const linearSrgb = (xyz: Triple, white: Triple): Triple => apply(matrixFor(white), xyz);
+
+export function isInSrgb([r, g, b]: Triple, within = slack): boolean {
+  const [least, most] = [-within, 1 + within];
+  return r >= least && r <= most && g >= least && g <= most && b >= least && b <= most;
+}
 
 /** OKLab (B. Ottosson, 2020) of linear sRGB channels, which may lie outside the gamut. */
 export function oklabOf([r, g, b]: Triple): Triple {
@@ -67,7 +88,7 @@ export function reduceChroma(linear: Triple): Triple {
   };
   let [kept, refused] = [0, 1];
   const chroma = Math.hypot(a, b);
-  while ((refused - kept) * chroma > 1e-4) {
+  while ((refused - kept) * chroma > 2e-4) {
     const share = (kept + refused) / 2;
     const candidate = fromOklab(l, share * a, share * b);
     if (isInSrgb(candidate, 0) || differs(share, candidate) <= noticeable) kept = share;

@@ -5,14 +5,17 @@ import type { SeenColour } from './types';
 import { colourInWords, type Matter } from './words';
 
 /** The colour of XYZ as everyone of this program states it: numbers, screen colour and words, with its viewing. */
-export function seenColour(XYZ: Triple, weights: ViewingWeights, matter: Matter = 'solution'): SeenColour {
-  const lab = labFromXYZ(XYZ, weights.white);
+export const seenColour = (XYZ: Triple, weights: ViewingWeights, matter: Matter = 'solution'): SeenColour =>
+  seenColourOf(XYZ, labFromXYZ(XYZ, weights.white), weights, matter);
+
+/** The same where L*a*b* is at hand already. */
+export function seenColourOf(XYZ: Triple, lab: Triple, weights: ViewingWeights, matter: Matter): SeenColour {
   const { hex, inGamut } = displayHex(XYZ, weights.white);
   return {
     srgb: hex,
     inGamut,
-    lab: [lab[0], lab[1], lab[2]],
-    XYZ: [XYZ[0], XYZ[1], XYZ[2]],
+    lab,
+    XYZ,
     words: colourInWords(lab, matter),
     illuminant: weights.illuminant,
     observer: weights.observer,

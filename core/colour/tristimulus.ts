@@ -1,5 +1,4 @@
 import { illuminants, observers, type IlluminantId, type ObserverId } from '../library/colourTables';
-import { visibleCount } from '../spectrum/visibleTransmission';
 
 export type Triple = readonly [number, number, number];
 
@@ -57,14 +56,15 @@ export function tristimulusInto(
   out: Float64Array,
   at = 0,
 ): void {
+  const { x, y, z } = weights;
   let X = 0;
   let Y = 0;
   let Z = 0;
-  for (let point = 0; point < visibleCount; point++) {
+  for (let point = 0; point < x.length; point++) {
     const share = passed[point]!;
-    X += share * weights.x[point]!;
-    Y += share * weights.y[point]!;
-    Z += share * weights.z[point]!;
+    X += share * x[point]!;
+    Y += share * y[point]!;
+    Z += share * z[point]!;
   }
   out[at] = X;
   out[at + 1] = Y;

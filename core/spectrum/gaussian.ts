@@ -1,6 +1,6 @@
 import type { SpectralBand } from './spectralBand';
 
-const fourLn2 = 4 * Math.LN2;
+export const fourLn2 = 4 * Math.LN2;
 
 /** Beyond this many full widths from the centre a Gaussian is below 1e-10 of its height. */
 const reach = 2.9;

@@ -1,14 +1,12 @@
 import { visibleWavelengths_nm } from '../library/colourTables';
 import { molesPerLitre } from './beerLambert';
-import { gaussian } from './gaussian';
+import { fourLn2, gaussian } from './gaussian';
 import { reflectanceOf } from './kubelkaMunk';
 import type { SpectralBand } from './spectralBand';
 
 /** Wavenumbers of the visible grid, 380 to 780 nm in steps of 5 nm. */
 export const visibleWavenumbers_cm1 = Float64Array.from(visibleWavelengths_nm, (nm) => 1e7 / nm);
 export const visibleCount = visibleWavenumbers_cm1.length;
-
-const fourLn2 = 4 * Math.LN2;
 
 /**
  * Sum of the bands on the visible grid, into `out`; nothing is allocated, for use on many draws.
