@@ -15,7 +15,7 @@ export function CautionList({ cautions, of }: CautionListProps) {
       className="caution-list"
       aria-label={of === undefined ? 'Safety cautions' : `Safety cautions: ${of}`}
     >
-      <h3>Before anything is made</h3>
+      <p className="caution-title">Before anything is made</p>
       {cautions.length === 0 ? (
         <p className="caution-none">
           No caution on file for these substances. That means not assessed, not safe.

@@ -14,7 +14,7 @@ interface EmptyStateProps {
 export function EmptyState({ title, children, actions }: EmptyStateProps) {
   return (
     <div className="empty-state">
-      <h3>{title}</h3>
+      <h2>{title}</h2>
       {children !== undefined && <div className="empty-state-text">{children}</div>}
       {actions !== undefined && <div className="empty-state-actions">{actions}</div>}
     </div>

@@ -17,7 +17,7 @@ export function ErrorPanel({ problems, title, children }: ErrorPanelProps) {
     (problems.length === 1 ? 'This needs a correction' : `These ${problems.length} points need a correction`);
   return (
     <div className="error-panel" role="alert">
-      <h3>{heading}</h3>
+      <p className="error-title">{heading}</p>
       <ul>
         {problems.map(({ code, field, message, remedy }, index) => (
           <li key={index} data-code={code}>

@@ -110,9 +110,15 @@ export function Plot(props: PlotProps) {
   };
 
   return (
-    <figure className="plot" style={props.widest === undefined ? undefined : { maxInlineSize: props.widest }}>
+    <figure
+      className="plot"
+      aria-labelledby={`${id}-title`}
+      style={props.widest === undefined ? undefined : { maxInlineSize: props.widest }}
+    >
       <div className="plot-head">
-        <h3 id={`${id}-title`}>{title}</h3>
+        <h2 id={`${id}-title`} className="plot-title">
+          {title}
+        </h2>
         <PlotTools
           title={title}
           stage={stage}
