@@ -4,6 +4,7 @@ import { candidatesView } from './candidates';
 import { diagramView } from './diagram';
 import { entryView } from './entry';
 import { libraryView } from './library';
+import { searchView } from './search';
 import { settingsView } from './settings';
 import { sheetView } from './sheet';
 import { startView } from './start';
@@ -13,6 +14,7 @@ export const views: readonly ViewDefinition[] = [
   startView,
   candidatesView,
   entryView,
+  searchView,
   sheetView,
   libraryView,
   diagramView,
