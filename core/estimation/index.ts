@@ -16,3 +16,4 @@ export { isOxoCation, overlapLigands } from './overlapField';
 export { donorOverlap, piRatio, type DonorOverlap } from './angularOverlap';
 export { extraPairs, ligandFieldStabilisation } from './stabilisation';
 export { distanceExponent, distanceFactor, spinDistances, type SpinDistances } from './distance';
+export { doubtReasons, settlingMeasurement, withAccount } from './doubts';

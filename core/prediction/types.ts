@@ -18,6 +18,8 @@ export interface Prediction {
   readonly formula: string;
   readonly dElectrons: number;
   readonly tenDq: Estimate;
+  /** Where the two spin states have bonds of different length: 10Dq of each. `tenDq` is that of the likelier one. */
+  readonly tenDqBySpin?: { readonly high: Estimate; readonly low: Estimate };
   readonly racahB: Estimate;
   readonly racahC: Estimate;
   readonly zeta: Estimate;
