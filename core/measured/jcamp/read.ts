@@ -44,10 +44,10 @@ function chooseBlocks(blocks: readonly Block[], warnings: ReadingWarning[]): Blo
     );
   }
   for (const block of blocks) {
-    if (block.isLink && holdsData(block)) {
+    if (block.isLink && (holdsData(block) || recordOf(block, 'NPOINTS') !== undefined)) {
       warnings.push({
         code: 'recovered',
-        message: `the LINK block at line ${block.line} holds data of its own, which are left out: the ##TITLE= of an inner block is missing`,
+        message: `the LINK block at line ${block.line} announces or holds data of its own, which are left out: the ##TITLE= of an inner block may be missing`,
       });
     }
     if (block.isLink || chosen.includes(block)) continue;
