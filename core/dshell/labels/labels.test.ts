@@ -156,6 +156,19 @@ describe('names in groups that are asked for', () => {
     expect(byEnergy(1, mer, 'D2h', 150)).toEqual(['G5', 'G5', 'G5', 'G5', 'G5']);
   });
 
+  it('of the free ion are J, in the intervals of Landé: 3F of d2 at 3λ and 4λ, λ = ζ/2 (Condon and Shortley 1935)', () => {
+    const { levels } = labelLevels({
+      dElectrons: 2,
+      B: 900,
+      C: 3600,
+      zeta: 2,
+      field: { type: 'oct', tenDq: 0 },
+    });
+    expect(levels.slice(0, 3).map(({ irrep }) => irrep)).toEqual(['J=2', 'J=3', 'J=4']);
+    expect(levels[1]!.energy).toBeCloseTo(3, 2);
+    expect(levels[2]!.energy - levels[1]!.energy).toBeCloseTo(4, 2);
+  });
+
   it('give way to the group of the field when that has no such symmetry', () => {
     expect(labelLevels(problem(1, mer), { group: 'Oh' }).group).toBe('D2h');
     expect(labelLevels(problem(1, mer), { group: 'nonsense' }).group).toBe('D2h');

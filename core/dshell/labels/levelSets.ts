@@ -1,12 +1,9 @@
-import { hermitianEigensystem } from '../../numerics/eigen/hermitian';
-import { quaternionEigensystem } from '../../numerics/eigen/quaternion';
-import { symmetricEigensystem } from '../../numerics/eigen/symmetric';
 import { vectorGroup } from '../adaptation/species';
-import { assemble } from '../blocks/assemble';
-import { algebraWidth, symmetryBlocks } from '../blocks/symmetryBlocks';
+import { symmetryBlocks } from '../blocks/symmetryBlocks';
 import { type FieldFrame } from '../field/fieldFrame';
 import { hamiltonianParameters, type CheckedProblem } from '../problem';
-import { amplitudesOf, carriedBy, reversed, type Amplitudes } from '../states/amplitudes';
+import { type Amplitudes } from '../states/amplitudes';
+import { blockLevels } from '../states/blockLevels';
 
 /** States that must be degenerate by symmetry alone, or happen to be: one energy, one spin. */
 export interface LevelSet {
@@ -18,27 +15,11 @@ export interface LevelSet {
   readonly states: readonly Amplitudes[];
 }
 
-const solvers = {
-  real: symmetricEigensystem,
-  complex: hermitianEigensystem,
-  quaternion: quaternionEigensystem,
-} as const;
-
 /** All states of a problem without magnetic field, gathered where energies are within `near` of each other; ascending. */
 export function levelSets(problem: CheckedProblem, frame: FieldFrame, near: number): LevelSet[] {
   const parameters = hamiltonianParameters(problem, frame.tensors);
-  const carry = carriedBy(frame.rotation);
-  const single: LevelSet[] = [];
-  for (const block of symmetryBlocks(problem.electrons, vectorGroup(frame.group), problem.zeta !== 0)) {
-    const { species, size, basis, S } = block;
-    const width = algebraWidth[species.algebra];
-    const { values, vectors } = solvers[species.algebra](assemble(block, parameters), size);
-    for (let k = 0; k < size; k++) {
-      const own = amplitudesOf(basis, vectors.subarray(k * size * width, (k + 1) * size * width), width);
-      const set = species.partner === 'time-reversal' ? [own, reversed(own)] : [own];
-      single.push({ energy: values[k]!, S, states: set.map(carry) });
-    }
-  }
+  const blocks = symmetryBlocks(problem.electrons, vectorGroup(frame.group), problem.zeta !== 0);
+  const single = blocks.flatMap((block) => blockLevels(block, parameters, frame.rotation));
   single.sort((a, b) => (a.S ?? 0) - (b.S ?? 0) || a.energy - b.energy);
   const sets: { energy: number; last: number; S: number | null; states: Amplitudes[] }[] = [];
   for (const { energy, S, states } of single) {

@@ -1,16 +1,14 @@
-import { hermitianEigensystem } from '../../numerics/eigen/hermitian';
-import { quaternionEigensystem } from '../../numerics/eigen/quaternion';
-import { symmetricEigensystem } from '../../numerics/eigen/symmetric';
 import { identityRotation, type Quaternion } from '../../symmetry';
 import { vectorGroup } from '../adaptation/species';
-import { assemble, type Parameters } from '../blocks/assemble';
-import { algebraWidth, completeBlock, symmetryBlocks, type SymmetryBlock } from '../blocks/symmetryBlocks';
+import { type Parameters } from '../blocks/assemble';
+import { completeBlock, symmetryBlocks, type SymmetryBlock } from '../blocks/symmetryBlocks';
 import { fieldFrame } from '../field/fieldFrame';
 import { fieldTrace } from '../field/tensorComponents';
 import { freeIon } from '../freeIon/reducedElements';
 import { magneticParameters } from '../levels/solveBlocks';
 import { checkProblem, hamiltonianParameters, type CheckedProblem, type LevelProblem } from '../problem';
-import { amplitudesOf, carriedBy, reversed, type Amplitudes } from './amplitudes';
+import { type Amplitudes } from './amplitudes';
+import { blockLevels } from './blockLevels';
 import { determinantBasis, type DeterminantBasis } from './determinantBasis';
 import { determinantWriter } from './toDeterminants';
 
@@ -87,25 +85,12 @@ function magneticStates(problem: CheckedProblem): RawState[] {
   return blockStates(completeBlock(problem.electrons), parameters, identityRotation);
 }
 
+/** Every state of a block, one for each M_S where the spin is left aside. */
 function blockStates(block: SymmetryBlock, parameters: Parameters, rotation: Quaternion): RawState[] {
-  const { species, size, basis, S } = block;
-  const width = algebraWidth[species.algebra];
-  const matrix = assemble(block, parameters);
-  const solve = {
-    real: symmetricEigensystem,
-    complex: hermitianEigensystem,
-    quaternion: quaternionEigensystem,
-  };
-  const { values, vectors } = solve[species.algebra](matrix, size);
-  const carry = carriedBy(rotation);
-  const found: RawState[] = [];
-  for (let k = 0; k < size; k++) {
-    const own = amplitudesOf(basis, vectors.subarray(k * size * width, (k + 1) * size * width), width);
-    const set = species.partner === 'time-reversal' ? [own, reversed(own)] : [own];
-    for (const amplitudes of set.map(carry)) {
-      if (S === null) found.push({ energy: values[k]!, S, mS: null, amplitudes });
-      else for (let mS = S; mS >= -S; mS--) found.push({ energy: values[k]!, S, mS, amplitudes });
-    }
-  }
-  return found;
+  return blockLevels(block, parameters, rotation).flatMap(({ energy, S, states }) =>
+    states.flatMap((amplitudes): RawState[] => {
+      if (S === null) return [{ energy, S, mS: null, amplitudes }];
+      return Array.from({ length: 2 * S + 1 }, (_, i) => ({ energy, S, mS: S - i, amplitudes }));
+    }),
+  );
 }
