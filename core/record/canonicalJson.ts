@@ -26,7 +26,13 @@ function write(value: unknown, path: string, depth: number): string {
   }
   if (depth > deepest) refuse(path, `nested deeper than ${deepest}`);
   if (Array.isArray(value)) {
-    return `[${value.map((item, i) => write(item, `${path}[${i}]`, depth + 1)).join(',')}]`;
+    const items = value.map((item: unknown, i) =>
+      // Long lists of numbers: their paths are built only where one is refused.
+      typeof item === 'number' && Number.isFinite(item)
+        ? String(item)
+        : write(item, `${path}[${i}]`, depth + 1),
+    );
+    return `[${items.join(',')}]`;
   }
   const object = value as Record<string, unknown>;
   const parts: string[] = [];

@@ -31,11 +31,16 @@ export function contentChecksum(content: Partial<BundleContent>): string {
  * content gives the same bytes. Throws a SpinhueError that names the path of a value which JSON cannot hold.
  */
 export function* bundlePieces(content: Partial<BundleContent>): Generator<string> {
-  const checksum = contentChecksum(content);
+  const pieces = [...contentPieces(content)];
+  const hash = sha256.create();
+  for (const piece of pieces) hash.update(piece);
+  const checksum = `sha256:${bytesToHex(hash.digest())}`;
   yield `{"format":${JSON.stringify(bundleFormat)},"version":${bundleVersion},"checksum":"${checksum}",\n"content":`;
-  for (const piece of contentPieces(content)) yield /^,?[{"]/.test(piece) ? `\n${piece}` : piece;
+  for (const piece of pieces) yield startsRow.test(piece) ? `\n${piece}` : piece;
   yield '\n}\n';
 }
+
+const startsRow = /^,?[{"]/;
 
 /** The bundle as one string. */
 export const writeBundle = (content: Partial<BundleContent>): string => [...bundlePieces(content)].join('');
