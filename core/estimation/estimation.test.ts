@@ -111,8 +111,8 @@ describe('routes, in order of trust', () => {
   });
 
   it('takes f g where both are in print', () => {
-    const { fields } = fieldOf('V', 2, { h2o: 6 });
-    expect(fields.high.value).toBe(12_000);
+    const { fields } = fieldOf('V', 2, { nh3: 6 });
+    expect(fields.high.value).toBe(1.25 * 12_000);
     expect(fields.high.route).toBe('published-factors');
   });
 

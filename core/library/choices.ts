@@ -1,5 +1,6 @@
 import type { IonRecord } from './ions';
-import type { Anchor, LigandRecord } from './ligands';
+import type { LigandRecord } from './ligands';
+import { moreAnchors } from './moreAnchors';
 import type { SourcedValue } from './sourced';
 
 /**
@@ -17,6 +18,14 @@ const nistTerm = (term: string, recalled: number): string =>
   `free-ion term ${term} of the NIST level list with the B given here; the recalled figure of 1954, ${recalled}, is not confirmed by it`;
 
 const choices: readonly Choice[] = [
+  {
+    ion: 'Ti3+',
+    quantity: 'g',
+    value: 18_900,
+    reason:
+      'centre of the Jahn-Teller pair of [Ti(H2O)6]3+ at 20 300 (maximum) and 17 400 (shoulder); the maximum itself, ' +
+      'which is what is quoted as its 10Dq, is kept as the value for water',
+  },
   { ion: 'Mn2+', quantity: 'C0', value: 3649, reason: nistTerm('4G = 10B + 5C', 3850) },
   { ion: 'Fe3+', quantity: 'C0', value: 4426, reason: nistTerm('4G = 10B + 5C', 4800) },
   { ion: 'Mn3+', quantity: 'C0', value: 4275, reason: nistTerm('3H = 4B + 4C', 4450) },
@@ -125,68 +134,9 @@ const ligandChoices: readonly LigandChoice[] = [
   },
 ];
 
-/** 10Dq of complexes that the anchors of the ligand table lack. */
-const moreAnchors: Readonly<Record<string, readonly Anchor[]>> = {
-  cn: [
-    {
-      metal: 'Fe3+',
-      complex: '[Fe(CN)6]3-',
-      tenDq: 35_000,
-      spin: 'low',
-      geometry: null,
-      range: [32_000, 35_000],
-      source: 'from memory of H. B. Gray & N. A. Beach, J. Am. Chem. Soc. 1963, 85, 2922',
-      status: 'memory',
-      confidence: 'medium',
-      note: null,
-    },
-    {
-      metal: 'Fe2+',
-      complex: '[Fe(CN)6]4-',
-      tenDq: 33_800,
-      spin: 'low',
-      geometry: null,
-      range: [31_000, 34_000],
-      source: 'from memory of H. B. Gray & N. A. Beach, J. Am. Chem. Soc. 1963, 85, 2922',
-      status: 'memory',
-      confidence: 'medium',
-      note: null,
-    },
-    {
-      metal: 'Ni2+',
-      complex: '[Ni(CN)4]2-',
-      tenDq: 30_000,
-      spin: null,
-      geometry: 'square-planar',
-      range: [24_950, 32_000],
-      source:
-        'shoulder near 22 500 cm-1 (from memory of H. B. Gray & C. J. Ballhausen, J. Am. Chem. Soc. 1963, 85, 260) with ' +
-        'exact d8 levels; the first-order formulas of that paper gave 24 950',
-      status: 'memory',
-      confidence: 'low',
-      note: null,
-    },
-  ],
-  en: [
-    {
-      metal: 'Ni2+',
-      complex: '[Ni(en)3]2+, first maximum in water',
-      tenDq: 11_200,
-      spin: null,
-      geometry: null,
-      range: [11_200, 11_500],
-      source:
-        'from memory of band tables after A. B. P. Lever, Inorganic Electronic Spectroscopy (1984); sources differ',
-      status: 'memory',
-      confidence: 'medium',
-      note: null,
-    },
-  ],
-};
-
 export function withLigandChoices(ligand: LigandRecord): LigandRecord {
   const choice = ligandChoices.find((each) => each.ligand === ligand.id);
-  const anchors = [...ligand.anchors, ...(moreAnchors[ligand.id] ?? [])];
+  const anchors = [...ligand.anchors, ...moreAnchors(ligand.id)];
   return choice === undefined
     ? { ...ligand, anchors }
     : { ...ligand, anchors, h: chosen(ligand.h, choice.h, choice.reason) };

@@ -33,7 +33,7 @@ describe('predict', () => {
 
   it('draws relatives together: the same cause of doubt moves both the same way', () => {
     const bands = [
-      { ...candidate, ligands: { h2o: 6 }, metal: 'V', oxidationState: 2 },
+      { ...candidate, ligands: { en: 3 }, metal: 'V', oxidationState: 2 },
       { ...candidate, ligands: { nh3: 6 }, metal: 'V', oxidationState: 2 },
     ].map((input) => predict(input));
     const shares = bands.map((outcome) => (outcome.ok ? outcome.prediction.tenDq.shares! : []));
