@@ -8,6 +8,8 @@ export interface CommandIo {
   readJson(path: string): Promise<unknown>;
   /** A line for a person, on standard error. */
   note(line: string): void;
+  /** The answer is printed all the same, but the exit code says that not all is well. */
+  fail?(): void;
 }
 
 /** The arguments after the command's name, sorted into operands and `--name [value]` options. */
