@@ -1,6 +1,6 @@
-import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { type FieldSpec, solveStates } from '../dshell';
+import { computedCases, type ComputedCurve } from '../testing/levels/computedCases';
 import { boltzmann_cm1_K } from '../units';
 import {
   groundDoubletG,
@@ -17,36 +17,23 @@ import {
   zeroFieldSplitting,
 } from './index';
 
-interface Reference {
-  readonly chi_xyz_cm3_mol: readonly (readonly [number, number, number])[];
-  readonly mu_eff_iso_BM: readonly number[];
-}
-interface Case extends MagneticProblem {
-  readonly id: string;
-  readonly subkind: string;
-  readonly magnetic: {
-    readonly k: number;
-    readonly ge: number;
-    readonly T_K: number[];
-    readonly B_T: number;
-    readonly vanVleck_zeroField: Reference;
-    readonly thermal_0p1T: Reference;
-    readonly groundDoublet_g?: { readonly principal_abs_ascending: number[]; readonly G_xyz: number[][] };
-    readonly zfs?: { readonly D_cm1: number; readonly E_cm1: number; readonly levels_cm1: number[] };
-  };
-}
+const magnetic = computedCases().flatMap(({ magnetic: answers, ...problem }) =>
+  answers === undefined ? [] : [{ ...problem, magnetic: answers }],
+);
 
-/** Computed by an independent program over the full determinant space; see core/testing/levels/CONVENTIONS.md. */
-const file = new URL('../testing/levels/data/cases.json', import.meta.url);
-const { cases } = JSON.parse(readFileSync(file, 'utf8')) as { cases: Case[] };
-const magnetic = cases.filter((each) => each.magnetic !== undefined);
-
-const problemOf = ({ dElectrons, B, C, zeta, field, magnetic: { k, ge } }: Case): MagneticProblem => ({
+const problemOf = ({
+  dElectrons,
+  B,
+  C,
+  zeta,
+  field,
+  magnetic: { k, ge },
+}: (typeof magnetic)[number]): MagneticProblem => ({
   ...{ dElectrons, B, C, field, orbitalReduction: k, ge },
   ...(zeta === undefined ? {} : { zeta }),
 });
 
-function expectCurve(found: ReturnType<typeof vanVleckSusceptibility>, expected: Reference): void {
+function expectCurve(found: ReturnType<typeof vanVleckSusceptibility>, expected: ComputedCurve): void {
   found.forEach(({ chi_xyz, muEff }, i) => {
     chi_xyz.forEach((chi, axis) =>
       expect(Math.abs(chi / expected.chi_xyz_cm3_mol[i]![axis]! - 1)).toBeLessThan(1e-6),

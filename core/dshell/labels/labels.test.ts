@@ -1,5 +1,5 @@
-import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
+import { computedCases } from '../../testing/levels/computedCases';
 import { compose, rotationAbout } from '../../symmetry';
 import { turnedField } from '../field/symmetryAxes';
 import { fieldMatrix } from '../field/fieldMatrix';
@@ -7,22 +7,8 @@ import { type FieldSpec } from '../field/fieldSpec';
 import { type LevelProblem } from '../problem';
 import { labelLevels, type LabelledLevels } from './labelLevels';
 
-interface Case extends LevelProblem {
-  readonly id: string;
-  readonly labelGroup: string | null;
-  readonly levels: readonly {
-    readonly energy_cm1: number;
-    readonly degeneracy: number;
-    readonly multiplicity: number | null;
-    readonly label: string | null;
-  }[];
-}
-
-/** Computed by an independent program over the full determinant space; see core/testing/levels/CONVENTIONS.md. */
-const file = new URL('../../testing/levels/data/cases.json', import.meta.url);
-const { cases } = JSON.parse(readFileSync(file, 'utf8')) as { cases: Case[] };
 /** The large spaces with spin-orbit coupling are left to the longer checks. */
-const named = cases.filter(
+const named = computedCases().filter(
   ({ labelGroup, zeta = 0, dElectrons: n }) => labelGroup !== null && (zeta === 0 || n < 4 || n > 6),
 );
 

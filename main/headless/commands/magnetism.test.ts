@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import type { CommandIo } from '../command';
+import { jsonIo } from '../../testing/jsonIo';
 import { magnetism } from './magnetism';
 
 interface Answer {
@@ -11,16 +11,8 @@ interface Answer {
   readonly error?: { code: string; field: string };
 }
 
-const run = async (input: unknown): Promise<Answer[]> => {
-  const refuse = () => Promise.reject(new Error('not used'));
-  const io: CommandIo = {
-    readJson: () => Promise.resolve(input),
-    readBytes: refuse,
-    readText: refuse,
-    note: () => {},
-  };
-  return (await magnetism.run({ operands: ['magnetism.json'], options: new Map() }, io)) as Answer[];
-};
+const run = async (input: unknown): Promise<Answer[]> =>
+  (await magnetism.run({ operands: ['magnetism.json'], options: new Map() }, jsonIo(input))) as Answer[];
 
 const copper = {
   ...{ id: 'cu', dElectrons: 9, zeta: 0, field: { type: 'tetragonal', tenDq: 12_000, Ds: 800, Dt: 300 } },
@@ -71,7 +63,7 @@ describe('magnetism', () => {
       [{ ge: 'two' }, 'wrong-type', 'ge'],
       [{ orbitalReduction: -0.5 }, 'out-of-range', 'orbitalReduction'],
       [{ field_T: -1 }, 'out-of-range', 'field_T'],
-      [{ dElectrons: 0 }, 'out-of-range', 'dElectrons'],
+      [{ dElectrons: 10, B: 900, C: 3800 }, 'out-of-range', 'dElectrons'],
     ];
     const answers = await run([...bad.map(([change]) => ({ ...copper, ...change })), copper]);
     bad.forEach(([, code, field], i) => expect(answers[i]!.error).toMatchObject({ code, field }));

@@ -1,17 +1,9 @@
 import { describe, expect, it } from 'vitest';
-import type { CommandIo } from '../command';
+import { jsonIo } from '../../testing/jsonIo';
 import { terms } from './terms';
 
-const run = (input: unknown): Promise<unknown> => {
-  const refuse = () => Promise.reject(new Error('not used'));
-  const io: CommandIo = {
-    readJson: () => Promise.resolve(input),
-    readBytes: refuse,
-    readText: refuse,
-    note: () => {},
-  };
-  return terms.run({ operands: ['terms.json'], options: new Map() }, io);
-};
+const run = (input: unknown): Promise<unknown> =>
+  terms.run({ operands: ['terms.json'], options: new Map() }, jsonIo(input));
 
 interface Answer {
   id?: string;
