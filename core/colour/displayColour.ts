@@ -1,11 +1,6 @@
-import {
-  convertLrgbToOklab,
-  convertLrgbToRgb,
-  convertOklabToLrgb,
-  convertRgbToLrgb,
-  convertXyz65ToRgb,
-} from 'culori/fn';
+import { convertLrgbToRgb, convertRgbToLrgb, convertXyz65ToRgb } from 'culori/fn';
 import { adapt, apply } from './chromaticAdaptation';
+import { linearToOklab, oklabToLinear } from './oklab';
 import type { Triple } from './tristimulus';
 
 /** White of sRGB, x 0.3127 and y 0.3290 (IEC 61966-2-1), Y = 100. */
@@ -18,14 +13,14 @@ const slack = 1e-4;
 const noticeable = 0.02;
 
 const clip = (value: number): number => Math.max(0, Math.min(1, value));
-const step = (value: number): string =>
-  Math.round(255 * clip(value))
-    .toString(16)
-    .padStart(2, '0');
+const clipped = ([r, g, b]: Triple): Triple => [clip(r), clip(g), clip(b)];
+const hexPairs = Array.from({ length: 256 }, (_, value) => value.toString(16).padStart(2, '0'));
+const step = (value: number): string => hexPairs[Math.round(255 * clip(value))]!;
 
 /** `#rrggbb` of linear channels, each clipped to 0 to 1. */
-function hexOf([r, g, b]: Triple): string {
-  const rgb = convertLrgbToRgb({ r: clip(r), g: clip(g), b: clip(b) });
+function hexOf(linear: Triple): string {
+  const [r, g, b] = clipped(linear);
+  const rgb = convertLrgbToRgb({ r, g, b });
   return `#${step(rgb.r)}${step(rgb.g)}${step(rgb.b)}`;
 }
 
@@ -60,42 +55,28 @@ export function isInSrgb([r, g, b]: Triple, within = slack): boolean {
   return r >= least && r <= most && g >= least && g <= most && b >= least && b <= most;
 }
 
-/** OKLab (B. Ottosson, 2020) of linear sRGB channels, which may lie outside the gamut. */
-export function oklabOf([r, g, b]: Triple): Triple {
-  const { l, a, b: beta } = convertLrgbToOklab({ r, g, b });
-  return [l, a, beta];
-}
-
-function fromOklab(l: number, a: number, b: number): Triple {
-  const linear = convertOklabToLrgb({ l, a, b });
-  return [linear.r, linear.g, linear.b];
-}
-
 /**
  * The nearest colour a screen can show: chroma in OKLCh is reduced until what clipping would still change cannot be
  * noticed (gamut mapping of CSS Color Module Level 4, section 13.2), so hue and lightness stay.
  */
 export function reduceChroma(linear: Triple): Triple {
   if (isInSrgb(linear, 0)) return linear;
-  const [l, a, b] = oklabOf(linear);
-  if (l >= 1) return [1, 1, 1];
-  if (l <= 0) return [0, 0, 0];
-  let shown: Triple = [clip(linear[0]), clip(linear[1]), clip(linear[2])];
-  const differs = (share: number, candidate: Triple): number => {
-    shown = [clip(candidate[0]), clip(candidate[1]), clip(candidate[2])];
-    const [lightness, green, blue] = oklabOf(shown);
-    return Math.hypot(lightness - l, green - share * a, blue - share * b);
-  };
-  let [kept, refused] = [0, 1];
+  const [lightness, a, b] = linearToOklab(...linear);
+  if (lightness >= 1) return [1, 1, 1];
+  if (lightness <= 0) return [0, 0, 0];
   const chroma = Math.hypot(a, b);
+  let kept = 0;
+  let refused = 1;
   while ((refused - kept) * chroma > 2e-4) {
     const share = (kept + refused) / 2;
-    const candidate = fromOklab(l, share * a, share * b);
-    if (isInSrgb(candidate, 0) || differs(share, candidate) <= noticeable) kept = share;
+    const candidate = oklabToLinear(lightness, share * a, share * b);
+    const shown = clipped(candidate);
+    const [l2, a2, b2] = linearToOklab(...shown);
+    const change = (l2 - lightness) ** 2 + (a2 - share * a) ** 2 + (b2 - share * b) ** 2;
+    if (change <= noticeable * noticeable) kept = share;
     else refused = share;
   }
-  const reduced = fromOklab(l, kept * a, kept * b);
-  return [clip(reduced[0]), clip(reduced[1]), clip(reduced[2])];
+  return clipped(oklabToLinear(lightness, kept * a, kept * b));
 }
 
 export interface DisplayColour {
@@ -118,7 +99,7 @@ export function displayColour(xyz: Triple, white: Triple): DisplayColour {
     hex: inGamut ? hexClipped : hexOf(reduceChroma(linear)),
     hexClipped,
     linear,
-    oklab: oklabOf(linear),
+    oklab: linearToOklab(...linear),
   };
 }
 

@@ -2,7 +2,14 @@ import { describe, expect, it } from 'vitest';
 import { estimate } from '../estimation';
 import { statedInput, type StatedComplex } from '../testing/bandInput';
 import { fromWavenumber, toWavenumber } from '../units';
-import { axialComponents, predictBands, propagatedSigma, smallestSigma_cm1, type Band } from './index';
+import {
+  axialComponents,
+  commonDoubts,
+  predictBands,
+  propagatedSigma,
+  smallestSigma_cm1,
+  type Band,
+} from './index';
 
 const bandsOf = (complex: StatedComplex): readonly Band[] => predictBands(statedInput(complex)).bands;
 const dd = (complex: StatedComplex): Band[] =>
@@ -126,11 +133,14 @@ describe('certainty of bands', () => {
   it('knows that one cause moves 10Dq and B together', () => {
     const slope = { tenDq: 1, B: 10, C: 0 };
     const sigmaOf = (other: string, sign: number): number =>
-      propagatedSigma(slope, {
-        tenDq: doubtful(17_400, 'distance', 500),
-        racahB: doubtful(725, other, sign * 30),
-        racahC: doubtful(2_900, 'none', 0),
-      });
+      propagatedSigma(
+        slope,
+        commonDoubts({
+          tenDq: doubtful(17_400, 'distance', 500),
+          racahB: doubtful(725, other, sign * 30),
+          racahC: doubtful(2_900, 'none', 0),
+        }),
+      );
     expect(sigmaOf('distance', 1)).toBeCloseTo(800, 6);
     expect(sigmaOf('distance', -1)).toBeCloseTo(200, 6);
     expect(sigmaOf('another', 1)).toBeCloseTo(Math.hypot(500, 300), 6);

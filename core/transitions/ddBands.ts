@@ -39,7 +39,7 @@ function allowedBand(context: DdContext, intensity: SpinAllowedIntensity, rule: 
   const moved = electronsMoved(input.levels[0]!.configurations, level.configurations);
   const reasons = [`${rule}${group}`];
   if (moved > 1) reasons.push('a jump of two electrons, seen only by configuration interaction');
-  return levelBand(input, level, { kind: 'spin-allowed', molarAbsorptivity, width_cm1, rule, reasons });
+  return levelBand(context, level, { kind: 'spin-allowed', molarAbsorptivity, width_cm1, rule, reasons });
 }
 
 function forbiddenBand(
@@ -52,7 +52,7 @@ function forbiddenBand(
   const zeta = input.zeta.value;
   const own = levelWidth(context, level);
   const multiplicity = input.levels[0]!.multiplicity;
-  return levelBand(input, level, {
+  return levelBand(context, level, {
     ...borrowedBand(level, multiplicity, allowed, zeta ?? usualZeta_cm1, typical, own),
     kind: 'spin-forbidden',
     rule: 'spin-forbidden',

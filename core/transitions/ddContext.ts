@@ -1,6 +1,7 @@
 import { ligandCovalency } from '../estimation/nephelauxetic';
 import { defaultLibrary } from '../library';
 import type { BandInput } from './bandInput';
+import type { CommonDoubts } from './bandSigma';
 import type { CoordinationSymmetry } from './coordinationSymmetry';
 import type { GroundState } from './groundState';
 import type { LaporteInput } from './intensity/laporte';
@@ -10,6 +11,7 @@ export interface DdContext {
   readonly input: BandInput;
   readonly ground: GroundState;
   readonly symmetry: CoordinationSymmetry;
+  readonly doubts: CommonDoubts;
   /** Lowest charge-transfer band from which d-d bands borrow, cm⁻¹; null where none is estimated. */
   readonly edge_cm1: number | null;
 }

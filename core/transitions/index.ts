@@ -2,7 +2,7 @@ export type { Band, BandKind } from './types';
 export type { BandInput, BandLevel, BandPrediction, DonorStrength } from './bandInput';
 export { predictBands } from './predictBands';
 export { emptyBandDraws, type BandDraws } from './bandDraws';
-export { propagatedSigma, smallestSigma_cm1 } from './bandSigma';
+export { commonDoubts, propagatedSigma, smallestSigma_cm1, type CommonDoubts } from './bandSigma';
 export { bandWidth } from './bandWidth';
 export { coordinationSymmetry, hasInversion, type CoordinationSymmetry } from './coordinationSymmetry';
 export { axialComponents, type AxialComponent, type PlacedDonor } from './axialSplitting';

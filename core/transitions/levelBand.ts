@@ -1,5 +1,6 @@
 import { wavelength_nm } from '../units';
-import type { BandInput, BandLevel } from './bandInput';
+import type { BandLevel } from './bandInput';
+import type { DdContext } from './ddContext';
 import { propagatedSigma, smallestSigma_cm1 } from './bandSigma';
 import { configurationText, electronsMoved } from './intensity/electronsMoved';
 import { absorptivityRange, intensityWords, roundAbsorptivity } from './intensity/intensityClass';
@@ -15,7 +16,7 @@ export interface LevelStrength {
 }
 
 /** The band from the ground level into one level. */
-export function levelBand(input: BandInput, level: BandLevel, strength: LevelStrength): Band {
+export function levelBand({ input, doubts }: DdContext, level: BandLevel, strength: LevelStrength): Band {
   const { kind, molarAbsorptivity, width_cm1, rule, reasons } = strength;
   const ground = input.levels[0]!;
   const range = absorptivityRange(molarAbsorptivity, kind);
@@ -23,7 +24,7 @@ export function levelBand(input: BandInput, level: BandLevel, strength: LevelStr
   const configuration = configurationText(level.configurations, even);
   return {
     energy_cm1: level.energy,
-    sigma_cm1: Math.max(smallestSigma_cm1, propagatedSigma(level.slope, input)),
+    sigma_cm1: Math.max(smallestSigma_cm1, propagatedSigma(level.slope, doubts)),
     wavelength_nm: wavelength_nm(level.energy),
     multiplicity: level.multiplicity,
     label: level.label,

@@ -1,5 +1,6 @@
 import type { BandInput, BandPrediction } from './bandInput';
 import { ctSigma_cm1 } from './chargeTransfer/ctBand';
+import { commonDoubts } from './bandSigma';
 import { ligandToMetalBands } from './chargeTransfer/ligandToMetal';
 import { metalToLigandBands } from './chargeTransfer/metalToLigand';
 import { chargeTransferRemarks } from './chargeTransfer/remarks';
@@ -30,7 +31,7 @@ export function predictBands(given: BandInput): BandPrediction {
   const edges = transfer.filter(({ sigma_cm1 }) => sigma_cm1 <= ctSigma_cm1.own);
   const edge_cm1 = edges.length === 0 ? null : Math.min(...edges.map(({ energy_cm1 }) => energy_cm1));
   const hasDd = input.dElectrons > 0 && input.dElectrons < 10;
-  const dd = hasDd ? ddBands({ input, ground, symmetry, edge_cm1 }) : [];
+  const dd = hasDd ? ddBands({ input, ground, symmetry, doubts: commonDoubts(input), edge_cm1 }) : [];
   const bands = [...dd, ...transfer].sort((a, b) => a.energy_cm1 - b.energy_cm1);
   return {
     bands,

@@ -1,8 +1,14 @@
 import type { BandKind } from '../types';
 
 /** Two significant figures at most: these are orders of magnitude. */
-export const roundAbsorptivity = (value: number): number =>
-  value === 0 ? 0 : Number(value.toPrecision(value < 0.1 ? 1 : 2));
+export function roundAbsorptivity(value: number): number {
+  if (!(value > 0)) return 0;
+  const figures = value < 0.1 ? 1 : 2;
+  const power = figures - 1 - Math.floor(Math.log10(value));
+  return power >= 0
+    ? Math.round(value * 10 ** power) / 10 ** power
+    : Math.round(value / 10 ** -power) * 10 ** -power;
+}
 
 /** Factor by which the absorptivity may be off either way, 95 %. */
 export const absorptivityFactor: Readonly<Record<BandKind, number>> = {
@@ -20,8 +26,7 @@ export function absorptivityRange(typical: number, kind: BandKind): readonly [nu
   return [roundAbsorptivity(typical / factor), roundAbsorptivity(typical * factor)];
 }
 
-const number = (value: number): string =>
-  value >= 1000 ? value.toLocaleString('en-GB').replaceAll(',', ' ') : String(value);
+const number = (value: number): string => String(value).replace(/(\d)(?=(\d{3})+$)/g, '$1 ');
 
 /** `spin-allowed, vibronic, 3-50` */
 export const intensityWords = (rule: string, [low, high]: readonly [number, number]): string =>
