@@ -1,8 +1,10 @@
 /** A project from its creation over a restart to its export and return, as a chemist would do it. */
 import { readFile } from 'node:fs/promises';
 import type { BrowserContext, Page } from '@playwright/test';
-import { expect, expectQuiet, openProfile, test, watch } from '../workbench';
-import { addByMouse, arrived, createProject, formulas } from './steps';
+import { expectQuiet, openProfile, test, watch } from '../workbench';
+import { addByMouse, arrived, createProject, expect, formulas } from './steps';
+
+test.setTimeout(180_000);
 
 const chromiumAmmine = { metal: 'chromium', state: 'III', ligands: { ammonia: 6 } };
 

@@ -1,4 +1,7 @@
-import { expect, type Page } from '@playwright/test';
+import { expect as quick, type Page } from '@playwright/test';
+
+/** The machine may be busy with other things. */
+export const expect = quick.configure({ timeout: 30_000 });
 
 /** The frame is drawn and the list of projects read. */
 export async function arrived(page: Page): Promise<void> {

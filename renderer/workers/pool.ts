@@ -27,12 +27,19 @@ export class EstimatePool {
     options: OneOptions = {},
     signal?: AbortSignal,
   ): Promise<PredictionOutcome> {
-    return this.#singleClient().one(input, overlay, options, signal);
+    // Draws take their time: they must not keep the next question waiting.
+    const client = (options.draws ?? 0) > 0 ? this.#bulkClient(0) : this.#singleClient();
+    return client.one(input, overlay, options, signal);
   }
 
   /** Level lines for a diagram. */
   diagram(request: DiagramRequest, signal?: AbortSignal): Promise<readonly LevelLine[]> {
     return this.#singleClient().diagram(request, signal);
+  }
+
+  #bulkClient(place: number): EstimateClient {
+    while (this.#bulk.length <= place) this.#bulk.push(new EstimateClient(this.#start()));
+    return this.#bulk[place]!;
   }
 
   #singleClient(): EstimateClient {
@@ -48,7 +55,6 @@ export class EstimatePool {
     signal?: AbortSignal,
   ): Promise<void> {
     const wanted = Math.min(this.#size, Math.ceil(inputs.length / portion));
-    while (this.#bulk.length < wanted) this.#bulk.push(new EstimateClient(this.#start()));
     let next = 0;
     const work = async (client: EstimateClient): Promise<void> => {
       while (next < inputs.length) {
@@ -57,7 +63,7 @@ export class EstimatePool {
         await client.many(share, overlay, take, signal);
       }
     };
-    await Promise.all(this.#bulk.slice(0, wanted).map(work));
+    await Promise.all(Array.from({ length: wanted }, (_, place) => work(this.#bulkClient(place))));
   }
 
   close(): void {

@@ -3,6 +3,7 @@ import { EmptyState, ErrorPanel } from '../../parts';
 import { linkTo, useRouter } from '../router/RouterContext';
 import { useProjectState } from '../session/ProjectSession';
 import type { ViewDefinition } from '../view';
+import { ViewHeader } from './ViewHeader';
 import { ViewErrorBoundary } from './ViewErrorBoundary';
 
 const home = (
@@ -26,9 +27,12 @@ export function ViewPort({ views }: { readonly views: readonly ViewDefinition[] 
             <Placed view={view} />
           </Suspense>
         ) : (
-          <EmptyState title="There is no such view" actions={home}>
-            The address names “{address.view}”, which this version does not have.
-          </EmptyState>
+          <>
+            <ViewHeader title="Not found" />
+            <EmptyState title="There is no such view" actions={home}>
+              The address names “{address.view}”, which this version does not have.
+            </EmptyState>
+          </>
         )}
       </ViewErrorBoundary>
     </main>
@@ -53,19 +57,22 @@ function Placed({ view }: { readonly view: ViewDefinition }) {
   }
   if (project.state === 'missing' || address.project === null) {
     return (
-      <EmptyState
-        title="This project is not here"
-        actions={
-          <>
-            {home}
-            <a className="button" href={linkTo({ view: 'bin' })}>
-              Look into the bin
-            </a>
-          </>
-        }
-      >
-        It may have been deleted, or it belongs to another profile on this machine.
-      </EmptyState>
+      <>
+        <ViewHeader title="Not found" />
+        <EmptyState
+          title="This project is not here"
+          actions={
+            <>
+              {home}
+              <a className="button" href={linkTo({ view: 'bin' })}>
+                Look into the bin
+              </a>
+            </>
+          }
+        >
+          It may have been deleted, or it belongs to another profile on this machine.
+        </EmptyState>
+      </>
     );
   }
   return <p className="soft">Opening the project…</p>;

@@ -14,16 +14,19 @@ export default function EntryView() {
   if (address.item !== null && candidate === null) {
     if (rows.state === 'reading') return <p className="soft">Opening…</p>;
     return (
-      <EmptyState
-        title="This candidate is not here"
-        actions={
-          <a className="button" href={linkTo({ view: 'candidates', project: project.id })}>
-            All candidates
-          </a>
-        }
-      >
-        It may lie in the bin.
-      </EmptyState>
+      <>
+        <ViewHeader title="Not found" />
+        <EmptyState
+          title="This candidate is not here"
+          actions={
+            <a className="button" href={linkTo({ view: 'candidates', project: project.id })}>
+              All candidates
+            </a>
+          }
+        >
+          It may lie in the bin.
+        </EmptyState>
+      </>
     );
   }
   return (

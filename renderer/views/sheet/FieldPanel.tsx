@@ -1,6 +1,7 @@
 import type { Estimate, EstimateRoute } from '../../../core/estimation/types';
 import type { Prediction } from '../../../core/prediction/types';
 import { NumberWithRange, Why } from '../../parts';
+import { QuantityLine } from './QuantityLine';
 
 const routeWords: Record<EstimateRoute, string> = {
   'measured-complex': 'measured on this very complex',
@@ -36,16 +37,14 @@ interface QuantityProps {
 
 function Quantity({ name, meaning, estimate }: QuantityProps) {
   return (
-    <div>
-      <div className="quantity-line">
-        <dt>
+    <QuantityLine
+      name={
+        <>
           <abbr title={meaning}>{name}</abbr> <span className="small">{routeWords[estimate.route]}</span>
-        </dt>
-        <dd>
-          <NumberWithRange kind="interval" value={estimate.value} sigma={estimate.sigma} />
-        </dd>
-      </div>
-      <Why reasons={estimate.reasons} of={name} />
-    </div>
+        </>
+      }
+      value={<NumberWithRange kind="interval" value={estimate.value} sigma={estimate.sigma} />}
+      account={<Why reasons={estimate.reasons} of={name} />}
+    />
   );
 }

@@ -4,6 +4,7 @@ import { inputOf } from '../../app/session/candidateInput';
 import { useVersion } from '../../app/session/observable';
 import { useProject } from '../../app/session/ProjectSession';
 import { usePrediction } from '../../app/session/usePrediction';
+import { ViewHeader } from '../../app/shell/ViewHeader';
 import { EmptyState, ErrorPanel } from '../../parts';
 import type { Candidate } from '../../../core/record/project';
 import { Sheet } from './Sheet';
@@ -20,21 +21,24 @@ export default function SheetView() {
   if (candidate) return <OfCandidate key={candidate.id} candidate={candidate} />;
   if (rows.state === 'reading') return <p className="soft">Opening…</p>;
   return (
-    <EmptyState
-      title="This candidate is not here"
-      actions={
-        <>
-          <a className="button" href={linkTo({ view: 'candidates', project: project.id })}>
-            All candidates
-          </a>
-          <a className="button" href={linkTo({ view: 'bin' })}>
-            Look into the bin
-          </a>
-        </>
-      }
-    >
-      It may have been deleted.
-    </EmptyState>
+    <>
+      <ViewHeader title="Not found" />
+      <EmptyState
+        title="This candidate is not here"
+        actions={
+          <>
+            <a className="button" href={linkTo({ view: 'candidates', project: project.id })}>
+              All candidates
+            </a>
+            <a className="button" href={linkTo({ view: 'bin' })}>
+              Look into the bin
+            </a>
+          </>
+        }
+      >
+        It may have been deleted.
+      </EmptyState>
+    </>
   );
 }
 

@@ -1,5 +1,6 @@
 import type { Prediction } from '../../../core/prediction/types';
 import { NumberWithRange, SpinBar, TermSymbol, Why } from '../../parts';
+import { QuantityLine } from './QuantityLine';
 
 /** Spin state in words and probability, ground term, moment. */
 export function SpinPanel({ prediction }: { readonly prediction: Prediction }) {
@@ -11,53 +12,47 @@ export function SpinPanel({ prediction }: { readonly prediction: Prediction }) {
       <div className="stack">
         <SpinBar spin={spin} />
         <dl className="quantities">
-          <div>
-            <div className="quantity-line">
-              <dt>
+          <QuantityLine
+            name={
+              <>
                 Ground term of d<sup>{dElectrons}</sup>
-              </dt>
-              <dd>
-                <TermSymbol label={groundTerm} />
-              </dd>
-            </div>
-          </div>
+              </>
+            }
+            value={<TermSymbol label={groundTerm} />}
+          />
           {gap && (
-            <div>
-              <div className="quantity-line">
-                <dt>Low above high spin by</dt>
-                <dd>
-                  <NumberWithRange kind="interval" value={gap.value} sigma={gap.sigma} />
-                </dd>
-              </div>
-              <Why reasons={gap.reasons} of="the gap" />
-            </div>
+            <QuantityLine
+              name="Low above high spin by"
+              value={<NumberWithRange kind="interval" value={gap.value} sigma={gap.sigma} />}
+              account={<Why reasons={gap.reasons} of="the gap" />}
+            />
           )}
           {crossoverTenDqOverB !== null && (
-            <div>
-              <div className="quantity-line">
-                <dt>Ground state changes at 10Dq/B</dt>
-                <dd className="figures">{crossoverTenDqOverB.toFixed(1)}</dd>
-              </div>
-            </div>
+            <QuantityLine
+              name="Ground state changes at 10Dq/B"
+              value={<span className="figures">{crossoverTenDqOverB.toFixed(1)}</span>}
+            />
           )}
-          <div>
-            <div className="quantity-line">
-              <dt>Magnetic moment</dt>
-              <dd>
-                <NumberWithRange
-                  kind="plain"
-                  unit="μB"
-                  value={momentSpinOnly_BM}
-                  range={momentRange_BM}
-                  figures={3}
-                />
-              </dd>
-            </div>
-            <p className="soft small">
-              Spin-only value;{' '}
-              {momentRange_BM ? 'in brackets what such ions show at room temperature.' : 'no range on file.'}
-            </p>
-          </div>
+          <QuantityLine
+            name="Magnetic moment"
+            value={
+              <NumberWithRange
+                kind="plain"
+                unit="μB"
+                value={momentSpinOnly_BM}
+                range={momentRange_BM}
+                figures={3}
+              />
+            }
+            account={
+              <span className="soft small">
+                Spin-only value;{' '}
+                {momentRange_BM
+                  ? 'in brackets what such ions show at room temperature.'
+                  : 'no range on file.'}
+              </span>
+            }
+          />
         </dl>
       </div>
     </section>
