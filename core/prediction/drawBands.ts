@@ -48,19 +48,24 @@ const sigmaThrough = (band: Band, { tenDq, B, C }: ParameterEstimates): number =
 /**
  * The bands of one complex drawn `count` times: centres move with 10Dq, B and C along their slopes, so that bands of one
  * draw belong together; the rest of each band's own standard deviation is drawn for itself. `id` names the draws that
- * belong to this complex alone.
+ * belong to this complex alone. Bands that `wanted` turns down are left out without changing the draws of the others.
  */
 export function drawBands(
   bands: readonly Band[],
   estimates: ParameterEstimates,
   count: number,
   id: string,
+  wanted: (band: Band) => boolean = () => true,
 ): BandDraws {
-  const draws = emptyBandDraws(count, bands.length);
+  const bandCount = bands.filter(wanted).length;
+  const draws = emptyBandDraws(count, bandCount);
   const tenDq = deviations(estimates.tenDq, count);
   const B = deviations(estimates.B, count);
   const C = deviations(estimates.C, count);
+  let column = 0;
   bands.forEach((band, at) => {
+    if (!wanted(band)) return;
+    const here = column++;
     const rest = Math.sqrt(Math.max(0, band.sigma_cm1 ** 2 - sigmaThrough(band, estimates) ** 2));
     const own = sharedNormals(`band:${id}:${band.label}:${at}`, count);
     const width = sharedNormals(`width:${id}:${band.kind}`, count);
@@ -71,13 +76,10 @@ export function drawBands(
     const logSigma = low > 0 && high > low ? Math.log(high / low) / 3.92 : 0;
     const logTogether = logSigma * Math.sqrt(commonStrength);
     const logApart = logSigma * Math.sqrt(1 - commonStrength);
+    const { slopeTenDq = 0, slopeB = 0, slopeC = 0 } = band;
     for (let draw = 0; draw < count; draw++) {
-      const moved =
-        (band.slopeTenDq ?? 0) * tenDq[draw]! +
-        (band.slopeB ?? 0) * B[draw]! +
-        (band.slopeC ?? 0) * C[draw]! +
-        rest * own[draw]!;
-      const index = draw * bands.length + at;
+      const moved = slopeTenDq * tenDq[draw]! + slopeB * B[draw]! + slopeC * C[draw]! + rest * own[draw]!;
+      const index = draw * bandCount + here;
       draws.energy[index] = Math.max(lowest_cm1, band.energy_cm1 + moved);
       draws.width[index] = band.width_cm1 * Math.exp(widthSigma * width[draw]!);
       const stronger = logTogether * together[draw]! + logApart * apart[draw]!;

@@ -79,6 +79,10 @@ function groundTermOf(field: FieldEstimate, levels: readonly FieldLevel[]): stri
   return 'not estimated';
 }
 
+/** A band that absorbs less than this at its strongest, or lies so far in the infrared, changes no colour. */
+const leastAbsorbance = 2e-4;
+const infrared_cm1 = 5000;
+
 /** Seen colour at the stated strength, at a third and three times it, and of draws from the uncertainties. */
 function seen(
   bands: readonly Band[],
@@ -95,10 +99,14 @@ function seen(
     ...(options.observer === undefined ? {} : { observer: options.observer }),
   };
   const count = options.draws ?? 0;
+  const strength = (conditions.concentration_mM * conditions.path_cm) / 1000;
+  const seenBand = ({ molarAbsorptivityRange, energy_cm1 }: Band): boolean =>
+    molarAbsorptivityRange[1] * strength > leastAbsorbance && energy_cm1 > infrared_cm1;
   return {
     colour: colourOfSolution(bands, viewing),
     colourAtThreeStrengths: colourAtThreeStrengths(bands, viewing),
-    cloud: count > 0 ? colourCloud(colourBulk(drawBands(bands, estimates, count, key), viewing)) : null,
+    cloud:
+      count > 0 ? colourCloud(colourBulk(drawBands(bands, estimates, count, key, seenBand), viewing)) : null,
   };
 }
 
@@ -177,6 +185,17 @@ function predictChecked(
   };
 }
 
+const libraryHashes = new WeakMap<ParameterLibrary, string>();
+
+/** Hash of a library without a parameter set over it, worked out once. */
+function hashOfLibrary(library: ParameterLibrary): string {
+  const known = libraryHashes.get(library);
+  if (known !== undefined) return known;
+  const hash = parameterHash({}, library.version);
+  libraryHashes.set(library, hash);
+  return hash;
+}
+
 /** A library laid over by a parameter set, with what a prediction records about both. */
 function prepare(options: PredictOptions): {
   library: ParameterLibrary;
@@ -188,7 +207,7 @@ function prepare(options: PredictOptions): {
     library: set === null ? base : withParameterSet(base, set).library,
     madeWith: {
       parameterSet: set === null ? `library ${base.version}` : (set.name ?? 'parameter set'),
-      parameterHash: parameterHash(set?.values ?? {}, base.version),
+      parameterHash: set === null ? hashOfLibrary(base) : parameterHash(set.values, base.version),
       modelVersion,
     },
   };

@@ -4,6 +4,7 @@ import { octahedralLevels } from './octahedralLevels';
 import { type Bench } from './report';
 import { scaling } from './scaling';
 import { spinOrbitLevels } from './spinOrbitLevels';
+import { wholeEstimate } from './wholeEstimate';
 
 /** Every bench, in the order they run. A new one is a file in this folder and a line here. */
 export const benches: readonly Bench[] = [
@@ -11,5 +12,6 @@ export const benches: readonly Bench[] = [
   lowSymmetryLevels,
   spinOrbitLevels,
   bulkCandidates,
+  wholeEstimate,
   scaling,
 ];
