@@ -11,7 +11,9 @@ export {
 } from './exchange/importProject';
 export { askForLastingStorage, type StorageState } from './persistence';
 export { blankCandidate, type CandidateFields, type NewCandidate } from './repositories/candidates';
+export { type AddedMeasurements, type Correction, type NewMeasurements } from './repositories/measurements';
 export { type ProjectFields } from './repositories/projects';
+export { type NamedBatch, type Phase } from './repositories/samples';
 export { defaultSettings, type Settings } from './repositories/settings';
 export { type Change, type Edit, type NewRow, type RecordTable, type RowOf } from './rows';
 export { openStore, type Store, type StoreOptions } from './store';

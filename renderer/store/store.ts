@@ -7,7 +7,9 @@ import { Journal } from './journal/journal';
 import { type Clock, systemClock } from './journal/writer';
 import { CandidateRepository } from './repositories/candidates';
 import { FrozenPredictionRepository, ParameterSetRepository } from './repositories/predictions';
+import { MeasurementRepository } from './repositories/measurements';
 import { ProjectRepository } from './repositories/projects';
+import { SampleRepository } from './repositories/samples';
 import { SettingsRepository } from './repositories/settings';
 
 /** Everything that views read and write. */
@@ -19,6 +21,8 @@ export interface Store {
   readonly projects: ProjectRepository;
   readonly candidates: CandidateRepository;
   readonly frozenPredictions: FrozenPredictionRepository;
+  readonly samples: SampleRepository;
+  readonly measurements: MeasurementRepository;
   readonly parameterSets: ParameterSetRepository;
   readonly settings: SettingsRepository;
   readonly bin: Bin;
@@ -44,6 +48,7 @@ export async function openStore(options: StoreOptions = {}): Promise<Store> {
   });
   const feed = new ChangeFeed(`${name}-changes`);
   const journal = new Journal(db, feed, clock);
+  const samples = new SampleRepository(db);
   return {
     db,
     clock,
@@ -52,6 +57,8 @@ export async function openStore(options: StoreOptions = {}): Promise<Store> {
     projects: new ProjectRepository(db, journal, clock),
     candidates: new CandidateRepository(db, journal),
     frozenPredictions: new FrozenPredictionRepository(db, journal),
+    samples,
+    measurements: new MeasurementRepository(db, journal, samples),
     parameterSets: new ParameterSetRepository(db),
     settings: new SettingsRepository(db),
     bin: new Bin(db, journal),

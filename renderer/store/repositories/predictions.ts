@@ -2,6 +2,24 @@ import type { Prediction } from '../../../core/prediction/types';
 import type { Candidate, FrozenPrediction, ParameterSet } from '../../../core/record/project';
 import type { SpinhueDatabase } from '../database';
 import type { Journal } from '../journal/journal';
+import type { NewRow } from '../rows';
+
+/** A prediction as the row that keeps it. */
+export const frozenRow = (
+  candidate: Candidate,
+  prediction: Prediction,
+  reason: string,
+  frozenAt: string,
+): NewRow<'frozenPredictions'> => ({
+  projectId: candidate.projectId,
+  candidateId: candidate.id,
+  frozenAt,
+  reason,
+  parameterHash: prediction.madeWith.parameterHash,
+  modelVersion: prediction.madeWith.modelVersion,
+  // Through JSON, so that what is kept is what an export will hold.
+  prediction: JSON.parse(JSON.stringify(prediction)) as Record<string, unknown>,
+});
 
 /** Predictions as they stood when frozen: added, never edited. */
 export class FrozenPredictionRepository {
@@ -21,6 +39,12 @@ export class FrozenPredictionRepository {
       .sort((one, other) => other.frozenAt.localeCompare(one.frozenAt));
   }
 
+  /** Of a whole project, by id, those in the bin too: a measurement keeps to the one it was saved under. */
+  async ofProject(projectId: string): Promise<ReadonlyMap<string, FrozenPrediction>> {
+    const all = await this.#db.frozenPredictions.where('projectId').equals(projectId).toArray();
+    return new Map(all.map((each) => [each.id, each]));
+  }
+
   freeze(
     candidate: Candidate,
     prediction: Prediction,
@@ -29,16 +53,7 @@ export class FrozenPredictionRepository {
   ): Promise<FrozenPrediction> {
     return this.#journal.record(candidate.projectId, label, async (writer) => {
       const [row] = await writer.create('frozenPredictions', [
-        {
-          projectId: candidate.projectId,
-          candidateId: candidate.id,
-          frozenAt: writer.now,
-          reason,
-          parameterHash: prediction.madeWith.parameterHash,
-          modelVersion: prediction.madeWith.modelVersion,
-          // Through JSON, so that what is kept is what an export will hold.
-          prediction: JSON.parse(JSON.stringify(prediction)) as Record<string, unknown>,
-        },
+        frozenRow(candidate, prediction, reason, writer.now),
       ]);
       return row!;
     });
