@@ -134,6 +134,15 @@ describe('conditions that cannot be', () => {
     expect(error.remedy).toMatch(/give a number/);
   });
 
+  it('a lamp nobody knows is refused with the names of those that are known', () => {
+    const candle = 'candle' as 'A';
+    const error = refusal(() =>
+      colourOfSolution([], { concentration_mM: 1, path_cm: 1, illuminant: candle }),
+    );
+    expect(error).toMatchObject({ code: 'unknown-field-value', field: 'illuminant' });
+    expect(error.remedy).toMatch(/D65/);
+  });
+
   it('a band without width is refused with its place in the list', () => {
     const error = refusal(() => colourOfSolution([band(20_000, 0, 1)], { concentration_mM: 1, path_cm: 1 }));
     expect(error.field).toBe('bands[0].width_cm1');

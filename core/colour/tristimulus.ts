@@ -1,4 +1,12 @@
-import { illuminants, observers, type IlluminantId, type ObserverId } from '../library/colourTables';
+import { SpinhueError } from '../errors';
+import {
+  illuminantIds,
+  illuminants,
+  observerIds,
+  observers,
+  type IlluminantId,
+  type ObserverId,
+} from '../library/colourTables';
 
 export type Triple = readonly [number, number, number];
 
@@ -31,13 +39,25 @@ function weigh(illuminant: IlluminantId, observer: ObserverId): ViewingWeights {
   return { illuminant, observer, x, y, z, white: [sum(x), sum(y), sum(z)] };
 }
 
+function requireKnown(field: string, found: string, known: readonly string[]): void {
+  if (known.includes(found)) return;
+  throw new SpinhueError({
+    code: 'unknown-field-value',
+    field,
+    message: `${field} is ${JSON.stringify(found)}`,
+    remedy: `give one of ${known.join(', ')}`,
+  });
+}
+
 const kept = new Map<string, ViewingWeights>();
 
-/** Weight table of an illuminant and an observer (D65 and 2 degrees unless said), made once. */
+/** Weight table of an illuminant and an observer (D65 and 2 degrees unless said), made once. Throws `unknown-field-value`. */
 export function viewingWeights({ illuminant = 'D65', observer = '2deg' }: Viewing = {}): ViewingWeights {
   const key = `${illuminant}/${observer}`;
   const known = kept.get(key);
   if (known !== undefined) return known;
+  requireKnown('illuminant', illuminant, illuminantIds);
+  requireKnown('observer', observer, observerIds);
   const made = weigh(illuminant, observer);
   kept.set(key, made);
   return made;

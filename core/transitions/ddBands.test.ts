@@ -248,6 +248,28 @@ describe('strengths', () => {
     }
   });
 
+  it('are never those of a tetrahedron for an octahedron: the same ion with the same donors absorbs tens of times more', () => {
+    const cobalt = {
+      metal: 'Co',
+      oxidationState: 2,
+      ligands: { cl: 6 },
+      B: 750,
+      C: 3_375,
+      zeta: 500,
+    } as const;
+    const six = strongest({ ...cobalt, tenDq: 7_200 });
+    const four = strongest({ ...cobalt, ligands: { cl: 4 }, geometry: 'tetrahedral', tenDq: 3_200 });
+    expect(six).toBeLessThan(60);
+    expect(four / six).toBeGreaterThan(5);
+  });
+
+  // The spin-orbit operator transforms as T1: 2A1 cannot mix with 4T2 (A1 x T2 has no T1), 2E can.
+  it('of spin-forbidden bands obey the symmetry of spin-orbit coupling', () => {
+    const of = (label: string): number =>
+      dd(chromiumAqua).find((band) => band.label === label)!.molarAbsorptivity;
+    expect(of('2A1g')).toBeLessThan(of('2Eg') / 2);
+  });
+
   it('of a jump of two electrons are small', () => {
     const [first, , third] = allowed(chromiumAqua);
     expect(third!.electronsMoved).toBe(2);

@@ -3,7 +3,7 @@ import { laporteInput, type DdContext } from './ddContext';
 import { chargeTransferGain } from './intensity/chargeTransferGain';
 import { electronsMoved, oneElectronShare } from './intensity/electronsMoved';
 import { laporteClass, laporteWords, typicalAbsorptivity } from './intensity/laporte';
-import { borrowedBand, type SpinAllowedIntensity } from './intensity/spinOrbitMixing';
+import { borrowedBand, groundMixing, type SpinAllowedIntensity } from './intensity/spinOrbitMixing';
 import { dipoleAllowedInTd } from './intensity/tetrahedralSelection';
 import { levelBand } from './levelBand';
 import { levelWidth } from './levelWidth';
@@ -42,24 +42,32 @@ function allowedBand(context: DdContext, intensity: SpinAllowedIntensity, rule: 
   return levelBand(context, level, { kind: 'spin-allowed', molarAbsorptivity, width_cm1, rule, reasons });
 }
 
-function forbiddenBand(
+/** Bands into levels one spin flip away. */
+function forbiddenBands(
   context: DdContext,
-  level: BandLevel,
+  levels: readonly BandLevel[],
   allowed: readonly SpinAllowedIntensity[],
   typical: number,
-): Band {
+): Band[] {
   const { input } = context;
-  const zeta = input.zeta.value;
-  const own = levelWidth(context, level);
-  const multiplicity = input.levels[0]!.multiplicity;
-  return levelBand(context, level, {
-    ...borrowedBand(level, multiplicity, allowed, zeta ?? usualZeta_cm1, typical, own),
-    kind: 'spin-forbidden',
-    rule: 'spin-forbidden',
-    reasons: [
-      'spin-forbidden; strength borrowed from spin-allowed bands by spin-orbit coupling',
-      ...(zeta === null ? ['zeta is not on file; a usual size was taken for the strength only'] : []),
-    ],
+  const zeta = input.zeta.value ?? usualZeta_cm1;
+  const reasons = [
+    'spin-forbidden; strength borrowed from spin-allowed bands by spin-orbit coupling',
+    ...(input.zeta.value === null
+      ? ['zeta is not on file; a usual size was taken for the strength only']
+      : []),
+  ];
+  const mixed = new Map<number, number>();
+  return levels.map((level) => {
+    const { multiplicity } = level;
+    const share = mixed.get(multiplicity) ?? groundMixing(input.levels, multiplicity, zeta);
+    mixed.set(multiplicity, share);
+    return levelBand(context, level, {
+      ...borrowedBand(level, allowed, zeta, share * typical, levelWidth(context, level)),
+      kind: 'spin-forbidden',
+      rule: 'spin-forbidden',
+      reasons,
+    });
   });
 }
 
@@ -80,9 +88,8 @@ export function ddBands(context: DdContext): Band[] {
     .filter(({ multiplicity }) => multiplicity === ground.multiplicity)
     .map((level) => allowedIntensity(context, level, typical));
   const [first, ...others] = allowed.map((intensity) => allowedBand(context, intensity, laporteWords[how]));
-  const forbidden = seen
-    .filter(({ multiplicity }) => Math.abs(multiplicity - ground.multiplicity) === 2)
-    .map((level) => forbiddenBand(context, level, allowed, typical));
+  const flipped = seen.filter(({ multiplicity }) => Math.abs(multiplicity - ground.multiplicity) === 2);
+  const forbidden = forbiddenBands(context, flipped, allowed, typical);
   return [...(first === undefined ? [] : splitFirstBand(context, first)), ...others, ...forbidden].sort(
     (a, b) => a.energy_cm1 - b.energy_cm1,
   );
