@@ -18,3 +18,4 @@ export { binomial, countMicrostates, type Term } from './terms/term';
 export * from './rotation';
 export { carry, turned, type Operation } from './groups/operation';
 export { schoenflies, type StandingGroup } from './recognition/schoenflies';
+export { arrangementGroup, rigidPermutations, spannedDimension } from './recognition/arrangement';

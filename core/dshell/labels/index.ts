@@ -3,3 +3,4 @@ export { levelAccount, type ConfigurationShare, type LevelAccount } from './leve
 export { electronJump, type Parentage } from './parentage';
 export { fieldNamingGroup, isSymmetric, namingGroup, type NamingGroup } from './namingGroup';
 export { cubicFrame, type CubicFrame } from './cubicFrame';
+export { ligandGroup } from './ligandGroup';

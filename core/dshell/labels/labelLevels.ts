@@ -3,6 +3,7 @@ import { fieldFrame } from '../field/fieldFrame';
 import { checkProblem, type LevelProblem } from '../problem';
 import { irrepFinder, type IrrepFinder } from './irreps';
 import { levelSets, type LevelSet } from './levelSets';
+import { ligandGroup } from './ligandGroup';
 import { fieldNamingGroup, isSymmetric, namingGroup, type NamingGroup } from './namingGroup';
 import { parentageReader, type Parentage } from './parentage';
 
@@ -33,8 +34,9 @@ export interface LabelledLevels {
 
 export interface LabelOptions {
   /**
-   * A group by name (`C3v`, `Oh`), in standard orientation in the laboratory, or standing as wanted. Left out: the largest group
-   * of the field. A group that is none of the field's is passed over in favour of that one.
+   * A group by name (`C3v`, `Oh`), in standard orientation in the laboratory; or standing as wanted; or `ligands`, that of the
+   * ligands of an angular overlap field. Left out: the largest group of the field. A group that is none of the field's is
+   * passed over in favour of that one.
    */
   readonly group?: string | NamingGroup;
   /** Energies this close count as one level, cm⁻¹; default a rounding of the span. */
@@ -49,11 +51,9 @@ export interface LabelOptions {
 export function labelLevels(problem: LevelProblem, options: LabelOptions = {}): LabelledLevels {
   const checked = { ...checkProblem(problem), zeeman: null };
   const frame = fieldFrame(checked.V);
-  const naming = chosenGroup(
-    options.group,
-    () => fieldNamingGroup(checked.V, frame),
-    (wanted) => isSymmetric(checked.V, wanted),
-  );
+  const wanted = wantedGroup(problem, options.group);
+  const fits = wanted !== null && isSymmetric(checked.V, wanted);
+  const naming = fits ? wanted : fieldNamingGroup(checked.V, frame);
   const spinOrbit = checked.zeta !== 0;
   const find = irrepFinder(naming, spinOrbit);
   const reader = parentageReader(checked, frame.rotation);
@@ -91,13 +91,10 @@ function namedLevels({ energy, S, states }: LevelSet, find: IrrepFinder): Labell
   );
 }
 
-function chosenGroup(
-  wanted: LabelOptions['group'],
-  natural: () => NamingGroup,
-  fits: (group: NamingGroup) => boolean,
-): NamingGroup {
-  const named = typeof wanted === 'string' ? namingGroup(wanted) : wanted;
-  return named != null && fits(named) ? named : natural();
+function wantedGroup({ field }: LevelProblem, wanted: LabelOptions['group']): NamingGroup | null {
+  if (typeof wanted !== 'string') return wanted ?? null;
+  if (wanted !== 'ligands') return namingGroup(wanted);
+  return field.type === 'aom' ? ligandGroup(field.ligands) : null;
 }
 
 /** Eigenvalues of one level may differ by this much through rounding. */

@@ -142,6 +142,30 @@ describe('names in groups that are asked for', () => {
     expect(byEnergy(1, mer, 'D2h', 150)).toEqual(['G5', 'G5', 'G5', 'G5', 'G5']);
   });
 
+  it('can be those of the ligands as they stand: D3h of a bipyramid, C3v of fac, C2v of cis, C4v of a pyramid', () => {
+    const named = (ligands: ReturnType<typeof ligand>[]): { group: string; names: string[] } => {
+      const { group, levels } = labelLevels(problem(1, { type: 'aom', ligands }), { group: 'ligands' });
+      return { group, names: levels.map(({ irrep }) => irrep!).sort() };
+    };
+    const equator = [0, 120, 240].map((phi) => ligand(90, phi, 5000, 600));
+    const octahedron = [
+      ...[ligand(0, 0, 5000), ligand(180, 0, 5000), ligand(90, 0, 5000)],
+      ...[ligand(90, 90, 5000), ligand(90, 180, 5000), ligand(90, 270, 5000)],
+    ];
+    const with7 = (...places: number[]) =>
+      octahedron.map((each, i) => (places.includes(i) ? { ...each, e_sigma: 7000 } : each));
+    const bipyramid = named([...equator, ligand(0, 0, 6000), ligand(180, 0, 6000)]);
+    expect(bipyramid).toEqual({ group: 'D3h', names: ["A1'", "E'", "E''"] });
+    // A field of three like and three unlike donors in fac places is cubic; its levels still have names in C3v.
+    expect(named(with7(0, 2, 3))).toEqual({ group: 'C3v', names: ['A1', 'E', 'E'] });
+    expect(named(with7(2, 3)).group).toBe('C2v');
+    expect(named(octahedron.slice(0, 5).filter((_, i) => i !== 1)).group).toBe('C2v');
+    expect(named([octahedron[0]!, ...octahedron.slice(2)])).toEqual({
+      group: 'C4v',
+      names: ['A1', 'B1', 'B2', 'E'],
+    });
+  });
+
   it('of the free ion are J, in the intervals of Landé: 3F of d2 at 3λ and 4λ, λ = ζ/2 (Condon and Shortley 1935)', () => {
     const { levels } = labelLevels({
       dElectrons: 2,

@@ -4,7 +4,7 @@ import { isomersOf } from '../isomers/isomersOf';
 import { ligandPositions } from '../ligandPositions';
 import { angleBetween } from '../polyhedra/direction';
 import { polyhedron, vertexAngles } from '../polyhedra/polyhedra';
-import { arrangementGroup } from '../symmetry';
+import { arrangementGroup } from '../../symmetry';
 import { distort, type PlacedVertex } from './distort';
 
 /** Point group with bonds of unequal length told apart. */

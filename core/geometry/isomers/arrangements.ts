@@ -1,4 +1,4 @@
-import { spannedDimension } from '../symmetry';
+import { spannedDimension } from '../../symmetry';
 import { opposite, type VertexFrame } from './frame';
 import { type Pattern } from './site';
 import { uprightRotation } from './upright';

@@ -1,7 +1,6 @@
 import { type GeometryId } from '../../record/composition';
-import { cross, dot } from '../../symmetry';
+import { cross, dot, rigidPermutations } from '../../symmetry';
 import { type Polyhedron, polyhedron, vertexAngles } from '../polyhedra/polyhedra';
-import { rigidPermutations } from '../symmetry';
 
 /** A polyhedron with what the enumeration needs: angles and the permutations of its vertices. */
 export interface VertexFrame {

@@ -1,5 +1,5 @@
 import { type GeometryId } from '../../record/composition';
-import { arrangementGroup } from '../symmetry';
+import { arrangementGroup } from '../../symmetry';
 import { distinctPlacements, type Distinct } from './arrangements';
 import { vertexFrame, type VertexFrame } from './frame';
 import { nameAll } from './names';

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { findGeometry } from '../../library/geometries';
 import { geometryIds } from '../../record/composition';
-import { arrangementGroup } from '../symmetry';
+import { arrangementGroup } from '../../symmetry';
 import { angleBetween, anglesOf, direction } from './direction';
 import { polyhedra, polyhedron, vertexAngles } from './polyhedra';
 

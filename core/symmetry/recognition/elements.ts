@@ -13,8 +13,7 @@ export interface SymmetryElements {
 }
 
 export const parallel = (a: Vector3, b: Vector3): boolean => Math.abs(Math.abs(dot(a, b)) - 1) < tolerance;
-export const perpendicular = (a: Vector3, b: Vector3): boolean =>
-  Math.abs(dot(a, b)) < Math.sqrt(tolerance);
+export const perpendicular = (a: Vector3, b: Vector3): boolean => Math.abs(dot(a, b)) < Math.sqrt(tolerance);
 
 /** Axis and smallest turn of a rotation; no axis for the identity. */
 function axisOf({ rotation: [w, x, y, z] }: Operation): { direction: Vector3; angle: number } | null {

@@ -9,12 +9,13 @@ import { readLevelProblem } from '../levelEntry';
 function wantedGroup(entry: Record<string, unknown>): string | null | undefined {
   const value = entry.labelGroup;
   if (value === undefined || value === null) return value;
+  if (value === 'ligands') return value;
   if (typeof value === 'string' && namingGroup(value) !== null) return value.replace(/\*$/, '');
   throw new SpinhueError({
     code: typeof value === 'string' ? 'unknown-field-value' : 'wrong-type',
     message: `labelGroup = ${JSON.stringify(value)}: the name of a point group is needed`,
     field: 'labelGroup',
-    remedy: `one of ${labelGroups.join(', ')}, a lower group such as D3d or C2v, null for no labels, or leave it out`,
+    remedy: `one of ${labelGroups.join(', ')}, a lower group such as D3d or C2v, ligands for that of the ligands, null for no labels, or leave it out`,
   });
 }
 
@@ -39,7 +40,7 @@ function namedLevels(
   });
   const lower = list.labelGroup === null && own === undefined && wanted !== null && !isMagnetic(problem);
   const labelled = lower ? labelLevels(problem, wanted === undefined ? {} : { group: wanted }) : null;
-  if (labelled !== null && (wanted === undefined || labelled.group === wanted)) {
+  if (labelled !== null && (wanted === undefined || wanted === 'ligands' || labelled.group === wanted)) {
     return labelled.levels.map(({ energy, degeneracy, multiplicity, irrep }) => ({
       ...{ energy_cm1: energy, degeneracy, multiplicity, label: irrep },
     }));

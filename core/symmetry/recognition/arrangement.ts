@@ -1,17 +1,15 @@
+import { carry, type Operation } from '../groups/operation';
 import {
-  carry,
   compose,
   cross,
   dot,
   inverseRotation,
   normalise,
   rotationToFrame,
-  schoenflies,
-  type Operation,
   type Quaternion,
-  type StandingGroup,
   type Vector3,
-} from '../symmetry';
+} from '../rotation';
+import { schoenflies, type StandingGroup } from './schoenflies';
 
 const tolerance = 1e-4;
 
