@@ -61,6 +61,8 @@ function useMirror(): void {
   const { store, host } = useServices();
   const mirror = useMemo(() => new ProjectMirror(store, host), [store, host]);
   useEffect(() => {
+    // What the folder says about itself is shown in the settings.
+    void mirror.catchUp().catch(() => undefined);
     const stop = host.onFlush(async () => {
       await mirror.flush();
       return { state: 'saved' };

@@ -3,6 +3,7 @@ import type { FlushAnswer, Host, HostInfo, Mirror, MirrorStatus } from './bridge
 import { download, upload } from './browserFiles';
 import { browserTheme } from './browserTheme';
 import { HostError } from './hostError';
+import { leaveField } from './leaveField';
 import { externalLinks } from './links';
 import { callLoopback, hasLoopback, toWire } from './loopback';
 
@@ -75,7 +76,10 @@ export function browserHost(): Host {
 
   // Leaving cannot wait for a promise: what is pending is saved as soon as the page is hidden, and asked about here.
   document.addEventListener('visibilitychange', () => {
-    if (document.visibilityState === 'hidden') void flush?.().catch(() => undefined);
+    if (document.visibilityState !== 'hidden') return;
+    void leaveField(() => unsaved)
+      .then(() => flush?.())
+      .catch(() => undefined);
   });
   addEventListener('beforeunload', (event) => {
     void flush?.().catch(() => undefined);

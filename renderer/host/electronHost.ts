@@ -1,6 +1,7 @@
 import type { FlushAnswer, Host, OpenedFile } from './bridge';
 import type { Answer, CallName, Calls, DesktopApi } from './contract';
 import { HostError } from './hostError';
+import { leaveField } from './leaveField';
 
 /** The host inside the desktop program: each call goes through the preload script to the main process. */
 export async function electronHost(api: DesktopApi): Promise<Host> {
@@ -21,10 +22,15 @@ export async function electronHost(api: DesktopApi): Promise<Host> {
   let fileListener: ((file: OpenedFile) => void) | null = null;
   api.onFileOpened((file) => (fileListener ? fileListener(file) : early.push(file)));
 
+  let unsaved: string | null = null;
   let flush: (() => Promise<FlushAnswer>) | null = null;
+  async function answerFlush(): Promise<FlushAnswer> {
+    const what = await leaveField(() => unsaved);
+    const answer = (await flush?.()) ?? { state: 'saved' };
+    return answer.state === 'saved' && what !== null ? { state: 'unsaved', what } : answer;
+  }
   api.onFlush(({ request }) => {
-    const answer = flush?.() ?? Promise.resolve<FlushAnswer>({ state: 'saved' });
-    void answer
+    void answerFlush()
       .catch((error: unknown): FlushAnswer => ({
         state: 'unsaved',
         what: error instanceof Error ? error.message.slice(0, 300) : 'the last change',
@@ -66,7 +72,10 @@ export async function electronHost(api: DesktopApi): Promise<Host> {
       onStatus: (listener) => api.onMirrorStatus(listener),
     },
     reload: () => done(call('reload', null)),
-    setUnsaved: (what) => void call('setUnsaved', { what: what?.slice(0, 300) ?? null }),
+    setUnsaved(what) {
+      unsaved = what?.slice(0, 300) ?? null;
+      void call('setUnsaved', { what: unsaved });
+    },
     openExternal: (link) => done(call('openExternal', { link })),
     onFlush(listener) {
       flush = listener;

@@ -19,7 +19,7 @@ export async function boot(views: readonly ViewDefinition[]): Promise<void> {
 
 async function start(root: Root, host: Host, views: readonly ViewDefinition[]): Promise<void> {
   try {
-    const store = await openStore({ onTakenOver: () => location.reload() });
+    const store = await openStore({ onTakenOver: () => void host.reload() });
     void askForLastingStorage();
     void tidy(store);
     await loadDemoOnce(store);
