@@ -2,6 +2,7 @@ import { accepted, refused, type Checked, type Problem } from '../errors';
 import {
   defaultLibrary,
   ligandFromFacts,
+  ligandKind,
   withLigands,
   type LigandRecord,
   type ParameterLibrary,
@@ -62,8 +63,7 @@ function furtherLigands(meta: unknown): LigandRecord[] {
         charge,
         denticity,
         donorAtoms,
-        piCharacter: 'none',
-        class: `${donorAtoms[0]}-donor`,
+        ...ligandKind(`${id} ${text(facts.name) ?? ''}`, donorAtoms),
       }),
     ];
   });

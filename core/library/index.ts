@@ -28,3 +28,4 @@ export { atomsOf, massOfFormula, molarMass, netCharge, type MolarMass } from './
 export { counterIonOf, counterIons, type CounterIon } from './counterIons';
 export { complexFormula } from './complexFormula';
 export { cautionsFor, standingCaution, type Caution } from './cautions';
+export { ligandKind, type LigandKind } from './ligandClass';

@@ -5,6 +5,7 @@ import {
   defaultLibrary,
   findGeometry,
   findIon,
+  ligandKind,
   molarMass,
   netCharge,
   withParameterSet,
@@ -107,6 +108,18 @@ describe('formula and mass', () => {
       const mass = molarMass(oct('Ni', 2, { [ligand.id]: 1 }), defaultLibrary).value_g_mol;
       expect(mass, ligand.id).toBeGreaterThan(58);
     }
+  });
+});
+
+describe('a ligand that is not in the tables', () => {
+  it.each([
+    ['2,6-bis(pyrazol-3-yl)pyridine', ['N', 'N', 'N'], 'heterocycle', 'acceptor'],
+    ['1,3-diaminopropane', ['N', 'N'], 'amine', 'none'],
+    ['catecholate', ['O', 'O'], 'O-chelate', 'donor'],
+    ['alaninate', ['N', 'O'], 'N,O-chelate', 'donor'],
+    ['triethylphosphane', ['P'], 'P-donor', 'acceptor'],
+  ] as const)('is put into a class by name and donors: %s', (name, donors, kind, pi) => {
+    expect(ligandKind(name, donors)).toEqual({ class: kind, piCharacter: pi });
   });
 });
 

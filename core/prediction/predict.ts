@@ -90,8 +90,9 @@ function seen(
   conditions: Prediction['conditions'],
   options: PredictOptions,
   key: string,
+  colourless: boolean,
 ): Pick<Prediction, 'colour' | 'colourAtThreeStrengths' | 'cloud'> {
-  if (bands.length === 0) return { colour: null, colourAtThreeStrengths: [], cloud: null };
+  if (bands.length === 0 && !colourless) return { colour: null, colourAtThreeStrengths: [], cloud: null };
   const viewing = {
     concentration_mM: conditions.concentration_mM,
     path_cm: conditions.path_cm,
@@ -153,6 +154,8 @@ function predictChecked(
   });
   const bands = field.cubic === null ? predicted.bands.map(lessSure) : predicted.bands;
   const flags: Flag[] = [...field.flags, ...predicted.flags];
+  // Without d-d bands and with no charge transfer in sight nothing is left that could absorb.
+  const colourless = (field.dElectrons === 0 || field.dElectrons === 10) && !flags.some(mayTransfer);
   if (spin.prediction.nearCrossover) {
     flags.push({
       code: 'near-crossover',
@@ -177,13 +180,15 @@ function predictChecked(
     ...(field.cubic === null && levels.length > 0 ? { overlapLevels: levels } : {}),
     bands,
     conditions,
-    ...seen(bands, inputs, conditions, options, complexKey(composition)),
+    ...seen(bands, inputs, conditions, options, complexKey(composition), colourless),
     flags,
     leftOut: [...new Set([...field.leftOut, ...predicted.leftOut])],
     cautions: cautionsFor(composition, options.counterIon, library),
     madeWith,
   };
 }
+
+const mayTransfer = ({ code }: Flag): boolean => /possible|CT|charge-transfer/.test(code);
 
 const libraryHashes = new WeakMap<ParameterLibrary, string>();
 
