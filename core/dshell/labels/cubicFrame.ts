@@ -14,6 +14,8 @@ export interface CubicFrame {
   readonly rotation: Quaternion;
   /** Mean energy of the e orbitals above that of the t2 orbitals in that frame, cm⁻¹; negative for a tetrahedron or cube. */
   readonly tenDq: number;
+  /** Share of the cubic part in the square of the whole field (without its mean): 1 where nothing else is there. */
+  readonly share: number;
 }
 
 /** Mean of the e orbitals less mean of the t2 orbitals about the axes of the frame. */
@@ -49,7 +51,7 @@ const starts = (fieldRotation: Quaternion): Quaternion[] => {
 const smallestStep = 1e-9;
 
 /** Turns about x, y and z in falling steps as long as the splitting grows in size. */
-function climb(V: FieldMatrix, start: Quaternion): CubicFrame {
+function climb(V: FieldMatrix, start: Quaternion): Omit<CubicFrame, 'share'> {
   let rotation = start;
   let tenDq = splitting(V, rotation);
   let step = 0.3;
@@ -78,11 +80,21 @@ function climb(V: FieldMatrix, start: Quaternion): CubicFrame {
  * from. The laboratory's own axes are kept where none are better (within 1e-6). `fieldRotation` is a frame worth starting from.
  */
 export function cubicFrame(V: FieldMatrix, fieldRotation: Quaternion = identityRotation): CubicFrame {
-  const asGiven: CubicFrame = { rotation: identityRotation, tenDq: splitting(V, identityRotation) };
+  const asGiven = { rotation: identityRotation, tenDq: splitting(V, identityRotation) };
   let best = asGiven;
   for (const start of starts(fieldRotation)) {
     const found = climb(V, start);
     if (Math.abs(found.tenDq) > Math.abs(best.tenDq) * (1 + 1e-6) + 1e-9) best = found;
   }
-  return best;
+  return { ...best, share: cubicShare(V, best.tenDq) };
+}
+
+/** The square of 10Dq · diag(0.6, 0.6, −0.4, −0.4, −0.4) beside that of V without its trace. */
+function cubicShare(V: FieldMatrix, tenDq: number): number {
+  const mean = V.reduce((sum, row, a) => sum + row[a]!, 0) / 5;
+  const whole = V.reduce(
+    (sum, row, a) => sum + row.reduce((s, value, b) => s + (value - (a === b ? mean : 0)) ** 2, 0),
+    0,
+  );
+  return whole < 1e-12 ? 1 : (1.2 * tenDq * tenDq) / whole;
 }

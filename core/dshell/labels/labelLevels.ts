@@ -28,6 +28,8 @@ export interface LabelledLevels {
   readonly cubicGroup: CubicGroup;
   /** Size of the cubic part of the field, cm⁻¹. */
   readonly cubicTenDq: number;
+  /** Its share in the square of the field, 0 to 1: where it is small, cubic parents and t2, e configurations say little. */
+  readonly cubicShare: number;
   /** Parent terms and configurations of one of the levels; worked out when asked for. */
   parentage(level: number): Parentage;
 }
@@ -66,6 +68,7 @@ export function labelLevels(problem: LevelProblem, options: LabelOptions = {}): 
     group: naming.name,
     cubicGroup: reader.cubicGroup,
     cubicTenDq: reader.tenDq,
+    cubicShare: reader.share,
     parentage(index) {
       const { set } = rows[index]!;
       let found = known.get(set);

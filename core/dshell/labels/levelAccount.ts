@@ -32,8 +32,8 @@ export interface LevelAccount {
   readonly configurations: readonly ConfigurationShare[];
   /** The leading cubic term at both ends of the correlation diagram. */
   readonly origin: TermOrigin | null;
-  /** Electrons that change between t2 and e from the ground level, by leading configurations. */
-  readonly electronJump: number;
+  /** Electrons that change between t2 and e from the ground level; null where no configuration leads. */
+  readonly electronJump: number | null;
   /** Spin of the leading cubic term as in the ground level's. */
   readonly spinAllowed: boolean;
 }

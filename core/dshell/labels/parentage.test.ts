@@ -98,6 +98,15 @@ describe('cubic axes of a field', () => {
     expect(cubicFrame(turned(5_000, 'tet')).tenDq).toBeCloseTo(-5_000, 4);
   });
 
+  it('are all of an octahedral field and less than half of that of a trigonal bipyramid', () => {
+    expect(cubicFrame(fieldMatrix(octahedral(12_000))).share).toBeCloseTo(1, 9);
+    const ligand = (theta: number, phi: number) => ({ theta, phi, e_sigma: 5000 });
+    const ligands = [ligand(0, 0), ligand(180, 0), ligand(90, 0), ligand(90, 120), ligand(90, 240)];
+    const bipyramid = labelLevels({ dElectrons: 9, B: 0, C: 0, field: { type: 'aom', ligands } });
+    expect(bipyramid.cubicShare).toBeLessThan(0.6);
+    expect(levelAccount(bipyramid, 1, 9).electronJump).toBeNull();
+  });
+
   it('are the laboratory axes where those serve', () => {
     const V = fieldMatrix({ type: 'tetragonal', tenDq: 12_000, Ds: 700, Dt: -200 });
     expect(cubicFrame(V).rotation).toEqual([1, 0, 0, 0]);

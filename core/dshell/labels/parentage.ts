@@ -21,6 +21,8 @@ export interface ParentageReader {
   readonly cubicGroup: CubicGroup;
   /** Cubic part of the field, cm⁻¹, positive in both. */
   readonly tenDq: number;
+  /** Share of that part in the square of the field: where it is small, cubic terms and configurations say little. */
+  readonly share: number;
   /** Mean over the states of one level. */
   read(states: readonly Amplitudes[]): Parentage;
 }
@@ -37,6 +39,7 @@ export function parentageReader(
   return {
     cubicGroup,
     tenDq: Math.abs(cubic.tenDq),
+    share: cubic.share,
     read(states) {
       const parts = (zeta === 0 ? states : states.flatMap(orbitalParts)).map(toCubic);
       return {
@@ -48,10 +51,15 @@ export function parentageReader(
   };
 }
 
+/** A leading configuration with less than this leads nothing. */
+const leading = 0.55;
+
 /**
  * How many electrons change between t2 and e from one level to another, by their leading configurations: 1 for the usual
- * spin-allowed band, 2 for a two-electron jump (weak), 0 for a spin flip within a configuration (narrow).
+ * spin-allowed band, 2 for a two-electron jump (weak), 0 for a spin flip within a configuration (narrow). Null where one of
+ * the levels has no configuration that clearly leads.
  */
-export function electronJump(from: Parentage, to: Parentage): number {
-  return Math.abs(to.configurations[0]!.e - from.configurations[0]!.e);
+export function electronJump(from: Parentage, to: Parentage): number | null {
+  const [a, b] = [from.configurations[0]!, to.configurations[0]!];
+  return a.weight < leading || b.weight < leading ? null : Math.abs(b.e - a.e);
 }

@@ -78,6 +78,7 @@ function account(entry: Record<string, unknown>) {
   return {
     ...(entry.id === undefined ? {} : { id: entry.id }),
     group: labelled.group,
+    cubicShare: labelled.cubicShare,
     levels: labelled.levels.map(({ energy, degeneracy, multiplicity, irrep }, index) => {
       const { freeIon, cubic, configurations, electronJump } = levelAccount(
         labelled,
