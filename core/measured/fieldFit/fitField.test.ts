@@ -3,7 +3,7 @@ import { join } from 'node:path';
 import { describe, expect, it } from 'vitest';
 import { cubicLevels } from '../../dshell';
 import { fitField, type FieldFitRequest } from './fitField';
-import { parseGround, parseLevel } from './labels';
+import { groundMultiplicityOf, parseLevel } from './labels';
 
 const bands = (...energies: number[]) => energies.map((energy_cm1) => ({ energy_cm1 }));
 const octahedral = (
@@ -226,7 +226,7 @@ describe('labels', () => {
   ])('%s is understood', (label, wanted) => expect(parseLevel(label)).toEqual(wanted));
 
   it('name the ground level before the arrow', () => {
-    expect(parseGround('5Eg -> 5T2g')?.multiplicity).toBe(5);
-    expect(parseGround('5T2g')).toBeNull();
+    expect(groundMultiplicityOf('5B1g -> 5T2g')).toBe(5);
+    expect(groundMultiplicityOf('5T2g')).toBeNull();
   });
 });

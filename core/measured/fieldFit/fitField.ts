@@ -1,16 +1,19 @@
 import { SpinhueError } from '../../errors';
 import type { CubicGeometry } from '../../dshell';
+import type { GeometryId } from '../../record/composition';
 import { candidateAssignments, type FieldBand } from './candidates';
-import { freeIonB } from './freeIon';
-import { parseGround, parseLevel } from './labels';
+import { freeIonB, type FreeIonLimit } from './freeIon';
+import { groundMultiplicityOf, parseLevel } from './labels';
 import { groundMultiplicities, levelsFrom, sameLevel, type FieldParameters, type LevelKey } from './model';
 import { solveField, type FieldSolution, type Freedom, type TargetBand } from './solve';
+import { fitLowSymmetry, possibleMultiplicities } from './orbitals/describe';
 import { describeFit } from './statement';
 import { textbookRule, type TextbookValue } from './textbook';
 
 export interface FieldFitRequest {
   readonly dElectrons: number;
-  readonly geometry: CubicGeometry;
+  /** `octahedral` and `tetrahedral` by the cubic levels; other geometries by the energies of their d orbitals. */
+  readonly geometry: GeometryId | 'tetragonal';
   readonly bands: readonly {
     readonly energy_cm1: number;
     /** Standard uncertainty of the position; a usual reading is assumed where none is given. */
@@ -48,6 +51,9 @@ export interface FieldFit {
   readonly tenDq: FittedParameter;
   readonly B: FittedParameter;
   readonly C: FittedParameter;
+  /** Energies of the d orbitals in a geometry without cubic symmetry, relative to the last; null in a cubic field. */
+  readonly orbitals:
+    readonly { readonly name: string; readonly energy_cm1: number; readonly se: number | null }[] | null;
   readonly groundTerm: string;
   readonly assignment: readonly FittedLevel[];
   readonly correlation: FieldSolution['correlation'];
@@ -154,7 +160,7 @@ function oddness(parameters: FieldParameters, largestB: number): number {
  * What speaks against an assignment beside its misfit: spin-allowed levels below the highest one used that no band was
  * found for, and bands taken for transitions of two electrons, which are weak and easily missed.
  */
-function implausibility(trial: Omit<Trial, 'cost'>, request: FieldFitRequest): number {
+function implausibility(trial: Omit<Trial, 'cost'>, request: CubicRequest): number {
   const { levels } = levelsFrom(
     request.dElectrons,
     request.geometry,
@@ -203,7 +209,7 @@ function sharing(bands: readonly FieldBand[], levels: readonly LevelKey[]): numb
 }
 
 function tryAssignment(
-  request: FieldFitRequest,
+  request: CubicRequest,
   bands: readonly FieldBand[],
   groundMultiplicity: number,
   levels: readonly LevelKey[],
@@ -247,14 +253,13 @@ function tryAssignment(
   return null;
 }
 
-/** Ground multiplicities in question: the stated one, the one that the labels name, or all that a cubic field allows. */
-function spinsToTry(request: FieldFitRequest): number[] {
+/** Ground multiplicities in question: the stated one, the one that the labels name, or all that the field allows. */
+function named(request: FieldFitRequest, possible: readonly number[]): readonly number[] {
   if (request.groundMultiplicity !== undefined) return [request.groundMultiplicity];
-  const named = new Set(
-    request.bands.map((band) => (band.label == null ? null : parseGround(band.label)?.multiplicity)),
+  const inLabels = new Set(
+    request.bands.map((band) => (band.label == null ? null : groundMultiplicityOf(band.label))),
   );
-  const possible = groundMultiplicities(request.dElectrons, request.geometry);
-  const meant = possible.filter((multiplicity) => named.has(multiplicity));
+  const meant = possible.filter((multiplicity) => inLabels.has(multiplicity));
   return meant.length > 0 ? meant : possible;
 }
 
@@ -268,7 +273,19 @@ export function fitField(request: FieldFitRequest): FieldFit {
   const bands = checked(request);
   const largestB = freeIonB(request);
   const ratio = request.ratioCB ?? usualRatio;
-  const spins = spinsToTry(request);
+  if (request.geometry !== 'octahedral' && request.geometry !== 'tetrahedral') {
+    const spins = named(request, possibleMultiplicities(request.dElectrons));
+    return fitLowSymmetry(request.geometry, request.dElectrons, bands, spins, ratio, largestB);
+  }
+  return fitCubic({ ...request, geometry: request.geometry }, bands, largestB);
+}
+
+/** A request whose field is cubic. */
+export type CubicRequest = FieldFitRequest & { readonly geometry: CubicGeometry };
+
+function fitCubic(request: CubicRequest, bands: readonly FieldBand[], largestB: FreeIonLimit): FieldFit {
+  const ratio = request.ratioCB ?? usualRatio;
+  const spins = named(request, groundMultiplicities(request.dElectrons, request.geometry));
   const trials: Trial[] = [];
   for (const groundMultiplicity of spins) {
     const candidates = candidateAssignments(request.dElectrons, request.geometry, groundMultiplicity, bands, [

@@ -32,8 +32,9 @@ export function parseLevel(label: string): NamedLevel | null {
   return { multiplicity: Number(multiplicity), irrep: `${letter}${index}`, parent: parent ?? null };
 }
 
-/** The ground level of an assignment with an arrow, `4A2g` of `4A2g -> 4T2g`; null without one. */
-export function parseGround(label: string): NamedLevel | null {
+/** Multiplicity of the ground level of an assignment with an arrow, 4 of `4A2g -> 4T2g`; null without one. */
+export function groundMultiplicityOf(label: string): number | null {
   const parts = label.split(/->|→|⟶|—>/);
-  return parts.length > 1 ? parseLevel(parts[0]!) : null;
+  const match = parts.length > 1 ? /^[\s^{]*(\d+)/.exec(parts[0]!) : null;
+  return match === null ? null : Number(match[1]);
 }

@@ -1,12 +1,12 @@
 import type { FieldBand } from './candidates';
-import type { FieldFit, FieldFitRequest, FittedParameter, Trial } from './fitField';
+import type { FieldFit, CubicRequest, FittedParameter, Trial } from './fitField';
 import type { FreeIonLimit } from './freeIon';
 import { levelsFrom, sameLevel, type LevelKey } from './model';
 import { solveField, type FieldSolution } from './solve';
 import type { TextbookValue } from './textbook';
 
 interface Account {
-  readonly request: FieldFitRequest;
+  readonly request: CubicRequest;
   readonly bands: readonly FieldBand[];
   readonly best: Trial;
   readonly trials: readonly Trial[];
@@ -19,7 +19,7 @@ const rms = (bands: readonly FieldBand[], solution: FieldSolution): number =>
     bands.reduce((sum, band, i) => sum + (band.energy_cm1 - solution.predicted[i]!) ** 2, 0) / bands.length,
   );
 
-const labelOf = (trial: Trial, request: FieldFitRequest): ((key: LevelKey) => string) => {
+const labelOf = (trial: Trial, request: CubicRequest): ((key: LevelKey) => string) => {
   const { levels } = levelsFrom(
     request.dElectrons,
     request.geometry,
@@ -30,7 +30,7 @@ const labelOf = (trial: Trial, request: FieldFitRequest): ((key: LevelKey) => st
 };
 
 /** Largest slope of any assigned level with respect to one parameter; zero where the bands do not feel it. */
-function feels(trial: Trial, request: FieldFitRequest, name: 'B' | 'C'): boolean {
+function feels(trial: Trial, request: CubicRequest, name: 'B' | 'C'): boolean {
   const { levels } = levelsFrom(
     request.dElectrons,
     request.geometry,
@@ -182,6 +182,7 @@ export function describeFit(account: Account): FieldFit {
     tenDq: parameter('tenDq', 'fitted'),
     B: parameter('B', bStatus),
     C: parameter('C', cStatus),
+    orbitals: null,
     groundTerm: solution.groundLabel,
     assignment: bands.map((band, i) => ({
       energy_cm1: band.energy_cm1,

@@ -1,11 +1,12 @@
 import { z } from 'zod';
 import { fitField as fit, type FieldFitRequest } from '../../../core/measured/fieldFit/fitField';
+import { geometryIds } from '../../../core/record/composition';
 import type { Command } from '../command';
 import { parseInput } from '../parseInput';
 
 const schema = z.looseObject({
   dElectrons: z.number(),
-  geometry: z.enum(['octahedral', 'tetrahedral']),
+  geometry: z.enum([...geometryIds, 'tetragonal']),
   bands: z.array(
     z.looseObject({
       energy_cm1: z.number(),

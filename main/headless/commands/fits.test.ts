@@ -64,7 +64,7 @@ describe('fit-field', () => {
 
   it('refuses a geometry that it has no levels for', async () => {
     await expect(
-      fitField.run(args, reading({ dElectrons: 3, geometry: 'linear', bands: [] })),
+      fitField.run(args, reading({ dElectrons: 3, geometry: 'cubical', bands: [] })),
     ).rejects.toMatchObject({ field: 'geometry' });
   });
 });
