@@ -127,6 +127,13 @@ const ligandChoices: readonly LigandChoice[] = [
       '2E of [Cr(phen)3]3+ at 13 700 cm-1 (emission at 730 nm in water) with k = 0.21 and exact d3 levels',
   },
   {
+    ligand: 'gly',
+    h: 1.4,
+    reason:
+      'the one copy that prints 2.0 puts glycinate beyond both its halves, en and ox (1.5 each); the bands of ' +
+      '[Ni(gly)3]- (10 100, 16 600, 27 600 cm-1) ask for about 0.8; a little below the halves, good to 0.4',
+  },
+  {
     ligand: 'oxo',
     h: 1.4,
     reason:
