@@ -85,8 +85,19 @@ export function readNtuples(block: Block, limit: number, warnings: ReadingWarnin
   let page = '';
   let points: LabelledRecord | undefined;
   let left = limit;
+  let tableRead = true;
+  const reportEmpty = () => {
+    if (points !== undefined && !tableRead) {
+      warnings.push({
+        code: 'recovered',
+        message: `page ${shorten(page)} announces points and has no DATA TABLE`,
+      });
+    }
+    tableRead = false;
+  };
   for (const record of block.records) {
     if (record.label === 'PAGE') {
+      reportEmpty();
       page = valueOf(record);
       points = undefined;
     } else if (record.label === 'NPOINTS') {
@@ -98,6 +109,7 @@ export function readNtuples(block: Block, limit: number, warnings: ReadingWarnin
       }
       points = record;
     } else if (record.label === 'DATATABLE') {
+      tableRead = true;
       const name = shorten([block.title, page].filter((part) => part !== '').join(', ')) || 'the page';
       const scaling = {
         xFactor: x.factor,
@@ -115,6 +127,7 @@ export function readNtuples(block: Block, limit: number, warnings: ReadingWarnin
       if (spectra.length > readingLimits.spectra) throw new ReadingError('too-large', 'too many pages');
     }
   }
+  reportEmpty();
   const tables = block.records.filter((record) => record.label === 'DATATABLE');
   reportUnread(block, tables, warnings);
   if (spectra.length === 0)
