@@ -1,0 +1,188 @@
+import { cp, mkdtemp, readdir, readFile, rm } from 'node:fs/promises';
+import { tmpdir } from 'node:os';
+import { join, resolve } from 'node:path';
+import type { Page } from '@playwright/test';
+import { readBundle } from '../../core/record/bundle';
+import { seeded } from '../../core/testing/seeded';
+import { MirrorFolder } from '../../main/files/mirror/mirrorFolder';
+import { mirrorHandlers } from '../../main/ipc/mirrorHandlers';
+import { startLocalServer } from '../../main/start/localServer';
+import { CopyWatch } from './copyWatch';
+import { faultsOf, noteText, numberOf, type Progress } from './killFaults';
+import { type KillableBrowser, startBrowser } from './killableBrowser';
+import { readStored } from './storedState';
+
+export interface KillReport {
+  readonly kills: number;
+  /** Edits that the screen confirmed. */
+  readonly confirmed: number;
+  readonly faults: readonly string[];
+  /** From the screen's confirmation to the copy in the folder, for edits that lived long enough. */
+  readonly lags_ms: readonly number[];
+  /** From the page's being drawn to a copy that holds everything, after each kill. */
+  readonly catchUps_ms: readonly number[];
+}
+
+async function openSheet(page: Page, origin: string, projectId: string, candidateId: string): Promise<void> {
+  await page.goto(`${origin}/#/sheet/in/${projectId}/${candidateId}`);
+  await page.getByRole('textbox', { name: 'About this candidate' }).waitFor({ timeout: 60_000 });
+}
+
+/** Writes numbered notes until the browser is gone. */
+async function writeNotes(page: Page, progress: Progress, watch: CopyWatch): Promise<void> {
+  const field = page.getByRole('textbox', { name: 'About this candidate' });
+  const saved = page.getByText('Saved.', { exact: true });
+  for (;;) {
+    const number = progress.attempted + 1;
+    progress.attempted = number;
+    await field.fill(noteText(number));
+    await field.blur();
+    await saved.waitFor({ timeout: 60_000 });
+    progress.confirmed = number;
+    watch.confirmed(number);
+  }
+}
+
+/** Stars and unstars all candidates at once, a step over many rows, until the browser is gone. */
+async function starAll(page: Page, origin: string, projectId: string, progress: Progress): Promise<void> {
+  await page.goto(`${origin}/#/candidates/in/${projectId}`);
+  const first = page.locator('.grid-row .star').first();
+  await first.waitFor({ timeout: 60_000 });
+  await page.keyboard.press('Control+a');
+  const bar = page.getByRole('toolbar', { name: 'With the selected candidates' });
+  for (;;) {
+    progress.starring = true;
+    await bar.getByRole('button', { name: 'Star', exact: true }).click();
+    await page
+      .locator(`.grid-row .star[aria-pressed="${!progress.starred}"]`)
+      .first()
+      .waitFor({ timeout: 60_000 });
+    progress.starred = !progress.starred;
+    progress.starring = false;
+  }
+}
+
+/** Ids of the demo project and of one of its candidates, from the database. */
+const demoIds = (page: Page): Promise<{ projectId: string; candidateId: string }> =>
+  page.evaluate(async () => {
+    const db = await new Promise<IDBDatabase>((resolve, reject) => {
+      const request = indexedDB.open('spinhue');
+      request.onsuccess = () => resolve(request.result);
+      request.onerror = () => reject(request.error);
+    });
+    const rows = await new Promise<{ id: string; projectId: string }[]>((resolve) => {
+      const request = db.transaction('candidates').objectStore('candidates').getAll();
+      request.onsuccess = () => resolve(request.result as { id: string; projectId: string }[]);
+    });
+    db.close();
+    return { projectId: rows[0]!.projectId, candidateId: rows[0]!.id };
+  });
+
+/** The page is drawn, without a failure on screen or on the console. */
+async function cleanStart(running: KillableBrowser, address: string, faults: string[]): Promise<void> {
+  const { page } = running;
+  page.on('console', (message) => {
+    if (message.type() === 'error') faults.push(`console: ${message.text()}`);
+  });
+  // The TypeScript runner marks functions with this helper, which the page does not know.
+  await page.addInitScript('globalThis.__name ??= (named) => named');
+  page.on('pageerror', (error) => faults.push(`page: ${error.message}`));
+  await page.goto(address);
+  await page.getByRole('heading', { level: 1, name: 'Projects' }).waitFor({ timeout: 60_000 });
+}
+
+async function tornSnapshots(copies: string): Promise<string[]> {
+  const faults: string[] = [];
+  for (const project of await readdir(copies)) {
+    const folder = join(copies, project, 'snapshots');
+    for (const name of await readdir(folder).catch(() => [] as string[])) {
+      if (!name.endsWith('.spinhue')) continue;
+      if (!readBundle(await readFile(join(folder, name))).ok) faults.push(`snapshot ${name} is damaged`);
+    }
+  }
+  return faults;
+}
+
+/**
+ * Kills the browser process at random moments while edits go on, starts it again on the same profile, and looks whether
+ * everything that the screen had confirmed is there, whole, and in the folder of copies.
+ */
+export async function killTest(
+  kills: number,
+  seed: number,
+  onKill: (done: number, faults: number) => void = () => undefined,
+): Promise<KillReport> {
+  const folder = await mkdtemp(join(tmpdir(), 'spinhue-kill-'));
+  const profile = join(folder, 'profile');
+  const copies = join(folder, 'copies');
+  const mirror = new MirrorFolder({ folder: copies, create: true, stateFile: join(folder, 'written.json') });
+  // A copy of its own: a build meanwhile would take the page away.
+  const built = join(folder, 'page');
+  await cp(resolve(import.meta.dirname, '../../dist/renderer'), built, { recursive: true });
+  const server = await startLocalServer(
+    built,
+    { ...mirrorHandlers(() => mirror), openExternal: () => null },
+    0,
+  );
+  const random = seeded(seed);
+  const faults: string[] = [];
+  const catchUps_ms: number[] = [];
+  const progress: Progress = { attempted: 0, confirmed: 0, starred: false, starring: false };
+  const watch = new CopyWatch(copies, /"notes":"edit (\d+):/);
+  let running = await startBrowser(profile);
+  try {
+    await cleanStart(running, server.windowAddress(), faults);
+    await running.page.getByRole('link', { name: /^Demo: a filter/ }).waitFor({ timeout: 60_000 });
+    const { projectId, candidateId } = await demoIds(running.page);
+    for (let kill = 0; kill < kills; kill++) {
+      const { page } = running;
+      const notes = kill % 3 !== 2;
+      let editing: Promise<void>;
+      if (notes) {
+        await openSheet(page, server.origin, projectId, candidateId);
+        editing = writeNotes(page, progress, watch);
+      } else editing = starAll(page, server.origin, projectId, progress);
+      const stopped: Promise<string> = editing.then(
+        () => 'no error',
+        (error: unknown) => String(error),
+      );
+      const outcome = await Promise.race([
+        stopped,
+        new Promise<null>((done) => setTimeout(() => done(null), 100 + random.next() * 4000)),
+      ]);
+      if (outcome !== null) faults.push(`kill ${kill}: editing stopped by itself: ${outcome.slice(0, 300)}`);
+      const late = watch.waiting_ms;
+      await running.kill();
+      await stopped;
+      if (late > 2000) faults.push(`kill ${kill}: the copy was ${late} ms behind`);
+      watch.forgive();
+
+      running = await startBrowser(profile);
+      const startFaults: string[] = [];
+      await cleanStart(running, server.windowAddress(), startFaults);
+      const drawn = Date.now();
+      const state = await readStored(running.page, projectId, candidateId);
+      const found = [...startFaults, ...faultsOf(state, progress)];
+      faults.push(...found.map((fault) => `kill ${kill}: ${fault}`));
+      // What is stored counts from here on, confirmed or not.
+      progress.confirmed = numberOf(state.notes);
+      progress.starred = state.starred > 0;
+      progress.starring = false;
+      while (watch.number < progress.confirmed && Date.now() - drawn < 10_000) {
+        await new Promise((done) => setTimeout(done, 30));
+        await watch.look();
+      }
+      if (watch.number < progress.confirmed)
+        faults.push(`kill ${kill}: the copy did not catch up after the start`);
+      catchUps_ms.push(Date.now() - drawn);
+      onKill(kill + 1, faults.length);
+    }
+    faults.push(...watch.torn, ...(await tornSnapshots(copies)));
+  } finally {
+    await running.kill();
+    watch.stop();
+    await server.close();
+    await rm(folder, { recursive: true, force: true, maxRetries: 10 });
+  }
+  return { kills, confirmed: progress.attempted, faults, lags_ms: watch.lags_ms, catchUps_ms };
+}
