@@ -1,142 +1,62 @@
-import { tridiagonalEigenvalues, tridiagonalEigenvectors } from './tridiagonal';
-import { scratchVectors } from './workspace';
+import {
+  diagonal,
+  largestSize,
+  offDiagonal,
+  requireSize,
+  sortEigenvalues,
+  tridiagonalEigenvalues,
+  tridiagonalEigenvectors,
+  vectorColumns,
+} from './tridiagonal';
 
-const reductionScratch = scratchVectors(4);
-const solutionScratch = scratchVectors(3);
+// Constants of the module for the sake of the compiler; see tridiagonal.ts. Real and imaginary part side by side.
+const A = new Float64Array(2 * largestSize * largestSize);
+const U = new Float64Array(2 * largestSize);
+const Q = new Float64Array(2 * largestSize);
+const V = new Float64Array(2 * largestSize);
+const P = new Float64Array(2 * largestSize);
+const scales = new Float64Array(largestSize);
+/** Unitary diagonal D with T = D |T| D†. */
+const phases = new Float64Array(2 * largestSize);
 
 /**
- * Householder reduction of a Hermitian matrix to real tridiagonal form. `a` is row-major with real and imaginary part side
- * by side; the lower triangle is read. On return `offDiagonal` holds the moduli, row i below the diagonal the conjugate of
- * the Householder vector, `scales[i]` half its squared length, and `phases` (2 numbers per index) the unitary diagonal D with
- * T = D |T| D†.
+ * Householder reduction of the Hermitian matrix in A (lower triangle) to real tridiagonal form, step for step as in the real
+ * case. Row i below the diagonal keeps the conjugate of its Householder vector.
  */
-function reduce(
-  a: Float64Array,
-  n: number,
-  diagonal: Float64Array,
-  offDiagonal: Float64Array,
-  scales: Float64Array,
-  phases: Float64Array,
-): void {
-  let [u, q, v, p] = reductionScratch(2 * n) as [Float64Array, Float64Array, Float64Array, Float64Array];
-  let pending = false;
+function reduce(n: number): void {
+  U.fill(0, 0, 2 * n);
+  Q.fill(0, 0, 2 * n);
+  P.fill(0, 0, 2 * n);
   for (let i = n - 1; i > 0; i--) {
     const row = 2 * i * n;
-    if (pending) subtractFromRow(a, row, i, u, q);
-    diagonal[i] = a[row + 2 * i]!;
-    const lastRe = a[row + 2 * i - 2]!;
-    const lastIm = -a[row + 2 * i - 1]!;
-    let tail = 0;
-    for (let k = 0; k < 2 * i - 2; k++) tail += a[row + k]! * a[row + k]!;
-    const last = Math.hypot(lastRe, lastIm);
+    const tail = takeRow(row, i);
+    diagonal[i] = A[row + 2 * i]!;
+    const lastRe = V[2 * i - 2]!;
+    const lastIm = V[2 * i - 1]!;
+    const last = Math.sqrt(lastRe * lastRe + lastIm * lastIm);
     const phaseRe = last === 0 ? 1 : lastRe / last;
     const phaseIm = last === 0 ? 0 : lastIm / last;
-    if (tail === 0) {
-      offDiagonal[i - 1] = last;
-      scales[i] = 0;
-      phases[2 * i] = phaseRe;
-      phases[2 * i + 1] = phaseIm;
-      if (pending) for (let j = 0; j < i; j++) subtractFromRow(a, 2 * j * n, j, u, q);
-      pending = false;
-      continue;
-    }
+    const reflects = tail !== 0;
     const length = Math.sqrt(tail + last * last);
+    const h = reflects ? length * (length + last) : 1;
     offDiagonal[i - 1] = length;
-    phases[2 * i] = -phaseRe;
-    phases[2 * i + 1] = -phaseIm;
-    a[row + 2 * i - 2] = lastRe + phaseRe * length;
-    a[row + 2 * i - 1] = -(lastIm + phaseIm * length);
-    const h = length * (length + last);
-    scales[i] = h;
-    for (let k = 0; k < 2 * i; k += 2) {
-      v[k] = a[row + k]!;
-      v[k + 1] = -a[row + k + 1]!;
-      p[k] = 0;
-      p[k + 1] = 0;
-    }
-    if (!pending) {
-      u.fill(0, 0, 2 * i);
-      q.fill(0, 0, 2 * i);
-    }
-    updateAndMultiply(a, n, i, u, q, v, p);
-    let vp = 0;
-    for (let k = 0; k < 2 * i; k++) vp += v[k]! * p[k]!;
-    const shift = vp / (2 * h * h);
-    for (let k = 0; k < 2 * i; k++) p[k] = p[k]! / h - shift * v[k]!;
-    [u, v] = [v, u];
-    [q, p] = [p, q];
-    pending = true;
+    scales[i] = reflects ? h : 0;
+    phases[2 * i] = reflects ? -phaseRe : phaseRe;
+    phases[2 * i + 1] = reflects ? -phaseIm : phaseIm;
+    if (reflects) {
+      V[2 * i - 2] = lastRe + phaseRe * length;
+      V[2 * i - 1] = lastIm + phaseIm * length;
+    } else V.fill(0, 0, 2 * i);
+    A[row + 2 * i - 2] = V[2 * i - 2]!;
+    A[row + 2 * i - 1] = -V[2 * i - 1]!;
+    for (let j = 0; j < i; j++) oneRow(2 * j * n, 2 * j);
+    prepareUpdate(2 * i, h);
   }
-  if (pending) subtractFromRow(a, 0, 0, u, q);
-  diagonal[0] = a[0]!;
+  diagonal[0] = A[0]! - 2 * (Q[0]! * U[0]! + Q[1]! * U[1]!);
   phases[0] = 1;
   phases[1] = 0;
-  accumulatePhases(phases, n);
-}
-
-/** Row j of A − q u† − u q† up to the diagonal. */
-function subtractFromRow(a: Float64Array, at: number, j: number, u: Float64Array, q: Float64Array): void {
-  const ur = u[2 * j]!;
-  const ui = u[2 * j + 1]!;
-  const qr = q[2 * j]!;
-  const qi = q[2 * j + 1]!;
-  for (let k = 0; k <= 2 * j; k += 2) {
-    const vr = u[k]!;
-    const vi = u[k + 1]!;
-    const wr = q[k]!;
-    const wi = q[k + 1]!;
-    a[at + k]! -= qr * vr + qi * vi + ur * wr + ui * wi;
-    a[at + k + 1]! -= qi * vr - qr * vi + ui * wr - ur * wi;
-  }
-}
-
-/** A ← A − q u† − u q† and p += A v in one pass over the leading m × m part. */
-function updateAndMultiply(
-  a: Float64Array,
-  n: number,
-  m: number,
-  u: Float64Array,
-  q: Float64Array,
-  v: Float64Array,
-  p: Float64Array,
-): void {
-  for (let j = 0; j < m; j++) {
-    const at = 2 * j * n;
-    const end = 2 * j;
-    const ur = u[end]!;
-    const ui = u[end + 1]!;
-    const qr = q[end]!;
-    const qi = q[end + 1]!;
-    const vr = v[end]!;
-    const vi = v[end + 1]!;
-    const corner = a[at + end]! - 2 * (qr * ur + qi * ui);
-    a[at + end] = corner;
-    let sr = corner * vr;
-    let si = corner * vi;
-    for (let k = 0; k < end; k += 2) {
-      const xu = u[k]!;
-      const yu = u[k + 1]!;
-      const xq = q[k]!;
-      const yq = q[k + 1]!;
-      const re = a[at + k]! - (qr * xu + qi * yu + ur * xq + ui * yq);
-      const im = a[at + k + 1]! - (qi * xu - qr * yu + ui * xq - ur * yq);
-      a[at + k] = re;
-      a[at + k + 1] = im;
-      const xv = v[k]!;
-      const yv = v[k + 1]!;
-      sr += re * xv - im * yv;
-      si += re * yv + im * xv;
-      p[k]! += re * vr + im * vi;
-      p[k + 1]! += re * vi - im * vr;
-    }
-    p[end]! += sr;
-    p[end + 1]! += si;
-  }
-}
-
-/** d_i = conj(t_i) d_{i−1} with t_i the phase of the element above the diagonal. */
-function accumulatePhases(phases: Float64Array, n: number): void {
   for (let i = 1; i < n; i++) {
+    // d_i = conj(t_i) d_{i−1} with t_i the phase of the element above the diagonal.
     const [tr, ti] = [phases[2 * i]!, phases[2 * i + 1]!];
     const [dr, di] = [phases[2 * i - 2]!, phases[2 * i - 1]!];
     phases[2 * i] = tr * dr + ti * di;
@@ -144,69 +64,149 @@ function accumulatePhases(phases: Float64Array, n: number): void {
   }
 }
 
+/** Brings row i up to date and copies its conjugate to V; the sum of the squares of all but its last two elements. */
+function takeRow(row: number, i: number): number {
+  const ur = U[2 * i]!;
+  const ui = U[2 * i + 1]!;
+  const qr = Q[2 * i]!;
+  const qi = Q[2 * i + 1]!;
+  let sum = 0;
+  let last = 0;
+  for (let k = 0; k < 2 * i; k += 2) {
+    const vr = U[k]!;
+    const vi = U[k + 1]!;
+    const wr = Q[k]!;
+    const wi = Q[k + 1]!;
+    const re = A[row + k]! - (qr * vr + qi * vi + ur * wr + ui * wi);
+    const im = A[row + k + 1]! - (qi * vr - qr * vi + ui * wr - ur * wi);
+    A[row + k] = re;
+    A[row + k + 1] = im;
+    V[k] = re;
+    V[k + 1] = -im;
+    sum += last;
+    last = re * re + im * im;
+  }
+  A[row + 2 * i]! -= 2 * (qr * ur + qi * ui);
+  return sum;
+}
+
+/** One row of A ← A − q u† − u q† and its share of p += A v. */
+function oneRow(at: number, end: number): void {
+  const ur = U[end]!;
+  const ui = U[end + 1]!;
+  const qr = Q[end]!;
+  const qi = Q[end + 1]!;
+  const vr = V[end]!;
+  const vi = V[end + 1]!;
+  let sr = 0;
+  let si = 0;
+  for (let k = 0; k < end; k += 2) {
+    const xu = U[k]!;
+    const yu = U[k + 1]!;
+    const xq = Q[k]!;
+    const yq = Q[k + 1]!;
+    const re = A[at + k]! - (qr * xu + qi * yu + ur * xq + ui * yq);
+    const im = A[at + k + 1]! - (qi * xu - qr * yu + ui * xq - ur * yq);
+    A[at + k] = re;
+    A[at + k + 1] = im;
+    const xv = V[k]!;
+    const yv = V[k + 1]!;
+    sr += re * xv - im * yv;
+    si += re * yv + im * xv;
+    P[k]! += re * vr + im * vi;
+    P[k + 1]! += re * vi - im * vr;
+  }
+  const corner = A[at + end]! - 2 * (qr * ur + qi * ui);
+  A[at + end] = corner;
+  P[end]! += sr + corner * vr;
+  P[end + 1]! += si + corner * vi;
+}
+
+/** u ← v and q ← p/h − (v†p/2h²) v for the next update; p ← 0. `length` counts numbers. */
+function prepareUpdate(length: number, h: number): void {
+  let vp = 0;
+  for (let k = 0; k < length; k++) vp += V[k]! * P[k]!;
+  const inverse = 1 / h;
+  const shift = 0.5 * vp * inverse * inverse;
+  for (let k = 0; k < length; k++) {
+    const v = V[k]!;
+    Q[k] = P[k]! * inverse - shift * v;
+    U[k] = v;
+    P[k] = 0;
+  }
+}
+
+function load(a: ArrayLike<number>, n: number): void {
+  requireSize(n);
+  for (let i = 0; i < n; i++) {
+    const row = 2 * i * n;
+    for (let j = row; j <= row + 2 * i + 1; j++) A[j] = a[j]!;
+  }
+}
+
 /**
- * Eigenvalues, ascending, of a Hermitian n × n matrix: row-major, real and imaginary part side by side, lower triangle read
- * and destroyed. Throws `no-convergence`.
+ * Eigenvalues, ascending, of a Hermitian n × n matrix: row-major, real and imaginary part side by side, only the lower
+ * triangle read. Throws `no-convergence`, `too-large`.
  */
-export function hermitianEigenvalues(a: Float64Array, n: number, values = new Float64Array(n)): Float64Array {
+export function hermitianEigenvalues(
+  a: ArrayLike<number>,
+  n: number,
+  values = new Float64Array(n),
+): Float64Array {
   if (n === 0) return values;
-  const [offDiagonal, scales, phases] = solutionScratch(2 * n) as [Float64Array, Float64Array, Float64Array];
-  reduce(a, n, values, offDiagonal, scales, phases);
-  tridiagonalEigenvalues(values, offDiagonal, n);
+  load(a, n);
+  reduce(n);
+  tridiagonalEigenvalues(n, values);
   return values;
 }
 
 /**
  * Eigenvalues and eigenvectors; `vectors` has one eigenvector per row, real and imaginary part side by side. `a` as in
- * `hermitianEigenvalues`. Throws `no-convergence`.
+ * `hermitianEigenvalues`. Throws `no-convergence`, `too-large`.
  */
 export function hermitianEigensystem(
-  a: Float64Array,
+  a: ArrayLike<number>,
   n: number,
 ): { readonly values: Float64Array; readonly vectors: Float64Array } {
   const values = new Float64Array(n);
   const vectors = new Float64Array(2 * n * n);
   if (n === 0) return { values, vectors };
-  const [offDiagonal, scales, phases] = solutionScratch(2 * n) as [Float64Array, Float64Array, Float64Array];
-  reduce(a, n, values, offDiagonal, scales, phases);
-  const real = new Float64Array(n * n);
-  for (let i = 0; i < n; i++) real[i * n + i] = 1;
-  tridiagonalEigenvectors(values, offDiagonal, real, n, n);
-  for (let k = 0; k < n; k++) {
-    const at = 2 * k * n;
+  load(a, n);
+  reduce(n);
+  tridiagonalEigenvectors(n, values);
+  sortEigenvalues(values).forEach((column, k) => {
     for (let i = 0; i < n; i++) {
-      vectors[at + 2 * i] = phases[2 * i]! * real[k * n + i]!;
-      vectors[at + 2 * i + 1] = phases[2 * i + 1]! * real[k * n + i]!;
+      const entry = vectorColumns[i * n + column]!;
+      Z[2 * i] = phases[2 * i]! * entry;
+      Z[2 * i + 1] = phases[2 * i + 1]! * entry;
     }
-    undoReflections(a, n, scales, vectors, at);
-  }
+    for (let i = 1; i < n; i++) if (scales[i] !== 0) reflect(2 * i * n, 2 * i, scales[i]!);
+    for (let i = 0; i < 2 * n; i++) vectors[2 * k * n + i] = Z[i]!;
+  });
   return { values, vectors };
 }
 
-function undoReflections(
-  a: Float64Array,
-  n: number,
-  scales: Float64Array,
-  z: Float64Array,
-  at: number,
-): void {
-  for (let i = 1; i < n; i++) {
-    const h = scales[i]!;
-    if (h === 0) continue;
-    const row = 2 * i * n;
-    let sr = 0;
-    let si = 0;
-    for (let k = 0; k < 2 * i; k += 2) {
-      const [cr, ci, zr, zi] = [a[row + k]!, a[row + k + 1]!, z[at + k]!, z[at + k + 1]!];
-      sr += cr * zr - ci * zi;
-      si += cr * zi + ci * zr;
-    }
-    sr /= h;
-    si /= h;
-    for (let k = 0; k < 2 * i; k += 2) {
-      const [cr, ci] = [a[row + k]!, a[row + k + 1]!];
-      z[at + k]! -= cr * sr + ci * si;
-      z[at + k + 1]! -= cr * si - ci * sr;
-    }
+/** The eigenvector at hand. */
+const Z = new Float64Array(2 * largestSize);
+
+/** z − v (v†z)/h, with v† in row i of A. */
+function reflect(row: number, end: number, h: number): void {
+  let sr = 0;
+  let si = 0;
+  for (let k = 0; k < end; k += 2) {
+    const cr = A[row + k]!;
+    const ci = A[row + k + 1]!;
+    const zr = Z[k]!;
+    const zi = Z[k + 1]!;
+    sr += cr * zr - ci * zi;
+    si += cr * zi + ci * zr;
+  }
+  sr /= h;
+  si /= h;
+  for (let k = 0; k < end; k += 2) {
+    const cr = A[row + k]!;
+    const ci = A[row + k + 1]!;
+    Z[k]! -= cr * sr + ci * si;
+    Z[k + 1]! -= cr * si - ci * sr;
   }
 }
