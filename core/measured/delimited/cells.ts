@@ -13,7 +13,7 @@ const grouped = {
   ',': /^[+-]?[1-9]\d{0,2}(?:\.\d{3})+(,\d+)?$/,
 };
 const saturated =
-  /^(?:over(?:flow|range|load)?|ovr|ovl|ofl|sat(?:\.|urated)?|\*+|#+|[>≥]+ ?=? ?[\d.,]+|\+?inf(?:inity)?|\+?∞|-{2,}|out of range|o\.?r\.?)$/i;
+  /^(?:o\.?ve?r?[\s._-]*(?:flo?w|flw|range?|rng|load|scale|fl)?|over|ovl|ofl|o\.?\s?r(?:ange)?\.?|sat(?:\.|urated|uration)?|clipp?(?:ed)?|off[\s-]?scale|out of range|max|\*+|#+|[>≥]+ ?=? ?[\d.,]+|\+?inf(?:inity|inite)?|\+?∞|-{2,})$/i;
 const missing = /^(?:nan|n\/?a|null|none|\?|-|–|\.|blank|[<≤]+ ?=? ?-?[\d.,]+|-inf(?:inity)?)$/i;
 
 /** Reads a cell with the given decimal sign. A number may group its thousands with the other sign. */

@@ -1,6 +1,6 @@
 import type { YUnit } from '../../record/curve';
 import type { RawPoints } from '../reading/order';
-import type { XUnitFound } from '../reading/units';
+import { xUnitOf, type XUnitFound } from '../reading/units';
 import type { Cell } from './cells';
 import type { Header } from './header';
 import type { DataRow } from './table';
@@ -59,7 +59,9 @@ export function findSeries(rows: readonly DataRow[], width: number, header: Head
     // In paired columns the name may stand over the x column.
     const shared = xColumn > 0 || columns?.some((_, i) => i > 0 && isX(i)) === true;
     const nameOverX =
-      shared && beside !== undefined && beside.name !== null && own?.name === null ? beside.name : null;
+      shared && beside?.name != null && xUnitOf(beside.name).unit === 'unknown' && own?.name === null
+        ? beside.name
+        : null;
     series.push({
       xColumn,
       yColumn: column,

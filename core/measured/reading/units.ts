@@ -42,7 +42,7 @@ export function yUnitOf(label: string): YUnit {
     return 'molar-absorptivity';
   }
   if (is(/reflect|fluoresc|emission|intensity|counts/)) return 'unknown';
-  if (is(/% ?t\b|%t|percent t|t ?[/([]? ?%|transmi.*(%|percent)|transmission \(?%/))
+  if (is(/% ?t(?:rans|\b)|%t|percent t|t ?[/([]? ?%|transmi.*(%|percent)|transmission \(?%/))
     return 'percent-transmittance';
   if (is(/transmittan|transmission|^t$/)) return 'transmittance';
   if (is(/absorb|absorpt|extin[kc]tion|\babs\b|^a$|^a ?[([/]|^a,|^a\.?u\.?$|optical density|\bod\b|^e$/)) {
