@@ -69,7 +69,7 @@ describe('parentage', () => {
 
   it('counts one- and two-electron jumps as the textbooks do (Figgis and Hitchman 2000; Lever 1984)', () => {
     const chromium = solve(3, octahedral(17_400));
-    const jump = (name: string, which = 0): number =>
+    const jump = (name: string, which = 0): number | null =>
       levelAccount(chromium, find(chromium, name, which), 3).electronJump;
     expect(jump('2Eg')).toBe(0);
     expect(jump('4T2g')).toBe(1);
