@@ -237,16 +237,16 @@ describe('a band fit', () => {
 });
 
 describe('standard errors of band fits', () => {
-  // 68.3 % of normal deviates lie within one standard deviation; the sample of this test is small, the full one has a
-  // command of its own.
+  // 68.3 % of normal deviates lie within one standard deviation. The parameters of one fit go together, so 60 draws say it
+  // to about 6 %; the limits are three times that. The full sample has a command of its own (soak:bands).
   it.each(Object.keys(trueSpectra))(
     'of %s are honest: one sigma holds about two thirds of 60 draws, three hold the centres',
     (name) => {
       const result = coverage(trueSpectra[name]!, 60, 1);
       expect(result.failed).toBe(0);
       expect(result.centresWithin3).toBeGreaterThanOrEqual(0.98);
-      expect(result.within1).toBeGreaterThan(0.55);
-      expect(result.within1).toBeLessThan(0.8);
+      expect(result.within1).toBeGreaterThan(0.5);
+      expect(result.within1).toBeLessThan(0.86);
     },
   );
 });
