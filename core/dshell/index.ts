@@ -18,3 +18,11 @@ export {
   type AngularOperators,
   type DeterminantOperator,
 } from './states/operators';
+export {
+  levelDiagram,
+  type DiagramCurve,
+  type DiagramParameter,
+  type DiagramRange,
+  type GroundChange,
+  type LevelDiagram,
+} from './diagrams';

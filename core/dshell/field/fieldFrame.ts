@@ -37,9 +37,13 @@ export function fieldFrame(V: FieldMatrix): FieldFrame {
 }
 
 /** The largest group that shows in the laboratory frame itself. */
-export function inStandardFrame(V: FieldMatrix): FieldFrame {
-  const tensors = fieldTensors(V);
-  return groupIn(tensors, identityRotation, roundingOf(fieldScale(tensors)));
+export const inStandardFrame = (V: FieldMatrix): FieldFrame => inFrameOf(V, identityRotation);
+
+/** The largest group that shows in the frame turned by `rotation`. */
+export function inFrameOf(V: FieldMatrix, rotation: Quaternion): FieldFrame {
+  const turned = rotation === identityRotation ? V : turnedField(V, rotation);
+  const tensors = fieldTensors(turned);
+  return groupIn(tensors, rotation, roundingOf(fieldScale(tensors)));
 }
 
 const roundingOf = (scale: number): number => Math.max(absoluteRounding, relativeRounding * scale);

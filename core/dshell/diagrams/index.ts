@@ -1,0 +1,8 @@
+export { type DiagramParameter } from './parameter';
+export {
+  levelDiagram,
+  type DiagramCurve,
+  type DiagramRange,
+  type GroundChange,
+  type LevelDiagram,
+} from './levelDiagram';
