@@ -24,6 +24,8 @@ export interface ViewDefinition {
   readonly hint: string;
   /** Usually `lazy(() => import('./XView'))`. */
   readonly component: ComponentType;
+  /** Fetches the code ahead of time, for views that must open in a blink: the same `import('./XView')`. */
+  readonly preload?: () => Promise<unknown>;
 }
 
 export const defineView = (view: ViewDefinition): ViewDefinition => view;

@@ -21,6 +21,11 @@ export class EstimatePool {
     this.#size = Math.max(1, size);
   }
 
+  /** Starts the worker that answers single questions, so that the first one need not wait for it. */
+  warmUp(): void {
+    this.#singleClient();
+  }
+
   one(
     input: CandidateInput,
     overlay: Overlay,

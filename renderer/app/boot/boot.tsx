@@ -26,6 +26,10 @@ async function start(root: Root, host: Host, views: readonly ViewDefinition[]): 
     const settings = await store.settings.read();
     const pool = new EstimatePool(startEstimateWorker, bulkWorkers());
     root.render(<App services={{ store, host, pool }} settings={settings} views={views} />);
+    requestIdleCallback(() => {
+      pool.warmUp();
+      for (const { preload } of views) void preload?.().catch(() => undefined);
+    });
   } catch (error) {
     const { message, remedy = '' } = asStoreError(error);
     root.render(

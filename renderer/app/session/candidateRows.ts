@@ -5,6 +5,8 @@ import { Observable } from './observable';
 
 /** Read in portions, so that a large project does not freeze the window while it opens. */
 const portion = 2000;
+/** The first rows are shown at once; a list that is long and still growing is drawn again only now and then. */
+const calm_ms = 1000;
 
 type Listener = (rows: readonly Candidate[]) => void;
 
@@ -70,12 +72,10 @@ export class CandidateRows extends Observable {
     this.#error = null;
     this.#unreadable = 0;
     try {
-      const ids = await this.#store.candidates.idsOf(this.projectId);
-      for (let at = 0; at < ids.length && current(); at += portion) {
-        const rows = await this.#store.candidates.getMany(ids.slice(at, at + portion));
+      for await (const rows of this.#store.candidates.inPortions(this.projectId, portion)) {
         if (!current()) return;
         this.#take(rows.map((row) => [row.id, row] as const));
-        this.changed(100);
+        this.changed(this.#rows.size > portion ? calm_ms : 0);
       }
       this.#state = 'ready';
     } catch (error) {

@@ -1,8 +1,12 @@
-/** Order in which the table last showed the candidates of each project: the sheet goes on from there. */
-const orders = new Map<string, readonly string[]>();
+interface HasCandidate {
+  readonly candidate: { readonly id: string };
+}
 
-export const rememberOrder = (projectId: string, ids: readonly string[]): void =>
-  void orders.set(projectId, ids);
+/** Rows as the table last showed them, for each project: the sheet goes on from there. */
+const orders = new Map<string, readonly HasCandidate[]>();
+
+export const rememberOrder = (projectId: string, rows: readonly HasCandidate[]): void =>
+  void orders.set(projectId, rows);
 
 export interface Neighbours {
   readonly before: string | null;
@@ -14,7 +18,12 @@ export interface Neighbours {
 
 export function neighboursOf(projectId: string, id: string): Neighbours {
   const order = orders.get(projectId) ?? [];
-  const at = order.indexOf(id);
+  const at = order.findIndex(({ candidate }) => candidate.id === id);
   if (at < 0) return { before: null, after: null, place: null, count: order.length };
-  return { before: order[at - 1] ?? null, after: order[at + 1] ?? null, place: at + 1, count: order.length };
+  return {
+    before: order[at - 1]?.candidate.id ?? null,
+    after: order[at + 1]?.candidate.id ?? null,
+    place: at + 1,
+    count: order.length,
+  };
 }

@@ -1,3 +1,4 @@
+import Dexie from 'dexie';
 import type { Candidate, Row } from '../../../core/record/project';
 import type { SpinhueDatabase } from '../database';
 import type { Journal } from '../journal/journal';
@@ -38,14 +39,20 @@ export class CandidateRepository {
     return this.#db.candidates.where('projectId').equals(projectId).toArray();
   }
 
-  idsOf(projectId: string): Promise<string[]> {
-    return this.#db.candidates.where('projectId').equals(projectId).primaryKeys();
-  }
-
-  /** In the order of the ids; those that no longer exist are left out. */
-  async getMany(ids: readonly string[]): Promise<Candidate[]> {
-    const found = await this.#db.candidates.bulkGet([...ids]);
-    return found.filter((row) => row !== undefined);
+  /** The same in portions, in the order of the ids, which is that of entry. */
+  async *inPortions(projectId: string, portion: number): AsyncGenerator<Candidate[]> {
+    const { candidates } = this.#db;
+    let last: string | typeof Dexie.minKey = Dexie.minKey;
+    for (;;) {
+      const rows: Candidate[] = await candidates
+        .where('[projectId+id]')
+        .between([projectId, last], [projectId, Dexie.maxKey], false, true)
+        .limit(portion)
+        .toArray();
+      if (rows.length > 0) yield rows;
+      if (rows.length < portion) return;
+      last = rows.at(-1)!.id;
+    }
   }
 
   async create(projectId: string, given: readonly NewCandidate[], label?: string): Promise<Candidate[]> {

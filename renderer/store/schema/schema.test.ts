@@ -9,7 +9,7 @@ import { schemaVersions } from './versions';
 const shipped: Record<number, Record<string, string>> = {
   1: {
     projects: 'id, deletedAt',
-    candidates: 'id, projectId, deletedAt',
+    candidates: 'id, projectId, [projectId+id], deletedAt',
     parameterSets: 'id, projectId, deletedAt',
     frozenPredictions: 'id, projectId, candidateId, deletedAt',
     samples: 'id, projectId, candidateId, deletedAt',

@@ -4,7 +4,7 @@
  */
 export const schemaV1 = {
   projects: 'id, deletedAt',
-  candidates: 'id, projectId, deletedAt',
+  candidates: 'id, projectId, [projectId+id], deletedAt',
   parameterSets: 'id, projectId, deletedAt',
   frozenPredictions: 'id, projectId, candidateId, deletedAt',
   samples: 'id, projectId, candidateId, deletedAt',

@@ -35,14 +35,7 @@ export default function CandidatesView() {
   const terms = useMemo(() => parseFilter(filterText, [...library.ligands.values()]), [filterText, library]);
   const [sort, setSort] = useSort(project.targetLab !== null);
   const { all, shown } = useTableRows(session, terms, sort);
-  useEffect(
-    () =>
-      rememberOrder(
-        project.id,
-        shown.map(({ candidate }) => candidate.id),
-      ),
-    [project.id, shown],
-  );
+  useEffect(() => rememberOrder(project.id, shown), [project.id, shown]);
   const selection = useSelection(shown);
   const actions = useRowActions(project.id);
   const [current, setCurrent] = useState<string | null>(null);
@@ -136,7 +129,7 @@ export default function CandidatesView() {
       )}
       <TagDialog
         rows={tagged}
-        known={useTags(all)}
+        all={all}
         onTag={(tag) => tagged && actions.tag(tagged, tag)}
         onUntag={(tag) => {
           if (tagged) actions.untag(tagged, tag);
@@ -220,9 +213,6 @@ function useSubjects(
     [shown, ids, current],
   );
 }
-
-const useTags = (all: readonly TableRow[]): readonly string[] =>
-  useMemo(() => [...new Set(all.flatMap(({ candidate }) => candidate.tags))].sort(), [all]);
 
 function useCopy(rows: readonly TableRow[]): () => void {
   const act = useAction();

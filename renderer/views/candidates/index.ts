@@ -1,6 +1,8 @@
 import { lazy } from 'react';
 import { defineView } from '../../app/view';
 
+const load = () => import('./CandidatesView');
+
 export const candidatesView = defineView({
   id: 'candidates',
   title: 'Candidates',
@@ -9,5 +11,6 @@ export const candidatesView = defineView({
   command: 'show-candidates',
   keys: 'g c',
   hint: 'All complexes of the project: rank, filter, tag, compare',
-  component: lazy(() => import('./CandidatesView')),
+  component: lazy(load),
+  preload: load,
 });

@@ -37,7 +37,8 @@ const formulaOf = ({ candidate, summary }: TableRow): string =>
 const collator = new Intl.Collator('en', { numeric: true });
 
 /** Ids rise in the order of entry, so that a row that was deleted and brought back is where it was. */
-const asEntered = (one: TableRow, other: TableRow): number => (one.candidate.id < other.candidate.id ? -1 : 1);
+const asEntered = (one: TableRow, other: TableRow): number =>
+  one.candidate.id < other.candidate.id ? -1 : 1;
 
 /** Rows in order; those without the quantity come last whichever way it is sorted, equals in the order of entry. */
 export function sortRows(rows: readonly TableRow[], { by, descending }: Sort): TableRow[] {

@@ -1,6 +1,8 @@
 import { lazy } from 'react';
 import { defineView } from '../../app/view';
 
+const load = () => import('./EntryView');
+
 export const entryView = defineView({
   id: 'entry',
   title: 'New candidate',
@@ -9,5 +11,6 @@ export const entryView = defineView({
   command: 'new-candidate',
   keys: 'g n',
   hint: 'Choose metal, oxidation state, geometry and ligands, with the estimate alongside',
-  component: lazy(() => import('./EntryView')),
+  component: lazy(load),
+  preload: load,
 });

@@ -1,3 +1,4 @@
+import { useDeferredValue } from 'react';
 import type { ColourCloud } from '../../../core/colour/types';
 import type { Prediction } from '../../../core/prediction/types';
 import type { Candidate } from '../../../core/record/project';
@@ -21,6 +22,8 @@ interface SheetProps {
 
 /** Everything that is said of one complex, the answers first, their account below. */
 export function Sheet({ candidate, prediction, cloud }: SheetProps) {
+  // Figures take longer to draw than numbers: the numbers are on screen first.
+  const withFigures = useDeferredValue(true, false);
   return (
     <div className="sheet">
       {prediction.flags.length > 0 && (
@@ -33,9 +36,9 @@ export function Sheet({ candidate, prediction, cloud }: SheetProps) {
         <SpinPanel prediction={prediction} />
         <FieldPanel prediction={prediction} />
       </div>
-      <SpectrumPanel prediction={prediction} />
+      {withFigures && <SpectrumPanel prediction={prediction} />}
       <BandTable bands={prediction.bands} />
-      <LevelPanel prediction={prediction} />
+      {withFigures && <LevelPanel prediction={prediction} />}
       <section className="panel sheet-wide" aria-labelledby="sheet-left-out">
         <h2 id="sheet-left-out">Left out of this estimate</h2>
         {prediction.leftOut.length === 0 ? (

@@ -1,6 +1,8 @@
 import { lazy } from 'react';
 import { defineView } from '../../app/view';
 
+const load = () => import('./SheetView');
+
 export const sheetView = defineView({
   id: 'sheet',
   title: 'Complex',
@@ -8,5 +10,6 @@ export const sheetView = defineView({
   order: null,
   under: 'candidates',
   hint: 'Everything about one candidate',
-  component: lazy(() => import('./SheetView')),
+  component: lazy(load),
+  preload: load,
 });

@@ -1,10 +1,10 @@
 import { useVirtualizer } from '@tanstack/react-virtual';
-import { useCallback, useEffect, useRef, useState, type CSSProperties } from 'react';
+import { useCallback, useEffect, useMemo, useRef, useState, type CSSProperties } from 'react';
 import { useRouter } from '../../../app/router/RouterContext';
 import type { Selection } from '../selection/useSelection';
 import type { Sort } from '../sorting';
 import type { TableRow } from '../tableRow';
-import type { Column } from './columns';
+import { type Column, tracksOf } from './columns';
 import { GridHead } from './GridHead';
 import { GridRow } from './GridRow';
 import { useGridKeys } from './useGridKeys';
@@ -35,7 +35,7 @@ export function CandidateGrid(props: CandidateGridProps) {
     count: shown.length,
     getScrollElement: () => scroller.current,
     estimateSize: () => rowHeight,
-    overscan: 8,
+    overscan: 5,
     getItemKey: (place) => shown[place]!.candidate.id,
   });
 
@@ -66,8 +66,11 @@ export function CandidateGrid(props: CandidateGridProps) {
   );
   const onKeyDown = useGridKeys({ shown, current, perPage: 8, selection, onMove: move, onOpen: open });
 
-  const tracks = `1.9rem 1.9rem ${columns.map(({ width }) => width).join(' ')}`;
-  const currentShown = shown.some(({ candidate }) => candidate.id === current);
+  const { tracks, least } = tracksOf(columns);
+  const currentShown = useMemo(
+    () => shown.some(({ candidate }) => candidate.id === current),
+    [shown, current],
+  );
   return (
     <div
       className="grid"
@@ -76,7 +79,7 @@ export function CandidateGrid(props: CandidateGridProps) {
       aria-rowcount={shown.length + 1}
       aria-multiselectable="true"
       ref={scroller}
-      style={{ '--tracks': tracks } as CSSProperties}
+      style={{ '--tracks': tracks, '--least': least } as CSSProperties}
       onKeyDown={onKeyDown}
     >
       <div role="rowgroup" className="grid-head-group">

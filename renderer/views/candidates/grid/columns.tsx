@@ -23,8 +23,9 @@ export interface Column {
   readonly under?: (unit: EnergyUnit) => ReactNode;
   /** What a click on the title ranks by. */
   readonly ranking?: Ranking;
-  /** Track of the grid. */
-  readonly width: string;
+  /** Least width, rem, and its share of what is left over; fixed without one. */
+  readonly least: number;
+  readonly share?: number;
   /** Cannot be hidden. */
   readonly fixed?: true;
   readonly cell: (row: TableRow) => ReactNode;
@@ -42,7 +43,8 @@ export const columns: readonly Column[] = [
     id: 'complex',
     title: 'Complex',
     ranking: 'formula',
-    width: 'minmax(9.5rem, 1.3fr)',
+    least: 9.5,
+    share: 1.3,
     fixed: true,
     cell: (row) => <ComplexCell row={row} />,
   },
@@ -50,13 +52,14 @@ export const columns: readonly Column[] = [
     id: 'strip',
     title: 'Light that passes, nm',
     under: () => <TransmissionScale />,
-    width: 'minmax(8rem, 1fr)',
+    least: 8,
+    share: 1,
     cell: (row) => estimated(row, ({ transmittance }) => <TransmissionStrip transmittance={transmittance} />),
   },
   {
     id: 'colour',
     title: 'Seen colour',
-    width: '8.5rem',
+    least: 8.25,
     cell: (row) => estimated(row, ({ colour }) => <Swatch colour={colour} size="row" text="words" />),
   },
   {
@@ -64,7 +67,7 @@ export const columns: readonly Column[] = [
     title: 'ΔE00',
     under: () => 'to target',
     ranking: 'distance',
-    width: '4rem',
+    least: 4,
     cell: ({ distance }) => (
       <span className="cell-figure">{distance === null ? '–' : distance.toFixed(distance < 10 ? 1 : 0)}</span>
     ),
@@ -73,7 +76,7 @@ export const columns: readonly Column[] = [
     id: 'spin',
     title: 'Spin state',
     ranking: 'spin',
-    width: '8rem',
+    least: 8,
     cell: (row) => estimated(row, ({ spin }) => <SpinBar spin={spin} compact />),
   },
   {
@@ -81,7 +84,7 @@ export const columns: readonly Column[] = [
     title: 'First band',
     under: (unit) => unitText[unit],
     ranking: 'band',
-    width: '6.75rem',
+    least: 6.5,
     cell: (row) => estimated(row, (summary) => <BandCell band={firstBandOf(summary)} />),
   },
   {
@@ -89,13 +92,13 @@ export const columns: readonly Column[] = [
     title: '10Dq',
     under: (unit) => unitText[intervalUnit(unit)],
     ranking: 'tenDq',
-    width: '6.75rem',
+    least: 6.5,
     cell: (row) => estimated(row, ({ tenDq }) => <IntervalCell value={tenDq} />),
   },
   {
     id: 'remarks',
     title: 'Remarks',
-    width: '4.25rem',
+    least: 4,
     cell: (row) => estimated(row, ({ flags }) => <FlagMark flags={flags} />),
   },
 ];
@@ -103,3 +106,18 @@ export const columns: readonly Column[] = [
 /** Columns on screen: the distance only where the project has a target. */
 export const shownColumns = (hidden: readonly string[], hasTarget: boolean): readonly Column[] =>
   columns.filter(({ id, fixed }) => fixed || (!hidden.includes(id) && (id !== 'distance' || hasTarget)));
+
+/** Box and star before the columns, rem. */
+const mark = 1.9;
+
+/** Tracks of head and rows, and the width below which the table scrolls: the same for both, so that they line up. */
+export function tracksOf(shown: readonly Column[]): { readonly tracks: string; readonly least: string } {
+  const columnTracks = shown.map(({ least, share }) =>
+    share === undefined ? `${least}rem` : `minmax(${least}rem, ${share}fr)`,
+  );
+  const least = shown.reduce((sum, column) => sum + column.least, 2 * mark);
+  return {
+    tracks: `${mark}rem ${mark}rem ${columnTracks.join(' ')}`,
+    least: `calc(${least}rem + ${shown.length + 1} * var(--gap-2) + 2 * var(--gap-2))`,
+  };
+}

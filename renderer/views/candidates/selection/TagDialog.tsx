@@ -1,4 +1,4 @@
-import { useId, useState, type FormEvent } from 'react';
+import { useId, useMemo, useState, type FormEvent } from 'react';
 import { Field, focusFirst } from '../../../app/form';
 import { Dialog } from '../../../parts';
 import type { TableRow } from '../tableRow';
@@ -6,19 +6,17 @@ import type { TableRow } from '../tableRow';
 interface TagDialogProps {
   /** Rows to be tagged; null while the dialog is closed. */
   readonly rows: readonly TableRow[] | null;
-  /** Tags in use in the project. */
-  readonly known: readonly string[];
+  /** All rows of the project, whose tags are offered. */
+  readonly all: readonly TableRow[];
   readonly onTag: (tag: string) => void;
   readonly onUntag: (tag: string) => void;
   readonly onClose: () => void;
 }
 
-export function TagDialog({ rows, known, onTag, onUntag, onClose }: TagDialogProps) {
+export function TagDialog({ rows, all, onTag, onUntag, onClose }: TagDialogProps) {
   return (
     <Dialog open={rows !== null} title="Tags" onClose={onClose}>
-      {rows !== null && (
-        <TagForm rows={rows} known={known} onTag={onTag} onUntag={onUntag} onClose={onClose} />
-      )}
+      {rows !== null && <TagForm rows={rows} all={all} onTag={onTag} onUntag={onUntag} onClose={onClose} />}
     </Dialog>
   );
 }
@@ -32,7 +30,8 @@ function TagForm({
 }: TagDialogProps & { readonly rows: readonly TableRow[] }) {
   const list = useId();
   const [tag, setTag] = useState('');
-  const present = [...new Set(rows.flatMap(({ candidate }) => candidate.tags))].sort();
+  const known = useMemo(() => tagsOf(all), [all]);
+  const present = tagsOf(rows);
   const submit = (event: FormEvent): void => {
     event.preventDefault();
     const wanted = tag.trim().replace(/^#/, '').slice(0, 50);
@@ -78,3 +77,6 @@ function TagForm({
     </form>
   );
 }
+
+const tagsOf = (rows: readonly TableRow[]): readonly string[] =>
+  [...new Set(rows.flatMap(({ candidate }) => candidate.tags))].sort();
