@@ -23,7 +23,7 @@ export function TagDialog({ rows, all, onTag, onUntag, onClose }: TagDialogProps
 
 function TagForm({
   rows,
-  known,
+  all,
   onTag,
   onUntag,
   onClose,
