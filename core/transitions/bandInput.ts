@@ -49,6 +49,11 @@ export interface BandPrediction {
   /** Ascending energy. */
   readonly bands: readonly Band[];
   readonly flags: readonly Flag[];
+  /**
+   * False where bands that could colour the complex are missing altogether: then no colour can be told. True without any
+   * bands means colourless.
+   */
+  readonly complete: boolean;
   /** What is left out, one sentence each. */
   readonly leftOut: readonly string[];
 }

@@ -33,8 +33,10 @@ export function predictBands(given: BandInput): BandPrediction {
   const hasDd = input.dElectrons > 0 && input.dElectrons < 10;
   const dd = hasDd ? ddBands({ input, ground, symmetry, doubts: commonDoubts(input), edge_cm1 }) : [];
   const bands = [...dd, ...transfer].sort((a, b) => a.energy_cm1 - b.energy_cm1);
+  const toldAll = toMetal.withoutNumber.length === 0 && toLigand.withoutNumber.length === 0;
   return {
     bands,
+    complete: bands.length > 0 || (!hasDd && toldAll),
     flags: chargeTransferRemarks(input, bands, toMetal.withoutNumber, toLigand.withoutNumber),
     leftOut: leftOut(
       input,

@@ -134,6 +134,15 @@ describe('metal to ligand', () => {
     expect(iron.molarAbsorptivityRange[1]).toBeGreaterThan(8_600);
   });
 
+  // 525 nm, from memory: the metal of the ammine is easier to oxidise, but its bipyridine harder to reduce.
+  it('moves little when ammonia stands in for bipyridine: [Ru(NH3)4(bpy)]2+ within 1 000 cm-1', () => {
+    const ammine = first(
+      { metal: 'Ru', oxidationState: 2, ligands: { nh3: 4, bipy: 1 }, tenDq: 28_000, B: 500, C: 2_000 },
+      'MLCT',
+    )!;
+    expect(Math.abs(ammine.energy_cm1 - 1e7 / 525)).toBeLessThan(1_000);
+  });
+
   it('adds up ligand parameters by donor', () => {
     expect(metalPotential_V('Ru2+', [{ id: 'bipy', places: 6 }])).toBeCloseTo(1.55, 2);
     expect(metalPotential_V('Ru2+', [{ id: 'unheard-of', places: 6 }])).toBeNull();
@@ -185,6 +194,20 @@ describe('mistakes with charge transfer', () => {
       expect(bands.filter(isDd)).toEqual([]);
       expect(flags.map(({ code }) => code)).toContain('no-dd-bands');
     }
+  });
+
+  it('a full shell without charge transfer is colourless, one with it is not told', () => {
+    const zinc = predicted({ metal: 'Zn', oxidationState: 2, ligands: { h2o: 6 } });
+    expect([zinc.bands.length, zinc.complete]).toEqual([0, true]);
+    const copper = predicted({
+      metal: 'Cu',
+      oxidationState: 1,
+      ligands: { phen: 2 },
+      geometry: 'tetrahedral',
+    });
+    expect([copper.bands.length, copper.complete]).toEqual([0, false]);
+    // Not a single level: nothing can be said of a d3 ion.
+    expect(predicted({ metal: 'V', oxidationState: 2, ligands: { h2o: 6 } }).complete).toBe(false);
   });
 
   it('a band of 8 000 L/mol/cm is not d-d, and one of 5 is not charge transfer', () => {

@@ -44,11 +44,20 @@ export const metalCouples: Readonly<Record<string, MetalCouple>> = {
 };
 
 /**
- * First reduction of the bound diimine, V against the normal hydrogen electrode, as in its complexes [ML3]2+ or [ML2]2+
- * of ruthenium and iron (-1.33, -1.35 and -1.27 V against the calomel electrode; from memory).
+ * First reduction of a bound acceptor, V against the normal hydrogen electrode, where all donors are of its kind: [ML3]2+
+ * or [ML2]2+ of ruthenium and iron (-1.33, -1.35 and -1.27 V against the calomel electrode); that of pyridine back from
+ * the 407 nm band of [Ru(NH3)5(py)]2+. From memory.
  */
 export const ligandReduction_V: Readonly<Record<string, number>> = {
   bipy: -1.09,
   phen: -1.11,
   terpy: -1.05,
+  py: -1.85,
 };
+
+/**
+ * A metal made electron-rich by its other ligands gives back to the acceptor, which is then harder to reduce: by this
+ * much per volt that its couple lies below that with six donors of the acceptor's kind. From the 525 nm band of
+ * [Ru(NH3)4(bpy)]2+ beside the 452 nm of [Ru(bpy)3]2+ (from memory).
+ */
+export const backDonation = 0.65;

@@ -4,7 +4,7 @@ import type { BandInput } from '../bandInput';
 import type { GroundState } from '../groundState';
 import type { Band } from '../types';
 import { ctBand } from './ctBand';
-import { ligandElectrochemical, ligandReduction_V, metalCouples } from './leverParameters';
+import { backDonation, ligandElectrochemical, ligandReduction_V, metalCouples } from './leverParameters';
 
 /** What the difference of redox potentials leaves out (reorganisation, solvation, pairing of the two charges), cm⁻¹. */
 const redoxSigma_cm1 = 1800;
@@ -59,11 +59,13 @@ export function metalToLigandBands(input: BandInput, ground: GroundState): Metal
   const bands: Band[] = [];
   const withoutNumber: string[] = [];
   for (const { ligand, count } of takers) {
-    const reduction = ligandReduction_V[ligand.id];
-    if (potential === null || reduction === undefined) {
+    const alike = ligandReduction_V[ligand.id];
+    const six = metalPotential_V(ion.ion, [{ id: ligand.id, places: 6 }]);
+    if (potential === null || alike === undefined || six === null) {
       withoutNumber.push(ligand.commonName);
       continue;
     }
+    const reduction = alike - backDonation * Math.max(0, six - potential);
     bands.push(
       ctBand({
         kind: 'MLCT',

@@ -1,6 +1,12 @@
 import { classMean } from '../../estimation/donorClass';
 import type { IonRecord, LigandRecord, ParameterLibrary, SourcedValue } from '../../library';
 import type { GeometryId } from '../../record/composition';
+import {
+  ligandsFromBands,
+  planarFromBands,
+  tetrahedralFromBands,
+  type FromBand,
+} from './electronegativityFromBands';
 
 /** An optical electronegativity and whether it belongs to the ion or ligand itself. */
 export interface Electronegativity {
@@ -15,28 +21,16 @@ export interface MetalElectronegativity extends Electronegativity {
   readonly needsSpinPairing: boolean;
 }
 
-/** What is added for an ion or ligand without a value in the library, each from one measured band. */
-const fromOneBand: Readonly<Record<string, { readonly value: number; readonly from: string }>> = {
-  oxo: { value: 3.2, from: 'the value that the figures of the d0 oxo anions in the library rest on' },
-  ono_o: { value: 2.57, from: 'the 30 300 cm-1 band of [Co(NH3)5(ONO)]2+ (from memory)' },
-  no2_n: { value: 2.57, from: 'its linkage isomer in [Co(NH3)5(ONO)]2+, 30 300 cm-1 (from memory)' },
-  cn: {
-    value: 2.9,
-    from: 'the 23 800 cm-1 band of [Fe(CN)6]3- (J. J. Alexander and H. B. Gray 1968, from memory)',
-  },
-};
-
-const planarFromOneBand: Readonly<Record<string, { readonly value: number; readonly from: string }>> = {
-  'Au3+': { value: 1.93, from: 'the 31 900 cm-1 band of [AuCl4]- (from memory)' },
-};
-const tetrahedralFromOneBand: Readonly<Record<string, { readonly value: number; readonly from: string }>> = {
-  'V4+': { value: 2.17, from: 'the 24 800 cm-1 band of VCl4 (from memory)' },
-};
-
 const own = (found: SourcedValue, name: string): Electronegativity | null =>
   found.value === null
     ? null
     : { value: found.value, analogy: false, reason: `chi(${name}) = ${found.value} (${found.source})` };
+
+const fromBand = (name: string, { value, from }: FromBand): Electronegativity => ({
+  value,
+  analogy: false,
+  reason: `chi(${name}) = ${value}, ${from}`,
+});
 
 /** Optical electronegativity of a ligand: its own, else of its donor class; null where nothing is known. */
 export function ligandElectronegativity(
@@ -44,12 +38,11 @@ export function ligandElectronegativity(
   library: ParameterLibrary,
 ): Electronegativity | null {
   const known = own(ligand.chiOpt, ligand.abbreviation);
-  if (known !== null) return known;
-  const band = fromOneBand[ligand.id];
-  if (band !== undefined) {
-    const reason = `chi(${ligand.abbreviation}) = ${band.value}, ${band.from}`;
-    return { value: band.value, analogy: false, reason };
+  const band = ligandsFromBands[ligand.id];
+  if (band !== undefined && (known === null || ligand.chiOpt.confidence === 'low')) {
+    return fromBand(ligand.abbreviation, band);
   }
+  if (known !== null) return known;
   // π acceptors are oxidised at no known energy, and water says nothing of an oxide ion.
   if (ligand.piCharacter === 'acceptor') return null;
   const mean = classMean(ligand, library, (other) => other.chiOpt.value, 1);
@@ -72,14 +65,9 @@ const coordinationOf = (geometry: GeometryId): Coordination =>
  */
 export function metalElectronegativity(ion: IonRecord, geometry: GeometryId): MetalElectronegativity | null {
   const coordination = coordinationOf(geometry);
-  const single = { planar: planarFromOneBand, tet: tetrahedralFromOneBand, oct: {} }[
-    coordination
-  ] as Readonly<Record<string, { readonly value: number; readonly from: string }>>;
-  const band = single[ion.ion];
-  if (band !== undefined) {
-    const reason = `chi(${ion.ion}) = ${band.value}, ${band.from}`;
-    return { value: band.value, analogy: false, needsSpinPairing: false, reason };
-  }
+  const table = { planar: planarFromBands, tet: tetrahedralFromBands, oct: undefined }[coordination];
+  const band = table?.[ion.ion];
+  if (band !== undefined) return { ...fromBand(ion.ion, band), needsSpinPairing: false };
   const first = coordination === 'tet' ? 'tet' : 'oct';
   const second = first === 'tet' ? 'oct' : 'tet';
   const name = `${ion.ion}, ${first === 'tet' ? 'tetrahedral' : 'octahedral'}`;
