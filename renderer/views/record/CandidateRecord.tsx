@@ -1,0 +1,128 @@
+import { useCallback, useMemo, useState } from 'react';
+import { complexFormula } from '../../../core/library/complexFormula';
+import type { Measurement } from '../../../core/record/measurement';
+import type { Candidate } from '../../../core/record/project';
+import { currentContent } from '../../../core/record/revisions';
+import { minuteOf, useAction, useSettings, useStored, useStore } from '../../app/services';
+import { inputOf } from '../../app/session/candidateInput';
+import { useProject } from '../../app/session/ProjectSession';
+import { useLibrary } from '../../app/session/useLibrary';
+import { usePrediction } from '../../app/session/usePrediction';
+import { ErrorPanel, useToast } from '../../parts';
+import type { Store } from '../../store';
+import { AgreementFigures } from './agreement/AgreementFigures';
+import { PairTable } from './agreement/PairTable';
+import { pairsOf } from './agreement/recordPairs';
+import { keepingTheRest } from './draft/contentOf';
+import { blankMeasurement, draftOf } from './draft/measurementDraft';
+import { type Entered, MeasurementDialog } from './form/MeasurementDialog';
+import { MeasurementList } from './MeasurementList';
+
+const shared = ['measurements', 'frozenPredictions', 'samples'] as const;
+
+/** The record of one candidate: what was predicted, what was measured, and how they agree. */
+export function CandidateRecord({ candidate }: { readonly candidate: Candidate }) {
+  const { conditions } = useProject();
+  const library = useLibrary();
+  const store = useStore();
+  const act = useAction();
+  const toast = useToast();
+  const { settings } = useSettings();
+  const [open, setOpen] = useState<'new' | Measurement | null>(null);
+  const formula = complexFormula(candidate.composition, library);
+  const input = useMemo(() => inputOf(candidate, conditions), [candidate, conditions]);
+  const { counterIon } = candidate;
+  const asked = usePrediction(
+    input,
+    useMemo(() => ({ counterIon }), [counterIon]),
+  );
+  const prediction = asked.current && asked.outcome?.ok ? asked.outcome.prediction : null;
+  const waiting = !asked.current || (asked.outcome === null && asked.error === null);
+  const ask = useCallback(
+    async (from: Store) => ({
+      measurements: await from.measurements.of(candidate.id),
+      standing: await from.frozenPredictions.of(candidate.id),
+      frozen: await from.frozenPredictions.ofProject(candidate.projectId),
+    }),
+    [candidate.id, candidate.projectId],
+  );
+  const { value, error } = useStored(ask, shared);
+  const undo = (): void => void act(() => store.journal.undo(candidate.projectId));
+  const add = ({ content, batch, by }: Entered): Promise<boolean> =>
+    act(async () => {
+      const contents = [content];
+      const { froze } = await store.measurements.add({ candidate, contents, batch, by, prediction, formula });
+      toast({ message: froze ? 'Prediction frozen, then measurement saved' : 'Measurement saved', undo });
+    });
+  const correct = (measurement: Measurement, { content, by, why }: Entered): Promise<boolean> =>
+    act(async () => {
+      const whole = keepingTheRest(currentContent(measurement), content);
+      const signed = settings.initials || by;
+      await store.measurements.correct(measurement, { by: signed, why, content: whole });
+      toast({ message: 'Saved as a new revision', undo });
+    });
+  const remove = (measurement: Measurement): void =>
+    void act(async () => {
+      await store.measurements.remove(measurement);
+      toast({ message: 'Measurement deleted', undo });
+    });
+  if (error !== null)
+    return (
+      <ErrorPanel
+        title="The record cannot be read"
+        problems={[{ code: 'integrity', field: '', message: error }]}
+      />
+    );
+  if (!value) return <p className="soft">Opening…</p>;
+  const pairs = value.measurements.flatMap((each) =>
+    pairsOf(each, value.frozen.get(each.frozenPredictionId ?? '') ?? null),
+  );
+  const [latest] = value.standing;
+  const notice = latest
+    ? null
+    : prediction
+      ? 'No prediction is frozen yet. Saving freezes the one that stands now first, so that the comparison is honest.'
+      : 'This candidate could not be estimated: the measurement is kept without a prediction.';
+  const today = new Date().toISOString().slice(0, 10);
+  const draft =
+    open === null
+      ? null
+      : open === 'new'
+        ? blankMeasurement(settings.initials, today)
+        : draftOf(currentContent(open), null);
+  return (
+    <div className="stack">
+      <section className="panel stack" aria-labelledby="record-measured">
+        <div className="record-head">
+          <h2 id="record-measured">Measurements</h2>
+          <button type="button" className="button-main" disabled={waiting} onClick={() => setOpen('new')}>
+            Add measurement…
+          </button>
+        </div>
+        <p className="soft">
+          {latest
+            ? `${value.standing.length} frozen prediction${value.standing.length === 1 ? '' : 's'}, the latest of ${minuteOf(latest.frozenAt)}: ${latest.reason}.`
+            : 'No frozen prediction yet; the first measurement freezes one before it is saved.'}
+        </p>
+        {value.measurements.length === 0 && <p>Nothing measured yet.</p>}
+        <MeasurementList measurements={value.measurements} onCorrect={setOpen} onDelete={remove} />
+      </section>
+      {pairs.length > 0 && (
+        <section className="panel stack" aria-labelledby="record-pairs">
+          <h2 id="record-pairs">Measured beside predicted</h2>
+          <PairTable pairs={pairs} />
+          <AgreementFigures pairs={pairs} />
+        </section>
+      )}
+      {open !== null && draft !== null && (
+        <MeasurementDialog
+          start={draft}
+          correcting={open !== 'new'}
+          notice={open === 'new' ? notice : null}
+          onSave={(entered) => (open === 'new' ? add(entered) : correct(open, entered))}
+          onClose={() => setOpen(null)}
+        />
+      )}
+    </div>
+  );
+}

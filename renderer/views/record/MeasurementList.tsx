@@ -1,0 +1,66 @@
+import type { Measurement } from '../../../core/record/measurement';
+import { missingFields } from '../../../core/record/missing';
+import { currentContent } from '../../../core/record/revisions';
+import { dayOf, minuteOf } from '../../app/services';
+import { contentText } from './contentText';
+
+interface MeasurementListProps {
+  readonly measurements: readonly Measurement[];
+  readonly onCorrect: (measurement: Measurement) => void;
+  readonly onDelete: (measurement: Measurement) => void;
+}
+
+/** What was measured, newest first, with what nobody wrote down and every former state. */
+export function MeasurementList({ measurements, onCorrect, onDelete }: MeasurementListProps) {
+  return (
+    <ul className="record-list">
+      {measurements.map((measurement) => {
+        const content = currentContent(measurement);
+        const { date, operator, solvent, temperature_K } = content.conditions;
+        const missing = missingFields(content, measurement.sampleId);
+        const around = [
+          solvent,
+          temperature_K && `${temperature_K.value} K`,
+          date && dayOf(date),
+          operator,
+        ].filter(Boolean);
+        return (
+          <li key={measurement.id}>
+            <div>
+              <strong>{contentText(content)}</strong>
+              {around.length > 0 && <p>{around.join(', ')}</p>}
+              {content.kind !== 'note' && content.remark !== '' && <p>{content.remark}</p>}
+              {missing.length > 0 && (
+                <p className="soft small">Not written down: {missing.map(({ label }) => label).join(', ')}</p>
+              )}
+              {measurement.revisions.length > 1 && (
+                <details>
+                  <summary>Corrected {measurement.revisions.length - 1} times</summary>
+                  <ol>
+                    {measurement.revisions.map((each) => (
+                      <li key={each.number}>
+                        {minuteOf(each.at)}
+                        {each.by !== '' && `, ${each.by}`}: {contentText(each.content)}
+                        {each.why !== '' && <span className="soft"> ({each.why})</span>}
+                      </li>
+                    ))}
+                  </ol>
+                </details>
+              )}
+            </div>
+            <div className="record-actions">
+              {['band list', 'moment', 'observed colour', 'note'].includes(content.kind) && (
+                <button type="button" onClick={() => onCorrect(measurement)}>
+                  Correct…
+                </button>
+              )}
+              <button type="button" className="button-quiet" onClick={() => onDelete(measurement)}>
+                Delete
+              </button>
+            </div>
+          </li>
+        );
+      })}
+    </ul>
+  );
+}

@@ -1,0 +1,28 @@
+import type { MeasurementContent } from '../../../core/record/measurement';
+import { formatFigures } from '../../parts';
+
+/** A measurement in one line. */
+export function contentText(content: MeasurementContent): string {
+  switch (content.kind) {
+    case 'band list': {
+      const nm = content.reportedIn === 'nm';
+      const places = content.bands.map(({ energy_cm1: { value }, molarAbsorptivity, feature }) => {
+        const place = formatFigures(nm ? 1e7 / value : value, nm ? 4 : 5);
+        const strength =
+          molarAbsorptivity === null ? '' : ` (ε ${formatFigures(molarAbsorptivity.value, 3)})`;
+        return `${place}${feature === 'shoulder' ? ' sh' : ''}${strength}`;
+      });
+      return `Bands: ${places.join(', ')} ${nm ? 'nm' : 'cm⁻¹'}`;
+    }
+    case 'moment': {
+      const { value, u } = content.moment_BM;
+      return `Moment ${value}${u === null ? '' : ` ± ${u}`} μB`;
+    }
+    case 'observed colour':
+      return `Colour seen: ${content.words}`;
+    case 'note':
+      return `Note: ${content.remark}`;
+    default:
+      return content.kind;
+  }
+}
