@@ -81,6 +81,9 @@ describe('the database', () => {
     const attempt = store.candidates.update(candidate!, 'write notes', { notes: 'long' });
     await expect(attempt).rejects.toMatchObject({ code: 'storage-full' });
     expect((await store.candidates.get(candidate!.id))?.notes).toBe('');
+    expect(store.journal.health.trouble?.code).toBe('storage-full');
+    await store.projects.update(project.id, 'rename', { name: 'Still works' });
+    expect(store.journal.health.trouble).toBeNull();
   });
 
   it('does not overwrite what another window saved meanwhile', async () => {

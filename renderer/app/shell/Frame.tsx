@@ -5,6 +5,7 @@ import type { ViewDefinition } from '../view';
 import { FindDialog } from './FindDialog';
 import { Rail } from './Rail';
 import { ShortcutList } from './ShortcutList';
+import { Troubles } from './Troubles';
 import { TopBar } from './TopBar';
 import { useFrameCommands } from './useFrameCommands';
 import { useHostLink } from './useHostLink';
@@ -29,7 +30,10 @@ export function Frame({ views }: { readonly views: readonly ViewDefinition[] }) 
       </a>
       <TopBar history={history} onFind={find} onShortcuts={shortcuts} />
       <Rail views={views} />
-      <ViewPort views={views} />
+      <div className="frame-main">
+        <Troubles />
+        <ViewPort views={views} />
+      </div>
       <FindDialog open={overlay === 'find'} onClose={close} />
       <ShortcutList open={overlay === 'shortcuts'} onClose={close} />
     </div>

@@ -4,6 +4,7 @@ import type { ChangeFeed } from '../feed';
 import { type Change, contentTables, type Edit, recordTables } from '../rows';
 import { asStoreError } from '../storeError';
 import { logLines } from './log';
+import { SaveHealth } from './saveHealth';
 import { type Clock, Writer } from './writer';
 
 /** How many steps per project can be undone. */
@@ -16,6 +17,7 @@ const { minKey, maxKey } = Dexie;
  * there or neither.
  */
 export class Journal {
+  readonly health = new SaveHealth();
   #author = '';
   readonly #db: SpinhueDatabase;
   readonly #feed: ChangeFeed;
@@ -104,14 +106,18 @@ export class Journal {
     const db = this.#db;
     const tables = [...recordTables, ...contentTables, 'log', 'changes', 'edits'];
     try {
-      return await db.transaction('rw', tables, async () => {
+      const result = await db.transaction('rw', tables, async () => {
         const writer = new Writer(db, this.#clock);
         const result = await work(writer);
         await db.log.bulkAdd(logLines(writer.edits, writer.now, this.#author, this.#clock.newId));
         return result;
       });
+      this.health.saved();
+      return result;
     } catch (error) {
-      throw asStoreError(error);
+      const known = asStoreError(error);
+      this.health.failed(known);
+      throw known;
     }
   }
 

@@ -1,5 +1,7 @@
 import type { ParameterLibrary } from '../../../../core/library/parameterLibrary';
+import { Formula } from '../../../parts';
 import type { Draft } from '../draft';
+import { ligandLabel } from './ligandLabel';
 
 interface LigandCountsProps {
   readonly ligands: Draft['ligands'];
@@ -17,7 +19,7 @@ export function LigandCounts({ ligands, free, library, onCount }: LigandCountsPr
     <ul className="ligand-counts">
       {entries.map(([id, count]) => {
         const ligand = library.ligands.get(id);
-        const name = ligand?.abbreviation ?? id;
+        const name = ligand ? ligandLabel(ligand) : id;
         const size = ligand?.denticity ?? 1;
         const more = Math.floor(free / size);
         return (
@@ -30,7 +32,9 @@ export function LigandCounts({ ligands, free, library, onCount }: LigandCountsPr
               +
             </button>
             <span className="ligand-name">
-              <strong>{name}</strong>{' '}
+              <strong>
+                <Formula formula={name} />
+              </strong>{' '}
               <span className="soft">{ligand?.commonName ?? 'not in the library'}</span>
             </span>
             {more > 0 && (

@@ -1,8 +1,9 @@
 import { useMemo } from 'react';
 import type { LigandRecord } from '../../../../core/library/ligands';
 import type { ParameterLibrary } from '../../../../core/library/parameterLibrary';
-import { SearchableSelect } from '../../../parts';
+import { Formula, SearchableSelect } from '../../../parts';
 import { type Draft, placesTaken } from '../draft';
+import { ligandLabel } from './ligandLabel';
 import { LigandCounts } from './LigandCounts';
 import { PlaceMeter } from './PlaceMeter';
 import './LigandPicker.css';
@@ -19,9 +20,9 @@ const atHand = ['h2o', 'nh3', 'en', 'cl', 'f', 'cn', 'py', 'bipy', 'phen', 'ox',
 
 const optionOf = (ligand: LigandRecord) => ({
   id: ligand.id,
-  label: ligand.abbreviation,
+  label: ligandLabel(ligand),
   detail: `${ligand.commonName}, ${ligand.donorAtoms.join('')}${ligand.denticity > 1 ? `, ${ligand.denticity} places` : ''}`,
-  keywords: `${ligand.iupacName} ${ligand.formula} ${ligand.class}`,
+  keywords: `${ligand.abbreviation} ${ligand.iupacName} ${ligand.formula} ${ligand.class}`,
 });
 
 /** Which ligands, and how many of each. */
@@ -55,7 +56,7 @@ export function LigandPicker({ ligands, places, library, onCount }: LigandPicker
                   aria-label={`Add ${ligand.commonName}`}
                   onClick={() => add(id)}
                 >
-                  {ligand.abbreviation}
+                  <Formula formula={ligandLabel(ligand)} />
                 </button>
               )
             );

@@ -1,5 +1,7 @@
 import type { ParameterLibrary } from '../../../../core/library/parameterLibrary';
+import { Formula } from '../../../parts';
 import type { Draft } from '../draft';
+import { ligandLabel } from './ligandLabel';
 
 interface PlaceMeterProps {
   readonly ligands: Draft['ligands'];
@@ -12,7 +14,7 @@ export function PlaceMeter({ ligands, places, library }: PlaceMeterProps) {
   const pieces = Object.entries(ligands).flatMap(([id, count]) => {
     const ligand = library.ligands.get(id);
     return Array.from({ length: count }, () => ({
-      name: ligand?.abbreviation ?? id,
+      name: ligand ? ligandLabel(ligand) : id,
       size: ligand?.denticity ?? 1,
     }));
   });
@@ -29,7 +31,7 @@ export function PlaceMeter({ ligands, places, library }: PlaceMeterProps) {
       <div className="place-meter-places" aria-hidden="true">
         {pieces.map(({ name, size }, index) => (
           <span key={index} className="place-taken" style={{ flexGrow: size }}>
-            {name}
+            <Formula formula={name} />
           </span>
         ))}
         {Array.from({ length: free }, (_, index) => (
