@@ -41,6 +41,7 @@ export async function startProgram(
     },
     call: async <N extends CallName>(name: N, payload: unknown = null) =>
       (await fake.call(callChannel(name), [payload])) as Answer<N>,
-    remove: () => rm(folder, { recursive: true, force: true }),
+    // The program may still be writing its settings: the removal is tried again.
+    remove: () => rm(folder, { recursive: true, force: true, maxRetries: 5, retryDelay: 50 }),
   };
 }

@@ -1,4 +1,4 @@
-import { afterEach, describe, expect, it, vi } from 'vitest';
+import { afterEach, describe, expect, it, type Mock, vi } from 'vitest';
 import { type Command, CommandRegistry } from './command';
 import { listenToKeys } from './keyboard';
 import { comboOf } from './keyCombo';
@@ -9,13 +9,13 @@ afterEach(() => {
   document.body.replaceChildren();
 });
 
-const command = (keys: string, more: Partial<Command> = {}): Command & { run: ReturnType<typeof vi.fn> } => ({
+const command = (keys: string, more: Partial<Command> = {}): Command & { run: Mock<() => void> } => ({
   id: keys,
   label: keys,
   group: 'Test',
   keys: [keys],
   ...more,
-  run: vi.fn(),
+  run: vi.fn<() => void>(),
 });
 
 function press(key: string, init: KeyboardEventInit = {}, target: EventTarget = document.body): void {
