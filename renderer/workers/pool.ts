@@ -15,15 +15,23 @@ export class EstimatePool {
   readonly #size: number;
   #single: EstimateClient | null = null;
   #bulk: EstimateClient[] = [];
+  #asked = false;
 
   constructor(start: () => WorkerLike, size: number) {
     this.#start = start;
     this.#size = Math.max(1, size);
   }
 
-  /** Starts the worker that answers single questions, so that the first one need not wait for it. */
-  warmUp(): void {
-    this.#singleClient();
+  /**
+   * Starts the worker that answers single questions and lets it work through samples, one at a time: the first question
+   * about each kind of ion takes longest. A real question ends it.
+   */
+  async warmUp(samples: readonly CandidateInput[]): Promise<void> {
+    const client = this.#singleClient();
+    for (const sample of samples) {
+      if (this.#asked) return;
+      await client.one(sample, null).catch(() => undefined);
+    }
   }
 
   one(
@@ -32,6 +40,7 @@ export class EstimatePool {
     options: OneOptions = {},
     signal?: AbortSignal,
   ): Promise<PredictionOutcome> {
+    this.#asked = true;
     // Draws take their time: they must not keep the next question waiting.
     const client = (options.draws ?? 0) > 0 ? this.#bulkClient(0) : this.#singleClient();
     return client.one(input, overlay, options, signal);

@@ -6,6 +6,7 @@ import { bulkWorkers, startEstimateWorker } from '../../workers/startWorker';
 import { App } from '../App';
 import { followTheme } from '../services';
 import type { ViewDefinition } from '../view';
+import { warmUpSamples } from './warmUpSamples';
 import { loadDemoOnce } from './demo';
 import { StartFailure } from './StartFailure';
 
@@ -27,7 +28,7 @@ async function start(root: Root, host: Host, views: readonly ViewDefinition[]): 
     const pool = new EstimatePool(startEstimateWorker, bulkWorkers());
     root.render(<App services={{ store, host, pool }} settings={settings} views={views} />);
     requestIdleCallback(() => {
-      pool.warmUp();
+      void pool.warmUp(warmUpSamples);
       for (const { preload } of views) void preload?.().catch(() => undefined);
     });
   } catch (error) {
