@@ -148,14 +148,23 @@ export function speciesOf(group: FieldGroup, largestJ: number): Species[] {
   return Number.isInteger(largestJ) ? integerSpecies(group, largestJ) : halfIntegerSpecies(group, largestJ);
 }
 
-/** All states of any J, complex: what is left when a magnetic field breaks time reversal. */
-export const everyState: Species = {
-  name: 'A',
-  degeneracy: 1,
-  algebra: 'complex',
-  partner: 'none',
-  states: (J) => range(-J, J).map(plainState),
-};
+/**
+ * Rows about z when a magnetic field along z breaks time reversal: M ≡ r (mod `order`), for order 0 each M by itself. There
+ * are no partners left.
+ */
+export function magneticSpecies(order: number, algebra: 'real' | 'complex', largestJ: number): Species[] {
+  const plain = (name: string, states: (J: number) => AdaptedVector[]): Species => ({
+    ...{ name, degeneracy: 1, algebra, partner: 'none', states },
+  });
+  if (order === 0) {
+    return range(-largestJ, largestJ).map((M) =>
+      plain(`M=${M}`, (J) => (Math.abs(M) <= J ? [plainState(M)] : [])),
+    );
+  }
+  return range(largestJ % 1, order - 0.5).map((remainder) =>
+    plain(`M=${remainder}`, (J) => rowOf(J, order, remainder).map(plainState)),
+  );
+}
 
 const even = (k: 2 | 4, q: number): FieldComponent => ({ k, q, part: 're' });
 const odd = (k: 2 | 4, q: number): FieldComponent => ({ k, q, part: 'im' });

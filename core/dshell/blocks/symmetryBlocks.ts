@@ -1,20 +1,12 @@
-import { everyState, fieldComponents, speciesOf, type FieldGroup, type Species } from '../adaptation/species';
-import { componentElement, unitElement, type Complex } from '../adaptation/unitElements';
+import { fieldComponents, speciesOf, type FieldGroup, type Species } from '../adaptation/species';
+import { componentElement, type Complex } from '../adaptation/unitElements';
 import { timeReversed, type AdaptedVector } from '../adaptation/vector';
 import { type FieldComponent } from '../field/tensorComponents';
 import { freeIon } from '../freeIon/reducedElements';
-import {
-  coupledMultiplets,
-  momentElement,
-  spinFreeMultiplets,
-  type Multiplet,
-  type MultipletElements,
-} from './multiplets';
+import { coupledMultiplets, spinFreeMultiplets, type Multiplet, type MultipletElements } from './multiplets';
 
 /** A parameter of the Hamiltonian, by the name of its operator. */
-export type OperatorName = 'B' | 'C' | 'alpha' | 'zeta' | `${'re' | 'im'}${2 | 4}${number}` | MomentName;
-/** Cartesian components of orbital and spin angular momentum. */
-export type MomentName = `${'L' | 'S'}${'x' | 'y' | 'z'}`;
+export type OperatorName = 'B' | 'C' | 'alpha' | 'zeta' | 'Lz' | 'Sz' | `${'re' | 'im'}${2 | 4}${number}`;
 export const operatorName = ({ k, q, part }: FieldComponent): OperatorName => `${part}${k}${q}`;
 
 /**
@@ -78,7 +70,8 @@ function blocksOf(elements: MultipletElements, group: FieldGroup, S: number | nu
   });
 }
 
-function blockOf(
+/** The block of one row: every operator between the states of that row. */
+export function blockOf(
   elements: MultipletElements,
   species: Species,
   components: readonly FieldComponent[],
@@ -102,43 +95,10 @@ function blockOf(
   };
 }
 
-const magneticBlocks = new Map<number, SymmetryBlock>();
-
-/** All C(10, N) states |(LS)J M⟩ with every field component and the angular momenta: for a field in a magnetic field. */
-export function completeBlock(electrons: number): SymmetryBlock {
-  let block = magneticBlocks.get(electrons);
-  if (block === undefined) {
-    const bare = blockOf(coupledMultiplets(freeIon(electrons)), everyState, fieldComponents.C1, null);
-    const moments = momentNames.map((name) => [name, momentOperator(bare.basis, name)] as const);
-    block = { ...bare, operators: new Map([...bare.operators, ...moments]) };
-    magneticBlocks.set(electrons, block);
-  }
-  return block;
-}
-
-const momentNames = ['Lx', 'Ly', 'Lz', 'Sx', 'Sy', 'Sz'] as const;
-
-function momentOperator(basis: readonly BasisState[], name: MomentName): BlockOperator {
-  const [which, axis] = [name[0] as 'L' | 'S', name[1] as 'x' | 'y' | 'z'];
-  return collect(basis, 2, (a, b) => {
-    const ket = b.multiplet;
-    if (a.multiplet.term !== ket.term || Math.abs(a.multiplet.J - ket.J) > 1) return null;
-    const reduced = momentElement(which, a.multiplet, ket);
-    if (reduced === 0) return null;
-    const component = (q: number): Complex => unitElement(a.multiplet.J, a.vector, 1, q, ket.J, b.vector);
-    if (axis === 'z') return [reduced * component(0).re, reduced * component(0).im];
-    const [up, down] = [component(1), component(-1)];
-    const scale = reduced * Math.SQRT1_2;
-    // A_x = (A_−1 − A_+1)/√2, A_y = i (A_−1 + A_+1)/√2.
-    return axis === 'x'
-      ? [scale * (down.re - up.re), scale * (down.im - up.im)]
-      : [-scale * (down.im + up.im), scale * (down.re + up.re)];
-  });
-}
-
 const negligible = 1e-13;
 
-function collect(
+/** An operator from its elements ⟨a|O|b⟩ (as many numbers as the algebra has), null for zero. */
+export function collect(
   basis: readonly BasisState[],
   width: 1 | 2 | 4,
   element: (a: BasisState, b: BasisState) => readonly number[] | null,

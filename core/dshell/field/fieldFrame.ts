@@ -79,17 +79,21 @@ const allowed = Object.fromEntries(
 /** Largest component that a field of the group cannot have. */
 function foreignScale({ re, im }: FieldTensors, group: FieldGroup): number {
   const table = allowed[group];
+  return Math.max(
+    largestWhere(re[2], table.re[2]),
+    largestWhere(re[4], table.re[4]),
+    largestWhere(im[2], table.im[2]),
+    largestWhere(im[4], table.im[4]),
+  );
+}
+
+/** Largest modulus among the values that may not be. */
+function largestWhere(values: readonly number[], may: readonly boolean[]): number {
   let largest = 0;
-  const look = (values: readonly number[], may: readonly boolean[]): void => {
-    for (let q = 0; q < values.length; q++) {
-      const size = Math.abs(values[q]!);
-      if (size > largest && !may[q]!) largest = size;
-    }
-  };
-  look(re[2], table.re[2]);
-  look(re[4], table.re[4]);
-  look(im[2], table.im[2]);
-  look(im[4], table.im[4]);
+  for (let q = 0; q < values.length; q++) {
+    const size = Math.abs(values[q]!);
+    if (size > largest && !may[q]!) largest = size;
+  }
   return largest;
 }
 

@@ -43,27 +43,48 @@ function componentWeights(k: number, q: number): { re: Float64Array; im: Float64
   return { re, im };
 }
 
-const weights = {
-  2: [0, 1, 2].map((q) => componentWeights(2, q)),
-  4: [0, 1, 2, 3, 4].map((q) => componentWeights(4, q)),
-} as const;
+/** The same over the lower triangle of V, which is symmetric: 15 weights per component, one after the other. */
+const lowerTriangle = [0, 1, 2, 3, 4].flatMap((a) =>
+  [0, 1, 2, 3, 4].slice(0, a + 1).map((b) => [a, b] as const),
+);
+const folded = (full: Float64Array): number[] =>
+  lowerTriangle.map(([a, b]) => (a === b ? full[6 * a]! : full[5 * a + b]! + full[5 * b + a]!));
+const components = [
+  ...[0, 1, 2].map((q) => componentWeights(2, q)),
+  ...[0, 1, 2, 3, 4].map((q) => componentWeights(4, q)),
+];
+const weights = Float64Array.from(
+  [...components.map(({ re }) => re), ...components.map(({ im }) => im)].flatMap(folded),
+);
+const triangle = new Float64Array(15);
+const sums = new Float64Array(16);
 
-function weighed(V: FieldMatrix, weight: Float64Array): number {
-  let sum = 0;
-  for (let a = 0; a < 5; a++) {
-    const row = V[a]!;
-    for (let b = 0; b < 5; b++) sum += weight[5 * a + b]! * row[b]!;
+/** All component sums at once: re of 2:0…2, 4:0…4, then im in the same order. */
+function weighAll(): void {
+  for (let c = 0, at = 0; c < 16; c++) {
+    let sum = 0;
+    for (let e = 0; e < 15; e++) sum += weights[at++]! * triangle[e]!;
+    sums[c] = sum;
   }
-  return sum;
 }
 
 /** Splits a field into its tensor components. Ranks 0, 2 and 4 are all that a real field over d orbitals has. */
 export function fieldTensors(V: FieldMatrix): FieldTensors {
-  const part = (name: 're' | 'im') => ({
-    2: weights[2].map((weight) => weighed(V, weight[name])),
-    4: weights[4].map((weight) => weighed(V, weight[name])),
-  });
-  return { trace: fieldTrace(V), re: part('re'), im: part('im') };
+  for (let a = 0, at = 0; a < 5; a++) {
+    const row = V[a]!;
+    for (let b = 0; b <= a; b++) triangle[at++] = row[b]!;
+  }
+  weighAll();
+  const list = (from: number, count: number): number[] => {
+    const values: number[] = [];
+    for (let c = from; c < from + count; c++) values.push(sums[c]!);
+    return values;
+  };
+  return {
+    trace: fieldTrace(V),
+    re: { 2: list(0, 3), 4: list(3, 5) },
+    im: { 2: list(8, 3), 4: list(11, 5) },
+  };
 }
 
 export const fieldTrace = (V: FieldMatrix): number =>

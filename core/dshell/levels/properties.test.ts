@@ -6,7 +6,8 @@ import { fieldTensors, fieldTrace } from '../field/tensorComponents';
 import { checkProblem, hamiltonianParameters, type CheckedProblem, type LevelProblem } from '../problem';
 import { hermitianEigenvalues } from '../../numerics/eigen/hermitian';
 import { assemble } from '../blocks/assemble';
-import { completeBlock } from '../blocks/symmetryBlocks';
+import { magneticBlocks } from '../blocks/magneticBlocks';
+import { magneticProblem } from '../magneticProblem';
 import { levels } from './levels';
 import { solveBlocks } from './solveBlocks';
 
@@ -109,12 +110,45 @@ describe('for any field, repulsion and coupling', () => {
     check(
       fc.property(problem, (each) => {
         const checked = checkProblem({ ...each, zeta: each.zeta || 500 });
-        const block = completeBlock(checked.electrons);
+        const [block] = magneticBlocks(checked.electrons, 1, 'complex');
         const parameters = hamiltonianParameters(checked, fieldTensors(checked.V));
-        const complete = hermitianEigenvalues(assemble(block, parameters), block.size);
+        const complete = hermitianEigenvalues(assemble(block!, parameters), block!.size);
         expect(largestDifference(spectrum(checked), Array.from(complete))).toBeLessThan(1e-6);
       }),
       12,
+    );
+  });
+
+  it('a magnetic field along an axis of the ligands, in its rows, gives what the complete complex matrix gives', () => {
+    const turn = fc.tuple(energy(1), energy(1), fc.double({ min: 0.1, max: 1, noNaN: true }));
+    const fields = fc.constantFrom<LevelProblem['field']>(
+      { type: 'oct', tenDq: 12_000 },
+      { type: 'trigonal', tenDq: 12_000, Dsigma: 300, Dtau: -80 },
+      { type: 'tetragonal', tenDq: 12_000, Ds: 300, Dt: -80 },
+      { type: 'sqp', e_sigma: 7000, e_pi_perp: 900, e_pi_par: 400 },
+    );
+    fc.assert(
+      fc.property(
+        fc.constantFrom(2, 3, 8),
+        fields,
+        fc.constantFrom(...['x', 'y', 'z', 'skew']),
+        turn,
+        (n, spec, axis, skew) => {
+          const B_T = { x: [7, 0, 0], y: [0, -7, 0], z: [0, 0, 7], skew: skew.map((part) => 5 * part) }[
+            axis
+          ]!;
+          const checked = checkProblem({
+            ...{ dElectrons: n, B: 600, C: 2500, zeta: 400, field: spec },
+            zeeman: { B_T: B_T as [number, number, number], k: 0.9 },
+          });
+          const { tensors, parameters } = magneticProblem(checked, checked.zeeman!);
+          const [block] = magneticBlocks(n, 1, 'complex');
+          const all = new Map([...hamiltonianParameters(checked, tensors), ...parameters]);
+          const complete = hermitianEigenvalues(assemble(block!, all), block!.size);
+          expect(largestDifference(spectrum(checked), Array.from(complete))).toBeLessThan(1e-7);
+        },
+      ),
+      { numRuns: 30, seed: 8 },
     );
   });
 

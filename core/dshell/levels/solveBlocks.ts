@@ -1,19 +1,12 @@
 import { hermitianEigenvalues } from '../../numerics/eigen/hermitian';
 import { quaternionEigenvalues } from '../../numerics/eigen/quaternion';
 import { symmetricEigenvalues } from '../../numerics/eigen/symmetric';
-import { bohrMagneton_cm1_T } from '../../units';
 import { type FieldGroup } from '../adaptation/species';
 import { assemble, type Parameters } from '../blocks/assemble';
-import {
-  algebraWidth,
-  completeBlock,
-  symmetryBlocks,
-  type OperatorName,
-  type SymmetryBlock,
-} from '../blocks/symmetryBlocks';
+import { algebraWidth, symmetryBlocks, type SymmetryBlock } from '../blocks/symmetryBlocks';
 import { fieldFrame, inStandardFrame, type FieldFrame } from '../field/fieldFrame';
-import { fieldTensors } from '../field/tensorComponents';
-import { hamiltonianParameters, type CheckedProblem, type ZeemanTerm } from '../problem';
+import { magneticProblem } from '../magneticProblem';
+import { hamiltonianParameters, type CheckedProblem } from '../problem';
 
 /** Eigenvalues of one block, ascending, without the trace of the field. */
 export interface BlockLevels {
@@ -27,8 +20,8 @@ export interface BlockLevels {
  */
 export function solveBlocks(problem: CheckedProblem, group?: FieldGroup): BlockLevels[] {
   if (problem.zeeman !== null) {
-    const block = completeBlock(problem.electrons);
-    return [{ block, values: blockValues(block, magneticParameters(problem, problem.zeeman)) }];
+    const { blocks, parameters } = magneticProblem(problem, problem.zeeman);
+    return blocks.map((block) => ({ block, values: blockValues(block, parameters) }));
   }
   const frame: FieldFrame =
     group === undefined ? fieldFrame(problem.V) : { ...inStandardFrame(problem.V), group };
@@ -53,17 +46,4 @@ function blockValues(block: SymmetryBlock, parameters: Parameters): Float64Array
     case 'quaternion':
       return quaternionEigenvalues(matrix, block.size);
   }
-}
-
-/** Parameters with the Zeeman term, laboratory frame. */
-export function magneticParameters(
-  problem: CheckedProblem,
-  { B_T, k, ge }: Required<ZeemanTerm>,
-): Map<OperatorName, number> {
-  const parameters = hamiltonianParameters(problem, fieldTensors(problem.V));
-  (['x', 'y', 'z'] as const).forEach((axis, i) => {
-    parameters.set(`L${axis}`, bohrMagneton_cm1_T * B_T[i]! * k);
-    parameters.set(`S${axis}`, bohrMagneton_cm1_T * B_T[i]! * ge);
-  });
-  return parameters;
 }

@@ -5,8 +5,8 @@ import { apply } from '../freeIon/sparseOperator';
 
 /** A real vector over determinants of definite m_l and m_s, by its non-zero entries. */
 export interface SparseVector {
-  readonly places: readonly number[];
-  readonly values: readonly number[];
+  readonly places: Int32Array;
+  readonly values: Float64Array;
 }
 
 /** |term L M_L S M_S⟩ over determinants of definite m_l and m_s, real, with the phases of Condon and Shortley. */
@@ -27,29 +27,32 @@ export function termStates(electrons: number): TermStates {
   return states;
 }
 
+/** One number for a term and two integer or half-integer quantum numbers of modulus below 16. */
+const keyOf = (term: number, a: number, b: number): number => (term * 64 + 2 * a + 32) * 64 + 2 * b + 32;
+
 function workOut(electrons: number): TermStates {
   const { space, terms } = freeIon(electrons);
   const lowerL = ladderL(space, -1);
   const lowerS = ladderS(space, -1);
   const size = space.states.length;
-  const table = new Map<string, SparseVector>();
+  const table = new Map<number, SparseVector>();
   terms.forEach(({ S, L, highest }, term) => {
     let top = highest;
     for (let mS = S; mS >= -S; mS--) {
       let vector = top;
       for (let mL = L; mL >= -L; mL--) {
-        table.set(`${term},${mL},${mS}`, sparse(vector));
+        table.set(keyOf(term, mL, mS), sparse(vector));
         if (mL > -L) vector = scaled(apply(lowerL, vector), 1 / Math.sqrt(L * (L + 1) - mL * (mL - 1)));
       }
       if (mS > -S) top = scaled(apply(lowerS, top), 1 / Math.sqrt(S * (S + 1) - mS * (mS - 1)));
     }
   });
-  const state = (term: number, mL: number, mS: number): SparseVector => table.get(`${term},${mL},${mS}`)!;
-  const coupledTable = new Map<string, SparseVector>();
+  const state = (term: number, mL: number, mS: number): SparseVector => table.get(keyOf(term, mL, mS))!;
+  const coupledTable = new Map<number, SparseVector>();
   return {
     state,
     coupled(term, J, M) {
-      const key = `${term},${J},${M}`;
+      const key = keyOf(term, J, M);
       let found = coupledTable.get(key);
       if (found === undefined) {
         const { S, L } = terms[term]!;
@@ -81,5 +84,5 @@ function sparse(vector: Float64Array): SparseVector {
     places.push(place);
     values.push(value);
   });
-  return { places, values };
+  return { places: Int32Array.from(places), values: Float64Array.from(values) };
 }

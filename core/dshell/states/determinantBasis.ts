@@ -41,20 +41,27 @@ export const strings: readonly (readonly number[])[] = [0, 1, 2, 3, 4, 5].map((n
   return list;
 });
 
-/** ⟨real string|m string⟩: minors of ⟨real orbital|m⟩, row-major over `strings[n]`. */
-export const stringTransforms: readonly { readonly re: Float64Array; readonly im: Float64Array }[] =
-  strings.map((list) => {
-    const re = new Float64Array(list.length ** 2);
-    const im = new Float64Array(list.length ** 2);
-    list.forEach((realMask, i) =>
-      list.forEach((mMask, j) => {
-        const value = minor(bitsOf(realMask), bitsOf(mMask));
-        re[i * list.length + j] = value[0];
-        im[i * list.length + j] = value[1];
-      }),
-    );
-    return { re, im };
-  });
+/** A complex matrix over strings by its non-zero entries. */
+export interface StringTransform {
+  readonly rows: Int32Array;
+  readonly columns: Int32Array;
+  readonly re: Float64Array;
+  readonly im: Float64Array;
+}
+
+/** ⟨real string|m string⟩ for n electrons of one spin: minors of ⟨real orbital|m⟩. */
+export const stringTransforms: readonly StringTransform[] = strings.map((list) => {
+  const entries = list.flatMap((realMask, row) =>
+    list.map((mMask, column) => ({ row, column, value: minor(bitsOf(realMask), bitsOf(mMask)) })),
+  );
+  const kept = entries.filter(({ value }) => Math.hypot(...value) > 1e-15);
+  return {
+    rows: Int32Array.from(kept, ({ row }) => row),
+    columns: Int32Array.from(kept, ({ column }) => column),
+    re: Float64Array.from(kept, ({ value }) => value[0]),
+    im: Float64Array.from(kept, ({ value }) => value[1]),
+  };
+});
 
 function bitsOf(mask: number): number[] {
   return [0, 1, 2, 3, 4].filter((bit) => ((mask >> bit) & 1) === 1);

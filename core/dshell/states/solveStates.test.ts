@@ -68,6 +68,23 @@ describe('every state solves the Hamiltonian written out over determinants of re
       'd3 in a magnetic field',
       { dElectrons: 3, ...racah, zeta: 300, field: lowField, zeeman: { B_T: [1, 2, 3], k: 0.8 } },
     ],
+    [
+      'd3 in a magnetic field across the fourfold axis',
+      {
+        ...{ dElectrons: 3, ...racah, zeta: 300, zeeman: { B_T: [0, 5, 0] } },
+        field: { type: 'tetragonal', tenDq: 17_000, Ds: 200, Dt: 90 },
+      },
+    ],
+    [
+      'd2 in a magnetic field along a twofold axis of a trigonal field',
+      {
+        dElectrons: 2,
+        ...racah,
+        zeta: 300,
+        field: twisted,
+        zeeman: { B_T: [Math.cos(0.9), Math.sin(0.9), 0] },
+      },
+    ],
     ['the free d3 ion', { dElectrons: 3, ...racah, zeta: 300, field: { type: 'oct', tenDq: 0 } }],
   ])('%s', (_, problem) => {
     const states = solveStates(problem);

@@ -1,11 +1,11 @@
-import { identityRotation, type Quaternion } from '../../symmetry';
+import { type Quaternion } from '../../symmetry';
 import { vectorGroup } from '../adaptation/species';
 import { type Parameters } from '../blocks/assemble';
-import { completeBlock, symmetryBlocks, type SymmetryBlock } from '../blocks/symmetryBlocks';
+import { symmetryBlocks, type SymmetryBlock } from '../blocks/symmetryBlocks';
 import { fieldFrame } from '../field/fieldFrame';
 import { fieldTrace } from '../field/tensorComponents';
 import { freeIon } from '../freeIon/reducedElements';
-import { magneticParameters } from '../levels/solveBlocks';
+import { magneticProblem } from '../magneticProblem';
 import { checkProblem, hamiltonianParameters, type CheckedProblem, type LevelProblem } from '../problem';
 import { type Amplitudes } from './amplitudes';
 import { blockLevels } from './blockLevels';
@@ -81,8 +81,8 @@ function symmetricStates(problem: CheckedProblem): RawState[] {
 }
 
 function magneticStates(problem: CheckedProblem): RawState[] {
-  const parameters = magneticParameters(problem, problem.zeeman!);
-  return blockStates(completeBlock(problem.electrons), parameters, identityRotation);
+  const { blocks, parameters, rotation } = magneticProblem(problem, problem.zeeman!);
+  return blocks.flatMap((block) => blockStates(block, parameters, rotation));
 }
 
 /** Every state of a block, one for each M_S where the spin is left aside. */

@@ -8,33 +8,52 @@ export interface DeterminantWriter {
   write(state: Amplitudes, mS: number | null, re: Float64Array, im: Float64Array, at: number): void;
 }
 
+const writers = new Map<number, DeterminantWriter>();
+
+/** The writer of N electrons; made on first use and kept. */
 export function determinantWriter(electrons: number): DeterminantWriter {
+  let writer = writers.get(electrons);
+  if (writer === undefined) {
+    writer = makeWriter(electrons);
+    writers.set(electrons, writer);
+  }
+  return writer;
+}
+
+function makeWriter(electrons: number): DeterminantWriter {
   const { states, indexOf } = sharedSpace(electrons);
   const known = termStates(electrons);
-  const size = states.length;
   const spinBlocks = blocksBySpin(electrons, indexOf);
-  const re = new Float64Array(size);
-  const im = new Float64Array(size);
-  const add = ({ places, values }: SparseVector, cr: number, ci: number): void => {
-    for (let e = 0; e < places.length; e++) {
-      re[places[e]!]! += cr * values[e]!;
-      im[places[e]!]! += ci * values[e]!;
-    }
-  };
+  const re = new Float64Array(states.length);
+  const im = new Float64Array(states.length);
   return {
     write({ multiplets, re: ar, im: ai }, mS, outRe, outIm, at) {
       re.fill(0);
       im.fill(0);
       multiplets.forEach(({ term, J }, which) => {
+        const [partRe, partIm] = [ar[which]!, ai[which]!];
         for (let M = -J; M <= J; M++) {
-          const [cr, ci] = [ar[which]![M + J]!, ai[which]![M + J]!];
+          const [cr, ci] = [partRe[M + J]!, partIm[M + J]!];
           if (cr === 0 && ci === 0) continue;
-          add(mS === null ? known.coupled(term, J, M) : known.state(term, M, mS), cr, ci);
+          addState(mS === null ? known.coupled(term, J, M) : known.state(term, M, mS), cr, ci, re, im);
         }
       });
       for (const block of spinBlocks) transformBlock(block, re, im, outRe, outIm, at);
     },
   };
+}
+
+function addState(
+  { places, values }: SparseVector,
+  cr: number,
+  ci: number,
+  re: Float64Array,
+  im: Float64Array,
+): void {
+  for (let e = 0; e < places.length; e++) {
+    re[places[e]!]! += cr * values[e]!;
+    im[places[e]!]! += ci * values[e]!;
+  }
 }
 
 /** Determinants with the same number of spin-up electrons: a rectangle of up strings by down strings. */
@@ -55,6 +74,10 @@ function blocksBySpin(electrons: number, indexOf: ReadonlyMap<number, number>): 
   return blocks;
 }
 
+// One rectangle after the up strings are transformed; none is larger than 10 × 10.
+const halfRe = new Float64Array(100);
+const halfIm = new Float64Array(100);
+
 /** out = (U_up ⊗ U_down) in over one block. */
 function transformBlock(
   { up, down, places }: SpinBlock,
@@ -65,30 +88,36 @@ function transformBlock(
   at: number,
 ): void {
   const [ups, downs] = [strings[up]!.length, strings[down]!.length];
-  if (places.every((place) => re[place] === 0 && im[place] === 0)) return;
-  const half = { re: new Float64Array(ups * downs), im: new Float64Array(ups * downs) };
-  const [U, D] = [stringTransforms[up]!, stringTransforms[down]!];
-  for (let i = 0; i < ups; i++) {
-    for (let j = 0; j < ups; j++) {
-      const [ur, ui] = [U.re[i * ups + j]!, U.im[i * ups + j]!];
-      if (ur === 0 && ui === 0) continue;
-      for (let d = 0; d < downs; d++) {
-        const place = places[j * downs + d]!;
-        half.re[i * downs + d]! += ur * re[place]! - ui * im[place]!;
-        half.im[i * downs + d]! += ur * im[place]! + ui * re[place]!;
-      }
+  if (isEmpty(places, re, im)) return;
+  halfRe.fill(0);
+  halfIm.fill(0);
+  const U = stringTransforms[up]!;
+  for (let e = 0; e < U.rows.length; e++) {
+    const ur = U.re[e]!;
+    const ui = U.im[e]!;
+    const to = U.rows[e]! * downs;
+    const from = U.columns[e]! * downs;
+    for (let d = 0; d < downs; d++) {
+      const place = places[from + d]!;
+      halfRe[to + d]! += ur * re[place]! - ui * im[place]!;
+      halfIm[to + d]! += ur * im[place]! + ui * re[place]!;
     }
   }
-  for (let i = 0; i < downs; i++) {
-    for (let j = 0; j < downs; j++) {
-      const [dr, di] = [D.re[i * downs + j]!, D.im[i * downs + j]!];
-      if (dr === 0 && di === 0) continue;
-      for (let u = 0; u < ups; u++) {
-        const place = at + places[u * downs + i]!;
-        const [hr, hi] = [half.re[u * downs + j]!, half.im[u * downs + j]!];
-        outRe[place]! += dr * hr - di * hi;
-        outIm[place]! += dr * hi + di * hr;
-      }
+  const D = stringTransforms[down]!;
+  for (let e = 0; e < D.rows.length; e++) {
+    const dr = D.re[e]!;
+    const di = D.im[e]!;
+    const to = D.rows[e]!;
+    const from = D.columns[e]!;
+    for (let u = 0, row = 0; u < ups; u++, row += downs) {
+      const place = at + places[row + to]!;
+      outRe[place]! += dr * halfRe[row + from]! - di * halfIm[row + from]!;
+      outIm[place]! += dr * halfIm[row + from]! + di * halfRe[row + from]!;
     }
   }
+}
+
+function isEmpty(places: Int32Array, re: Float64Array, im: Float64Array): boolean {
+  for (let i = 0; i < places.length; i++) if (re[places[i]!] !== 0 || im[places[i]!] !== 0) return false;
+  return true;
 }

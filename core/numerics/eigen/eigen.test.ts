@@ -7,7 +7,8 @@ import { symmetricEigensystem, symmetricEigenvalues } from './symmetric';
 import { largestSize } from './tridiagonal';
 
 const random = seeded(11);
-const fractions = (count: number): Float64Array => Float64Array.from({ length: count }, () => random.next() - 0.5);
+const fractions = (count: number): Float64Array =>
+  Float64Array.from({ length: count }, () => random.next() - 0.5);
 
 /** Lower triangle of a random Hermitian matrix with `width` numbers per element. */
 function randomHermitian(n: number, width: 1 | 2 | 4): Float64Array {

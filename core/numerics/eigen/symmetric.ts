@@ -140,6 +140,10 @@ export function symmetricEigenvalues(
   values = new Float64Array(n),
 ): Float64Array {
   if (n === 0) return values;
+  if (n === 1 && Number.isFinite(a[0]!)) {
+    values[0] = a[0]!;
+    return values;
+  }
   load(a, n);
   reduce(n);
   tridiagonalEigenvalues(n, values);
