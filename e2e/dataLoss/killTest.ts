@@ -1,7 +1,7 @@
 import { cp, mkdtemp, readdir, readFile, rm } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join, resolve } from 'node:path';
-import type { Page } from '@playwright/test';
+import type { Locator, Page } from '@playwright/test';
 import { readBundle } from '../../core/record/bundle';
 import { seeded } from '../../core/testing/seeded';
 import { MirrorFolder } from '../../main/files/mirror/mirrorFolder';
@@ -23,9 +23,20 @@ export interface KillReport {
   readonly catchUps_ms: readonly number[];
 }
 
+/** Waits for something on screen; where it does not come, says what is there instead. */
+async function shown(page: Page, what: Locator): Promise<void> {
+  try {
+    await what.waitFor({ timeout: 60_000 });
+  } catch {
+    const text = await page.evaluate(() => document.body.innerText.replace(/\s+/g, ' ').slice(0, 400));
+    throw new Error(`${String(what)} did not come within a minute; the page shows "${text}"`);
+  }
+}
+const projectList = (page: Page): Locator => page.getByRole('heading', { level: 1, name: 'Projects' });
+
 async function openSheet(page: Page, origin: string, projectId: string, candidateId: string): Promise<void> {
   await page.goto(`${origin}/#/sheet/in/${projectId}/${candidateId}`);
-  await page.getByRole('textbox', { name: 'About this candidate' }).waitFor({ timeout: 60_000 });
+  await shown(page, page.getByRole('textbox', { name: 'About this candidate' }));
 }
 
 /** Writes numbered notes until the browser is gone. */
@@ -88,7 +99,14 @@ async function cleanStart(running: KillableBrowser, address: string, faults: str
   await page.addInitScript('globalThis.__name ??= (named) => named');
   page.on('pageerror', (error) => faults.push(`page: ${error.message}`));
   await page.goto(address);
-  await page.getByRole('heading', { level: 1, name: 'Projects' }).waitFor({ timeout: 60_000 });
+  try {
+    await shown(page, projectList(page));
+  } catch (error) {
+    faults.push((error as Error).message);
+    // What follows is compared all the same.
+    await page.reload();
+    await shown(page, projectList(page));
+  }
 }
 
 async function tornSnapshots(copies: string): Promise<string[]> {
