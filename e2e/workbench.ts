@@ -81,7 +81,7 @@ export const test = base.extend<{ workbench: Page; profileFolder: string }, { si
       );
       await use({ server, copies });
       await server.close();
-      await rm(folder, { recursive: true, force: true });
+      await rm(folder, { recursive: true, force: true, maxRetries: 5, retryDelay: 200 });
     },
     { scope: 'worker' },
   ],
