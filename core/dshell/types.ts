@@ -11,6 +11,8 @@ export interface CubicProblem {
   /** Racah parameters (A is a common shift and left out). */
   readonly B: number;
   readonly C: number;
+  /** Trees parameter α of αL(L + 1); 0 where left out. */
+  readonly alpha?: number;
 }
 
 export type CubicIrrep = 'A1' | 'A2' | 'E' | 'T1' | 'T2';

@@ -11,10 +11,12 @@ export function blockHamiltonian(
   splitting: number,
   B: number,
   C: number,
-  matrix = new Float64Array(block.size * block.size),
+  alpha = 0,
 ): Float64Array {
-  const { size, repulsionB, repulsionC, eCount } = block;
+  const { size, repulsionB, repulsionC, orbitalSquare, eCount } = block;
+  const matrix = new Float64Array(size * size);
   for (let i = 0; i < size * size; i++) matrix[i] = B * repulsionB[i]! + C * repulsionC[i]!;
+  if (alpha !== 0) for (let i = 0; i < size * size; i++) matrix[i]! += alpha * orbitalSquare[i]!;
   for (let i = 0; i < size; i++) matrix[i * size + i]! += splitting * (eCount[i]! - 0.4 * electrons);
   return matrix;
 }
@@ -35,6 +37,7 @@ export function blockStates(
   splitting: number,
   B: number,
   C: number,
+  alpha = 0,
 ): Eigensystem {
-  return symmetricEigensystem(blockHamiltonian(block, electrons, splitting, B, C), block.size);
+  return symmetricEigensystem(blockHamiltonian(block, electrons, splitting, B, C, alpha), block.size);
 }

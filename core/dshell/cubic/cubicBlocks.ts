@@ -8,7 +8,7 @@ import { type CubicIrrep } from '../types';
 
 /**
  * One (S, irrep) of d^N in O in the strong-field basis, one component, one M_S. With e the number of e electrons of each
- * basis state, H = 10Dq (e − 2N/5) + B·repulsionB + C·repulsionC. Matrices are row-major.
+ * basis state, H = 10Dq (e − 2N/5) + B·repulsionB + C·repulsionC + α·orbitalSquare. Matrices are row-major.
  */
 export interface CubicBlock {
   readonly S: number;
@@ -19,6 +19,8 @@ export interface CubicBlock {
   readonly eCount: readonly number[];
   readonly repulsionB: Float64Array;
   readonly repulsionC: Float64Array;
+  /** L(L + 1), for the Trees correction. */
+  readonly orbitalSquare: Float64Array;
 }
 
 /** 10Dq = 1 with e above t2. */
@@ -85,6 +87,11 @@ function strongField(ion: FreeIon, S: number, irrep: CubicIrrep, basis: readonly
     eCount: Array.from(values, (value) => Math.abs(Math.round(value + 0.4 * ion.electrons))),
     repulsionB: transformed(repulsion(ion.repulsionB), vectors, size),
     repulsionC: transformed(repulsion(ion.repulsionC), vectors, size),
+    orbitalSquare: transformed(
+      fill((a, b) => (a === b ? ion.terms[a.term]!.L * (ion.terms[a.term]!.L + 1) : 0)),
+      vectors,
+      size,
+    ),
   };
 }
 

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { SpinhueError } from '../../errors';
+import { levels as allLevels } from '../levels/levels';
 import { cubicLevels } from './cubicLevels';
 import { cubicBlocks } from './cubicBlocks';
 import { groundCrossovers } from './groundCrossovers';
@@ -79,6 +80,20 @@ describe('ground-level changes', () => {
 
   it('do not exist for d1, d2, d3, d8 and d9 in an octahedral field', () => {
     for (const n of [1, 2, 3, 8, 9]) expect(groundCrossovers(n, 4.5)).toEqual([]);
+  });
+});
+
+describe('the Trees correction', () => {
+  it('agrees with the general engine and shifts each free-ion term by αL(L + 1) (R. E. Trees, Phys. Rev. 83, 756, 1951)', () => {
+    const problem = { dElectrons: 4, tenDq: 12_000, B: 800, C: 3300, alpha: 70 };
+    const general = allLevels({ ...problem, field: { type: 'oct', tenDq: 12_000 } }).levels;
+    cubicLevels({ ...problem, geometry: 'octahedral' }).forEach(({ energy }, i) =>
+      expect(energy).toBeCloseTo(general[i]!.energy, 6),
+    );
+    const free = cubicLevels({ ...problem, dElectrons: 2, tenDq: 0, geometry: 'octahedral' });
+    const triplets = free.filter(({ multiplicity }) => multiplicity === 3);
+    // 3P above 3F by 15B, less α(12 − 2).
+    expect(triplets.at(-1)!.energy - triplets[0]!.energy).toBeCloseTo(15 * 800 - 700, 6);
   });
 });
 

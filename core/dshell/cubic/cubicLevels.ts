@@ -1,4 +1,4 @@
-import { requireElectronCount, requireNotNegative } from '../checkProblem';
+import { requireElectronCount, requireFinite, requireNotNegative } from '../checkProblem';
 import { type ConfigurationWeight, type CubicLevel, type CubicProblem } from '../types';
 import { blockStates } from './blockEnergies';
 import { cubicBlocks, type CubicBlock } from './cubicBlocks';
@@ -17,11 +17,12 @@ interface RawLevel {
  * (Hellmann-Feynman). Throws `out-of-range` or `not-finite`.
  */
 export function cubicLevels(problem: CubicProblem): CubicLevel[] {
-  const { dElectrons, geometry, tenDq, B, C } = problem;
+  const { dElectrons, geometry, tenDq, B, C, alpha = 0 } = problem;
   requireElectronCount(dElectrons);
   requireNotNegative(tenDq, 'tenDq');
   requireNotNegative(B, 'B');
   requireNotNegative(C, 'C');
+  requireFinite(alpha, 'alpha');
   const sign = geometry === 'tetrahedral' ? -1 : 1;
   const raw = cubicBlocks(dElectrons).flatMap((block) => rawLevels(block, problem, sign));
   raw.sort((a, b) => a.energy - b.energy || b.block.S - a.block.S);
@@ -43,9 +44,9 @@ export function cubicLevels(problem: CubicProblem): CubicLevel[] {
 }
 
 function rawLevels(block: CubicBlock, problem: CubicProblem, sign: 1 | -1): RawLevel[] {
-  const { dElectrons, tenDq, B, C } = problem;
+  const { dElectrons, tenDq, B, C, alpha } = problem;
   const { size } = block;
-  const { values, vectors } = blockStates(block, dElectrons, sign * tenDq, B, C);
+  const { values, vectors } = blockStates(block, dElectrons, sign * tenDq, B, C, alpha);
   const found: RawLevel[] = [];
   for (let k = 0; k < size; k++) {
     const weights = eWeights(block, vectors, k * size);
