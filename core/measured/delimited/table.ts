@@ -41,7 +41,7 @@ const isDamaged = (each: Mark): boolean =>
   each.kind === 'text' && each.cells.length >= 2 && each.cells[0]!.kind === 'number';
 
 /** Two numbers at the start of a line under any dialect: above the table such a line is a row that was not understood. */
-const twoNumbers = /^\s*"?[+-]?\d+(?:[.,]\d+)?"?\s*[;,\t ]\s*"?[+-]?\d/;
+const twoNumbers = /^\s*"?[+-]?\d[\d.,]*"?\s*[;,\t ]\s*"?[+-]?\d/;
 
 const someLines = (lines: readonly number[]): string =>
   `line${lines.length === 1 ? '' : 's'} ${lines.slice(0, 5).join(', ')}${lines.length > 5 ? ', …' : ''}`;

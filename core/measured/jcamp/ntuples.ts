@@ -109,6 +109,12 @@ export function readNtuples(block: Block, limit: number, warnings: ReadingWarnin
       }
       points = record;
     } else if (record.label === 'DATATABLE') {
+      if (tableRead && spectra.length > 0) {
+        warnings.push({
+          code: 'recovered',
+          message: `line ${record.line}: a second table on the page ${shorten(page)}; its own page label may be damaged`,
+        });
+      }
       tableRead = true;
       const name = shorten([block.title, page].filter((part) => part !== '').join(', ')) || 'the page';
       const scaling = {
