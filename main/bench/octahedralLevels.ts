@@ -1,51 +1,14 @@
-import { type LevelProblem } from '../../core/dshell';
-import { engineRun } from './engineLevels';
-import { noLapack, timeLapack } from './lapack';
-import { measure } from './measure';
-import { mlMatrixRun, spinComponentBlocks } from './plainMatrices';
-import { atLeast, figure, type Bench } from './report';
-
-const problem: LevelProblem = {
-  dElectrons: 5,
-  B: 800,
-  C: 3400,
-  field: { type: 'oct', tenDq: 12_500 },
-};
+import { type Bench } from './report';
+import { againstSpinBlocks } from './withoutCoupling';
 
 export const octahedralLevels: Bench = {
   name: 'octahedral-levels',
   group: 'engine',
-  run({ quick }) {
-    const blocks = spinComponentBlocks(problem);
-    const [engine, ml] = measure(
-      [
-        { what: 'this engine', run: engineRun(problem), batch: 200 },
-        { what: 'ml-matrix on the M_S blocks', run: mlMatrixRun(blocks) },
-      ],
-      quick ? 3 : 15,
-    );
-    const nonNegative = blocks.slice(0, Math.ceil(blocks.length / 2));
-    const lapack = timeLapack(
-      [
-        { what: 'LAPACK on the M_S blocks', complex: false, matrices: blocks },
-        { what: 'LAPACK on the blocks of one sign of M_S', complex: false, matrices: nonNegative },
-      ],
-      quick ? 10 : 60,
-    );
-    const over = (other: { milliseconds: number }): number => other.milliseconds / engine!.milliseconds;
-    return {
-      title: '(a) all levels of one octahedral d5 complex, no spin-orbit coupling',
-      timings: [engine!, ml!, ...(lapack ?? [])],
-      figures: [
-        figure('faster than ml-matrix', over(ml!), 'times', atLeast(50)),
-        ...(lapack === null
-          ? []
-          : [
-              figure('faster than LAPACK', over(lapack[0]!), 'times', atLeast(20)),
-              figure('faster than LAPACK on one sign of M_S', over(lapack[1]!), 'times'),
-            ]),
-      ],
-      skipped: lapack === null ? [noLapack] : [],
-    };
-  },
+  run: (options) =>
+    againstSpinBlocks(
+      '(a) all levels of one octahedral d5 complex, no spin-orbit coupling',
+      { dElectrons: 5, B: 800, C: 3400, field: { type: 'oct', tenDq: 12_500 } },
+      { overMlMatrix: 50, overLapack: 20, batch: 200 },
+      options,
+    ),
 };

@@ -10,28 +10,16 @@ import {
   type BlockOperator,
   type SymmetryBlock,
 } from './symmetryBlocks';
-
-const known = new Map<string, readonly SymmetryBlock[]>();
+import { remember } from '../remember';
 
 /**
  * All states |(LS)J M⟩ of d^N in a magnetic field along z, in rows M ≡ r (mod `order`), order 0 meaning full symmetry about z;
- * `real` where a turn by π about y with time reversal leaves everything as it is. With the operators L_z and S_z.
+ * `real` where a turn by π about y with time reversal leaves everything as it is. With the operators L_z and S_z. Worked
+ * out on first use and kept.
  */
-export function magneticBlocks(
-  electrons: number,
-  order: number,
-  algebra: 'real' | 'complex',
-): readonly SymmetryBlock[] {
-  const key = `${electrons},${order},${algebra}`;
-  let blocks = known.get(key);
-  if (blocks === undefined) {
-    blocks = workOut(electrons, order, algebra);
-    known.set(key, blocks);
-  }
-  return blocks;
-}
+export const magneticBlocks = remember(workOut);
 
-function workOut(electrons: number, order: number, algebra: 'real' | 'complex'): SymmetryBlock[] {
+function workOut(electrons: number, order: number, algebra: 'real' | 'complex'): readonly SymmetryBlock[] {
   const elements = coupledMultiplets(freeIon(electrons));
   const largestJ = Math.max(...elements.multiplets.map(({ J }) => J));
   const components = fieldComponents.C1.filter(({ q, part }) => {

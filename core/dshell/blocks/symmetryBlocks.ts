@@ -4,6 +4,7 @@ import { timeReversed, type AdaptedVector } from '../adaptation/vector';
 import { type FieldComponent } from '../field/tensorComponents';
 import { freeIon } from '../freeIon/reducedElements';
 import { coupledMultiplets, spinFreeMultiplets, type Multiplet, type MultipletElements } from './multiplets';
+import { remember } from '../remember';
 
 /** A parameter of the Hamiltonian, by the name of its operator. */
 export type OperatorName = 'B' | 'C' | 'alpha' | 'zeta' | 'Lz' | 'Sz' | `${'re' | 'im'}${2 | 4}${number}`;
@@ -38,24 +39,10 @@ export interface SymmetryBlock {
 /** Numbers per matrix element. */
 export const algebraWidth = { real: 1, complex: 2, quaternion: 4 } as const;
 
-const known = new Map<string, readonly SymmetryBlock[]>();
-
 /** The blocks of d^N for a field of the given symmetry in its own frame; worked out on first use and kept. */
-export function symmetryBlocks(
-  electrons: number,
-  group: FieldGroup,
-  spinOrbit: boolean,
-): readonly SymmetryBlock[] {
-  const key = `${electrons},${group},${spinOrbit}`;
-  let blocks = known.get(key);
-  if (blocks === undefined) {
-    blocks = workOut(electrons, group, spinOrbit);
-    known.set(key, blocks);
-  }
-  return blocks;
-}
+export const symmetryBlocks = remember(workOut);
 
-function workOut(electrons: number, group: FieldGroup, spinOrbit: boolean): SymmetryBlock[] {
+function workOut(electrons: number, group: FieldGroup, spinOrbit: boolean): readonly SymmetryBlock[] {
   const ion = freeIon(electrons);
   if (spinOrbit) return blocksOf(coupledMultiplets(ion), group, null);
   const spins = [...new Set(ion.terms.map((term) => term.S))];

@@ -5,6 +5,7 @@ import { type AdaptedVector } from '../adaptation/vector';
 import { fieldTensors } from '../field/tensorComponents';
 import { freeIon, type FreeIon } from '../freeIon/reducedElements';
 import { type CubicIrrep } from '../types';
+import { remember } from '../remember';
 
 /**
  * One (S, irrep) of d^N in O in the strong-field basis, one component, one M_S. With e the number of e electrons of each
@@ -28,17 +29,10 @@ const unitSplitting = [0.6, 0.6, -0.4, -0.4, -0.4].map((value, a) =>
   [0, 1, 2, 3, 4].map((b) => (a === b ? value : 0)),
 );
 
-const known = new Map<number, readonly CubicBlock[]>();
-
 /** All blocks of d^N; worked out on first use (free-ion terms, subduction to O, then diagonal in the cubic field) and kept. */
-export function cubicBlocks(electrons: number): readonly CubicBlock[] {
-  let blocks = known.get(electrons);
-  if (blocks === undefined) {
-    blocks = workOut(freeIon(electrons));
-    known.set(electrons, blocks);
-  }
-  return blocks;
-}
+export const cubicBlocks = remember((electrons: number): readonly CubicBlock[] =>
+  workOut(freeIon(electrons)),
+);
 
 interface BasisState {
   readonly term: number;

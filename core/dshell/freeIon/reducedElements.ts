@@ -5,6 +5,7 @@ import { magneticNumber, shellL, spinOf } from './microstates';
 import { repulsion } from './slaterCondon';
 import { apply, dot } from './sparseOperator';
 import { termsOf, type Term } from './terms';
+import { remember } from '../remember';
 
 /**
  * Everything about d^N that does not depend on the surroundings: its terms and, between them, the reduced matrix elements
@@ -25,17 +26,8 @@ export interface FreeIon {
   readonly spinOrbit: Float64Array;
 }
 
-const known = new Map<number, FreeIon>();
-
 /** The free ion of N = 1…9 d electrons; worked out on first use and kept. */
-export function freeIon(electrons: number): FreeIon {
-  let ion = known.get(electrons);
-  if (ion === undefined) {
-    ion = workOut(electrons);
-    known.set(electrons, ion);
-  }
-  return ion;
-}
+export const freeIon = remember(workOut);
 
 function workOut(electrons: number): FreeIon {
   const { space, terms } = termsOf(electrons);

@@ -2,6 +2,7 @@ import { clebschGordan } from '../angularMomentum/threeJ';
 import { freeIon } from '../freeIon/reducedElements';
 import { ladderL, ladderS } from '../freeIon/slaterCondon';
 import { apply } from '../freeIon/sparseOperator';
+import { remember } from '../remember';
 
 /** A real vector over determinants of definite m_l and m_s, by its non-zero entries. */
 export interface SparseVector {
@@ -16,16 +17,8 @@ export interface TermStates {
   coupled(term: number, J: number, M: number): SparseVector;
 }
 
-const known = new Map<number, TermStates>();
-
-export function termStates(electrons: number): TermStates {
-  let states = known.get(electrons);
-  if (states === undefined) {
-    states = workOut(electrons);
-    known.set(electrons, states);
-  }
-  return states;
-}
+/** The states of all terms of N electrons; worked out on first use and kept. */
+export const termStates = remember(workOut);
 
 /** One number for a term and two integer or half-integer quantum numbers of modulus below 16. */
 const keyOf = (term: number, a: number, b: number): number => (term * 64 + 2 * a + 32) * 64 + 2 * b + 32;

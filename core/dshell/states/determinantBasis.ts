@@ -1,5 +1,6 @@
-import { determinantSpace, type DeterminantSpace } from '../freeIon/determinantSpace';
+import { determinantSpace } from '../freeIon/determinantSpace';
 import { dOrbitalNames, realOrbitals } from '../field/orbitals';
+import { remember } from '../remember';
 
 /**
  * The basis in which states are handed out: determinants of real orbitals. Orbital a of [z2, x2-y2, xy, xz, yz] with spin up is
@@ -14,17 +15,8 @@ export interface DeterminantBasis {
   readonly determinants: readonly number[];
 }
 
-const spaces = new Map<number, DeterminantSpace>();
-
 /** The determinants of N electrons with their index, the same list for every orbital basis. */
-export function sharedSpace(electrons: number): DeterminantSpace {
-  let space = spaces.get(electrons);
-  if (space === undefined) {
-    space = determinantSpace(electrons);
-    spaces.set(electrons, space);
-  }
-  return space;
-}
+export const sharedSpace = remember(determinantSpace);
 
 export function determinantBasis(electrons: number): DeterminantBasis {
   return { electrons, orbitals: dOrbitalNames, determinants: sharedSpace(electrons).states };

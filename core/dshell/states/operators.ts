@@ -1,5 +1,6 @@
 import { signBefore, spinOrbitalCount } from '../freeIon/microstates';
 import { realOrbitals } from '../field/orbitals';
+import { remember } from '../remember';
 import { sharedSpace } from './determinantBasis';
 import { type SolvedStates } from './solveStates';
 
@@ -49,33 +50,26 @@ function momentum(j: number, m: number, n: number, axis: 0 | 1 | 2): Complex {
 const orbital = (p: number): number => p % 5;
 const spin = (p: number): number => (p < 5 ? 0.5 : -0.5);
 
-const known = new Map<number, AngularOperators>();
-
 /** L, S and Σ l·s of N electrons over `determinantBasis(N)`; worked out on first use and kept. */
-export function angularOperators(electrons: number): AngularOperators {
-  let operators = known.get(electrons);
-  if (operators === undefined) {
-    const l = (axis: 0 | 1 | 2): OneElectron => {
-      return (p, q) => (spin(p) === spin(q) ? orbitalMomentum(axis, orbital(p), orbital(q)) : [0, 0]);
-    };
-    const s = (axis: 0 | 1 | 2): OneElectron => {
-      return (p, q) => (orbital(p) === orbital(q) ? momentum(0.5, spin(p), spin(q), axis) : [0, 0]);
-    };
-    const ls: OneElectron = (p, q) =>
-      ([0, 1, 2] as const)
-        .map((axis) =>
-          times(orbitalMomentum(axis, orbital(p), orbital(q)), momentum(0.5, spin(p), spin(q), axis)),
-        )
-        .reduce(plus);
-    operators = {
-      L: [oneElectron(electrons, l(0)), oneElectron(electrons, l(1)), oneElectron(electrons, l(2))],
-      S: [oneElectron(electrons, s(0)), oneElectron(electrons, s(1)), oneElectron(electrons, s(2))],
-      spinOrbit: oneElectron(electrons, ls),
-    };
-    known.set(electrons, operators);
-  }
-  return operators;
-}
+export const angularOperators = remember((electrons: number): AngularOperators => {
+  const l = (axis: 0 | 1 | 2): OneElectron => {
+    return (p, q) => (spin(p) === spin(q) ? orbitalMomentum(axis, orbital(p), orbital(q)) : [0, 0]);
+  };
+  const s = (axis: 0 | 1 | 2): OneElectron => {
+    return (p, q) => (orbital(p) === orbital(q) ? momentum(0.5, spin(p), spin(q), axis) : [0, 0]);
+  };
+  const ls: OneElectron = (p, q) =>
+    ([0, 1, 2] as const)
+      .map((axis) =>
+        times(orbitalMomentum(axis, orbital(p), orbital(q)), momentum(0.5, spin(p), spin(q), axis)),
+      )
+      .reduce(plus);
+  return {
+    L: [oneElectron(electrons, l(0)), oneElectron(electrons, l(1)), oneElectron(electrons, l(2))],
+    S: [oneElectron(electrons, s(0)), oneElectron(electrons, s(1)), oneElectron(electrons, s(2))],
+    spinOrbit: oneElectron(electrons, ls),
+  };
+});
 
 /** Σ t(p, q) a⁺_p a_q over the determinants; spin orbital p = orbital + 5 for spin down. */
 export function oneElectron(electrons: number, t: OneElectron): DeterminantOperator {

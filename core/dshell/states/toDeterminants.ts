@@ -1,6 +1,7 @@
 import { sharedSpace, strings, stringTransforms } from './determinantBasis';
 import { termStates, type SparseVector } from './coupledStates';
 import { type Amplitudes } from './amplitudes';
+import { remember } from '../remember';
 
 /** Writes states over determinants of real orbitals into row-major arrays. */
 export interface DeterminantWriter {
@@ -8,17 +9,8 @@ export interface DeterminantWriter {
   write(state: Amplitudes, mS: number | null, re: Float64Array, im: Float64Array, at: number): void;
 }
 
-const writers = new Map<number, DeterminantWriter>();
-
 /** The writer of N electrons; made on first use and kept. */
-export function determinantWriter(electrons: number): DeterminantWriter {
-  let writer = writers.get(electrons);
-  if (writer === undefined) {
-    writer = makeWriter(electrons);
-    writers.set(electrons, writer);
-  }
-  return writer;
-}
+export const determinantWriter = remember(makeWriter);
 
 function makeWriter(electrons: number): DeterminantWriter {
   const { states, indexOf } = sharedSpace(electrons);
