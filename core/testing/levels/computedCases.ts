@@ -12,6 +12,10 @@ export interface ComputedCase extends LevelProblem {
   readonly id: string;
   readonly subkind: string;
   readonly labelGroup: string | null;
+  readonly groupingTol_cm1: number;
+  /** False where the tolerance does not settle which levels are one. */
+  readonly groupingUnambiguous: boolean;
+  readonly groundAbsolute_cm1: number;
   readonly levels: readonly {
     readonly energy_cm1: number;
     readonly degeneracy: number;
