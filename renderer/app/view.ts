@@ -14,7 +14,7 @@ export interface ViewDefinition {
   readonly place: 'workbench' | 'project';
   /** Position in the navigation; null for a view that is reached from others only. */
   readonly order: number | null;
-  /** View whose navigation entry is marked while this one is on screen. */
+  /** View whose navigation entry is marked while this one shows a record, or has no entry of its own. */
   readonly under?: string;
   /** Command of the menu that leads here. */
   readonly command?: CommandId;

@@ -1,6 +1,7 @@
 import { createRoot, type Root } from 'react-dom/client';
 import { getHost, type Host } from '../../host';
 import { asStoreError, askForLastingStorage, openStore, type Store } from '../../store';
+import { madeWithName } from '../../workers/madeWith';
 import { EstimatePool } from '../../workers/pool';
 import { bulkWorkers, startEstimateWorker } from '../../workers/startWorker';
 import { App } from '../App';
@@ -47,6 +48,8 @@ async function start(root: Root, host: Host, views: readonly ViewDefinition[]): 
 async function tidy(store: Store): Promise<void> {
   try {
     await store.bin.purgeExpired(store.clock.now());
+    const sets = await store.db.parameterSets.toArray();
+    await store.estimates.keepOnly([null, ...sets].map(madeWithName));
   } catch {
     // Tried again at the next start.
   }

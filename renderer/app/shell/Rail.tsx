@@ -1,3 +1,4 @@
+import type { Address } from '../router/address';
 import { useRouter, linkTo } from '../router/RouterContext';
 import { useProjectState } from '../session/ProjectSession';
 import type { ViewDefinition } from '../view';
@@ -29,6 +30,11 @@ export function Rail({ views }: RailProps) {
   );
 }
 
+function markedView(views: readonly ViewDefinition[], { view, item }: Address): string {
+  const shown = views.find(({ id }) => id === view);
+  return shown?.under !== undefined && (item !== null || shown.order === null) ? shown.under : view;
+}
+
 interface RailGroupProps extends RailProps {
   /** With those that have no entry of their own. */
   readonly all: readonly ViewDefinition[];
@@ -38,7 +44,7 @@ interface RailGroupProps extends RailProps {
 
 function RailGroup({ title, views, all, projectId }: RailGroupProps) {
   const { address } = useRouter();
-  const marked = all.find(({ id }) => id === address.view)?.under ?? address.view;
+  const marked = markedView(all, address);
   return (
     <div className="rail-group">
       <h2 className="rail-title">{title}</h2>

@@ -64,6 +64,7 @@ export default function CandidatesView() {
     </a>
   );
   const empty = rows.state === 'ready' && all.length === 0;
+  const nothing = shown.length === 0 && all.length > 0 && rows.state === 'ready';
   return (
     <>
       <ViewHeader
@@ -96,16 +97,7 @@ export default function CandidatesView() {
             hasTarget={project.targetLab !== null}
           />
           <EstimateProgress estimates={session.estimates} />
-          <CandidateGrid
-            shown={shown}
-            columns={columns}
-            sort={sort}
-            onSort={setSort}
-            selection={selection}
-            onStar={star}
-            onCurrent={setCurrent}
-          />
-          {shown.length === 0 && all.length > 0 && rows.state === 'ready' && (
+          {nothing ? (
             <EmptyState
               title="Nothing passes this filter"
               actions={
@@ -117,6 +109,16 @@ export default function CandidatesView() {
               {counted(all.length, 'candidate')} in the project; the line above says how the filter was
               understood.
             </EmptyState>
+          ) : (
+            <CandidateGrid
+              shown={shown}
+              columns={columns}
+              sort={sort}
+              onSort={setSort}
+              selection={selection}
+              onStar={star}
+              onCurrent={setCurrent}
+            />
           )}
           <SelectionBar
             rows={selection.ids.size > 0 ? subjects : []}

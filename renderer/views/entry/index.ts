@@ -8,6 +8,7 @@ export const entryView = defineView({
   title: 'New candidate',
   place: 'project',
   order: 1,
+  under: 'candidates',
   command: 'new-candidate',
   keys: 'g n',
   hint: 'Choose metal, oxidation state, geometry and ligands, with the estimate alongside',

@@ -4,6 +4,7 @@ import { linkTo } from '../../app/router/RouterContext';
 import { dayOf, useAction, useStore } from '../../app/services';
 import { useToast } from '../../parts';
 import { counted } from '../../store';
+import { ProjectPalette } from './ProjectPalette';
 import { ProjectName } from './ProjectName';
 import './ProjectList.css';
 
@@ -32,6 +33,7 @@ function ProjectRow({ project }: { readonly project: ListedProject }) {
         <p className="soft small">
           {counted(project.candidateCount, 'candidate')}, changed {dayOf(project.updatedAt)}
         </p>
+        <ProjectPalette project={project} />
       </div>
       <div className="project-row-actions">
         <a className="button button-main" href={linkTo({ view: 'candidates', project: project.id })}>
