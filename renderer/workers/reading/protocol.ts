@@ -18,5 +18,4 @@ export interface FileReading {
 }
 
 export type ReadingAnswer =
-  | { readonly ok: true; readonly value: FileReading }
-  | { readonly ok: false; readonly message: string };
+  { readonly ok: true; readonly value: FileReading } | { readonly ok: false; readonly message: string };
