@@ -23,7 +23,7 @@ import './EntryForm.css';
 export function EntryForm({ candidate }: { readonly candidate: Candidate | null }) {
   const { project, rows, conditions } = useProject();
   const library = useLibrary();
-  const { draft, set, drop } = useDraft(project.id, candidate);
+  const { draft, basedOn, set, drop } = useDraft(project.id, candidate);
   const composition = useMemo(() => compositionOf(draft), [draft]);
   const places = findGeometry(draft.geometry)?.coordinationNumber ?? 6;
   const filled = placesTaken(draft.ligands, library) === places;
@@ -65,7 +65,13 @@ export function EntryForm({ candidate }: { readonly candidate: Candidate | null 
     [composition, rows, candidate],
   );
   const acceptable = asked.current && asked.outcome?.ok === true;
-  const save = useSave({ candidate, draft, composition: acceptable ? composition : null, onSaved: drop });
+  const save = useSave({
+    candidate,
+    draft,
+    basedOn,
+    composition: acceptable ? composition : null,
+    onSaved: drop,
+  });
   useCommands(
     useMemo(
       () => [

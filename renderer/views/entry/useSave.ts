@@ -10,6 +10,8 @@ import { type Draft, emptyDraft, fieldsOf } from './draft';
 interface Saving {
   readonly candidate: Candidate | null;
   readonly draft: Draft;
+  /** Revision of the candidate that the draft was made from. */
+  readonly basedOn: number | null;
   /** Null while the choices make no complex. */
   readonly composition: Composition | null;
   /** Told once the candidate is stored, with what the form shall hold next. Until then the draft stays. */
@@ -17,7 +19,7 @@ interface Saving {
 }
 
 /** Stores a new candidate or the change of an old one. If storing fails, nothing on screen is lost. */
-export function useSave({ candidate, draft, composition, onSaved }: Saving) {
+export function useSave({ candidate, draft, basedOn, composition, onSaved }: Saving) {
   const { project } = useProject();
   const store = useStore();
   const act = useAction();
@@ -27,11 +29,11 @@ export function useSave({ candidate, draft, composition, onSaved }: Saving) {
   const save = useCallback(async (): Promise<Candidate> => {
     const fields = { ...fieldsOf(draft), composition: composition! };
     if (candidate !== null) {
-      return store.candidates.update(candidate, 'change a candidate', fields, candidate.revision);
+      return store.candidates.update(candidate, 'change a candidate', fields, basedOn ?? undefined);
     }
     const [row] = await store.candidates.create(project.id, [fields]);
     return row!;
-  }, [store, project.id, candidate, draft, composition]);
+  }, [store, project.id, candidate, draft, basedOn, composition]);
 
   return useMemo(() => {
     const run = (then: (saved: Candidate) => void): void => {

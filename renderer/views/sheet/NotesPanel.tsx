@@ -1,47 +1,24 @@
-import { useEffect, useState } from 'react';
+import { useEffect } from 'react';
 import type { Candidate } from '../../../core/record/project';
 import { Field } from '../../app/form';
-import { inWords, useServices, useStore } from '../../app/services';
-import { drafts } from '../../store';
+import { useServices } from '../../app/services';
+import { useNotesDraft } from './useNotesDraft';
 
 /** Free words about the candidate, saved when one leaves the field; what cannot be saved stays on screen. */
 export function NotesPanel({ candidate }: { readonly candidate: Candidate }) {
-  const store = useStore();
   const { host } = useServices();
-  const name = `notes:${candidate.id}`;
-  const [text, setText] = useState(() => {
-    const kept = drafts.read(name);
-    return typeof kept === 'string' ? kept : candidate.notes;
-  });
-  const [base, setBase] = useState(candidate.notes);
-  const [problem, setProblem] = useState<string | null>(null);
-  if (base !== candidate.notes) {
-    // Changed from outside, by undo for instance: follows unless something unsaved is on screen.
-    setBase(candidate.notes);
-    if (text === base) setText(candidate.notes);
-  }
-  const unsaved = text !== candidate.notes;
+  const notes = useNotesDraft(candidate);
+  const { unsaved } = notes;
   useEffect(() => {
     host.setUnsaved(unsaved ? 'the notes you are writing' : null);
     return () => host.setUnsaved(null);
   }, [host, unsaved]);
-
-  const save = (): void => {
-    if (!unsaved) return;
-    store.candidates.update(candidate, 'write notes', { notes: text }, candidate.revision).then(
-      () => {
-        setProblem(null);
-        drafts.drop(name);
-      },
-      (error: unknown) => setProblem(inWords(error)),
-    );
-  };
   return (
     <section className="panel" aria-labelledby="sheet-notes">
       <h2 id="sheet-notes">Notes</h2>
       <Field
         label="About this candidate"
-        error={problem}
+        error={notes.problem}
         hint={unsaved ? 'Saved when you leave the field.' : 'Saved.'}
       >
         {(attributes) => (
@@ -49,15 +26,27 @@ export function NotesPanel({ candidate }: { readonly candidate: Candidate }) {
             {...attributes}
             rows={5}
             maxLength={100_000}
-            value={text}
-            onChange={(event) => {
-              setText(event.currentTarget.value);
-              drafts.keep(name, event.currentTarget.value);
-            }}
-            onBlur={save}
+            value={notes.text}
+            onChange={(event) => notes.write(event.currentTarget.value)}
+            onBlur={notes.save}
           />
         )}
       </Field>
+      {notes.theirs !== null && (
+        <div role="alert" className="notes-conflict">
+          <p>
+            Other notes were stored meanwhile, in another window or by undo. Yours above are not saved yet;
+            nothing was overwritten. Stored are:
+          </p>
+          <blockquote>{notes.theirs === '' ? 'no notes' : notes.theirs}</blockquote>
+          <button type="button" onClick={notes.keepMine}>
+            Store mine instead
+          </button>
+          <button type="button" onClick={notes.takeTheirs}>
+            Go on from those
+          </button>
+        </div>
+      )}
     </section>
   );
 }
