@@ -83,6 +83,7 @@ function changeOnce(root: Json, random: Seeded): void {
           value: { polluted: true },
           enumerable: true,
           configurable: true,
+          writable: true,
         });
       } else put(hostile[random.below(hostile.length)]!(random));
       return;
@@ -100,7 +101,7 @@ function changeOnce(root: Json, random: Seeded): void {
     case 4:
       if (typeof value === 'number') put(value * (random.next() < 0.5 ? -1 : 1e6));
       else if (typeof value === 'string') put(value.slice(0, random.below(value.length + 1)));
-      else put(String(value));
+      else put(value === null ? 'null' : typeof value);
       return;
     default:
       put(hostile[random.below(hostile.length)]!(random));

@@ -14,6 +14,6 @@ const report = await soakBundles(Number(values.count), Number(values.seed), stor
 report.faults.slice(0, 50).forEach((fault) => process.stdout.write(`${fault}\n`));
 process.stdout.write(
   `${report.bundles} mutated bundles and ${report.wishes} mutated wishes: ${report.accepted} accepted, ` +
-    `${report.refused} refused, ${report.faults.length} faults, slowest ${Math.round(report.slowest_ms)} ms\n`,
+    `${report.refused} refused, ${report.faults.length} faults, slowest ${Math.round(report.slowest.ms)} ms (seed ${report.slowest.seed})\n`,
 );
 process.exitCode = report.faults.length === 0 ? 0 : 1;
