@@ -16,6 +16,9 @@ export interface Viewing {
   readonly observer?: ObserverId;
 }
 
+/** Average daylight and the observer for small fields: what a colour means where nothing else is said. */
+export const defaultViewing: Required<Viewing> = { illuminant: 'D65', observer: '2deg' };
+
 /** Illuminant times colour-matching functions, scaled so that the perfect transmitter has Y = 100. */
 export interface ViewingWeights {
   readonly illuminant: IlluminantId;
@@ -52,7 +55,8 @@ function requireKnown(field: string, found: string, known: readonly string[]): v
 const kept = new Map<string, ViewingWeights>();
 
 /** Weight table of an illuminant and an observer (D65 and 2 degrees unless said), made once. Throws `unknown-field-value`. */
-export function viewingWeights({ illuminant = 'D65', observer = '2deg' }: Viewing = {}): ViewingWeights {
+export function viewingWeights(viewing: Viewing = {}): ViewingWeights {
+  const { illuminant, observer } = { ...defaultViewing, ...viewing };
   const key = `${illuminant}/${observer}`;
   const known = kept.get(key);
   if (known !== undefined) return known;

@@ -3,4 +3,5 @@ export { predict, predictMany, type PredictManyOptions, type PredictOptions } fr
 export { modelVersion } from './modelVersion';
 export { drawBands, estimateDraws, type ParameterEstimates } from './drawBands';
 export { sharedNormals } from './sharedNormals';
+export { spectrumRange } from './spectrumRange';
 export type { Band, BandKind } from '../transitions/types';

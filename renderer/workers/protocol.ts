@@ -1,3 +1,4 @@
+import type { IlluminantId, ObserverId } from '../../core/library/colourTables';
 import type { PredictionOutcome } from '../../core/prediction/types';
 import type { CandidateInput } from '../../core/record/composition';
 import type { ParameterSet } from '../../core/record/project';
@@ -14,6 +15,10 @@ export interface OneOptions {
   readonly draws?: number;
   /** Decides on some of the cautions. */
   readonly counterIon?: string | null;
+  readonly temperature_K?: number;
+  /** How its colour is looked at; daylight and the 2 degree observer unless said. */
+  readonly illuminant?: IlluminantId;
+  readonly observer?: ObserverId;
 }
 
 export type ToWorker =

@@ -16,11 +16,13 @@ const routeWords: Record<EstimateRoute, string> = {
 
 /** The parameters of the field with range, route and account. */
 export function FieldPanel({ prediction }: { readonly prediction: Prediction }) {
+  const { tenDqBySpin } = prediction;
   return (
     <section className="panel" aria-labelledby="sheet-field">
       <h2 id="sheet-field">Field and repulsion</h2>
       <dl className="quantities">
         <Quantity name="10Dq" meaning="splitting of the d shell by the ligands" estimate={prediction.tenDq} />
+        {tenDqBySpin && <BySpin {...tenDqBySpin} />}
         <Quantity name="B" meaning="Racah parameter of electron repulsion" estimate={prediction.racahB} />
         <Quantity name="C" meaning="second Racah parameter" estimate={prediction.racahC} />
         <Quantity name="ζ" meaning="spin-orbit parameter of one electron" estimate={prediction.zeta} />
@@ -28,6 +30,22 @@ export function FieldPanel({ prediction }: { readonly prediction: Prediction }) 
     </section>
   );
 }
+
+/** Bonds are longer in the high-spin state: each state has a field of its own. */
+const BySpin = ({ high, low }: NonNullable<Prediction['tenDqBySpin']>) => (
+  <QuantityLine
+    name="10Dq at the bond lengths of"
+    value={
+      <>
+        <span className="small">high spin</span>{' '}
+        <NumberWithRange kind="interval" value={high.value} sigma={high.sigma} />
+        <br />
+        <span className="small">low spin</span>{' '}
+        <NumberWithRange kind="interval" value={low.value} sigma={low.sigma} />
+      </>
+    }
+  />
+);
 
 interface QuantityProps {
   readonly name: string;

@@ -11,6 +11,8 @@ import { LevelPanel } from './LevelPanel';
 import { NotesPanel } from './NotesPanel';
 import { SpectrumPanel } from './SpectrumPanel';
 import { SpinPanel } from './SpinPanel';
+import { type Viewing } from './viewing/viewing';
+import { ViewingPanel } from './viewing/ViewingPanel';
 import './Sheet.css';
 
 interface SheetProps {
@@ -18,10 +20,15 @@ interface SheetProps {
   readonly prediction: Prediction;
   /** Undefined while it is being drawn; null where no colour could be estimated. */
   readonly cloud: ColourCloud | null | undefined;
+  readonly viewing: Viewing;
+  readonly onViewing: (change: Partial<Viewing>) => void;
+  readonly onReset: (() => void) | null;
+  readonly onKeep: (() => void) | null;
 }
 
 /** Everything that is said of one complex, the answers first, their account below. */
-export function Sheet({ candidate, prediction, cloud }: SheetProps) {
+export function Sheet(props: SheetProps) {
+  const { candidate, prediction, cloud, viewing } = props;
   // Figures take longer to draw than numbers: the numbers are on screen first.
   const withFigures = useDeferredValue(true, false);
   return (
@@ -31,13 +38,19 @@ export function Sheet({ candidate, prediction, cloud }: SheetProps) {
           <FlagList flags={prediction.flags} />
         </section>
       )}
-      <ColourPanel prediction={prediction} cloud={cloud} />
+      <ViewingPanel
+        viewing={viewing}
+        onChange={props.onViewing}
+        onReset={props.onReset}
+        onKeep={props.onKeep}
+      />
+      <ColourPanel prediction={prediction} cloud={cloud} viewing={viewing} />
       <div className="sheet-column">
         <SpinPanel prediction={prediction} />
         <FieldPanel prediction={prediction} />
       </div>
-      {withFigures && <SpectrumPanel prediction={prediction} />}
-      <BandTable bands={prediction.bands} />
+      {withFigures && <SpectrumPanel prediction={prediction} solvent={viewing.solvent} />}
+      <BandTable prediction={prediction} solvent={viewing.solvent} />
       {withFigures && <LevelPanel prediction={prediction} />}
       <section className="panel sheet-wide" aria-labelledby="sheet-left-out">
         <h2 id="sheet-left-out">Left out of this estimate</h2>

@@ -9,6 +9,7 @@ import { EmptyState, ErrorPanel } from '../../parts';
 import type { Candidate } from '../../../core/record/project';
 import { Sheet } from './Sheet';
 import { SheetHeader } from './SheetHeader';
+import { useViewing } from './viewing/useViewing';
 
 /** Draws for the cloud of colours: enough for shares in words, asked for after the rest is on screen. */
 const draws = 200;
@@ -46,20 +47,27 @@ function OfCandidate({ candidate }: { readonly candidate: Candidate }) {
   const { conditions, project } = useProject();
   const input = useMemo(() => inputOf(candidate, conditions), [candidate, conditions]);
   const { counterIon } = candidate;
-  const plain = usePrediction(
-    input,
-    useMemo(() => ({ counterIon }), [counterIon]),
+  const strength = useMemo(
+    () => ({
+      concentration_mM: candidate.concentration_mM ?? conditions.concentration_mM,
+      path_cm: candidate.path_cm ?? conditions.path_cm,
+    }),
+    [candidate, conditions],
   );
-  const withDraws = usePrediction(
-    input,
-    useMemo(() => ({ counterIon, draws }), [counterIon]),
-  );
-  const { outcome, error } = plain;
+  const { viewing, change, reset, keep } = useViewing(candidate, strength);
+  const { concentration_mM, path_cm, temperature_K, illuminant, observer } = viewing;
+  const looked = { ...input, concentration_mM, path_cm };
+  const light = { counterIon, temperature_K, illuminant, observer };
+  // What is frozen is the candidate at its own strength, however the sheet happens to look at it.
+  const plain = usePrediction(input, { counterIon });
+  const asked = usePrediction(looked, light);
+  const withDraws = usePrediction(looked, { ...light, draws });
+  const { outcome, error } = asked;
   const prediction = outcome?.ok ? outcome.prediction : null;
-  const cloud = withDraws.current && withDraws.outcome?.ok ? withDraws.outcome.prediction.cloud : undefined;
+  const drawn = withDraws.outcome?.ok ? withDraws.outcome.prediction.cloud : undefined;
   return (
     <>
-      <SheetHeader candidate={candidate} prediction={prediction} />
+      <SheetHeader candidate={candidate} prediction={plain.outcome?.ok ? plain.outcome.prediction : null} />
       {error !== null && (
         <ErrorPanel
           title="No estimate"
@@ -76,7 +84,17 @@ function OfCandidate({ candidate }: { readonly candidate: Candidate }) {
         </ErrorPanel>
       )}
       {outcome === null && error === null && <p className="soft">Estimating…</p>}
-      {prediction && <Sheet candidate={candidate} prediction={prediction} cloud={cloud} />}
+      {prediction && (
+        <Sheet
+          candidate={candidate}
+          prediction={prediction}
+          cloud={drawn}
+          viewing={viewing}
+          onViewing={change}
+          onReset={reset}
+          onKeep={keep}
+        />
+      )}
     </>
   );
 }
