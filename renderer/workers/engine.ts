@@ -5,5 +5,5 @@ import type { Overlay } from './protocol';
 /** The engine as the worker calls it, with the parameters of a project laid over the library. */
 export const predictorFor =
   (overlay: Overlay): Predictor =>
-  (inputs, { draws = 0, counterIon = null } = {}) =>
-    predictMany(inputs, { parameterSet: overlay, draws, counterIon, placeOf: () => '' });
+  (inputs, options = {}) =>
+    predictMany(inputs, { ...options, parameterSet: overlay, placeOf: () => '' });
