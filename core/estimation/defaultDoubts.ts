@@ -16,7 +16,7 @@ export const defaultDoubts = {
   donorClassF: 0.07,
   seriesPlaceF: 0.1,
   /** That 10Dq factorises into f and g at all. */
-  factorisation: 0.022,
+  factorisation: 0.018,
   /** That a mixed set is the mean of its ligands; times 2 sqrt(x (1 - x)) for the share x of the main ligand. */
   additivity: 0.02,
   /** 4/9 of the octahedral splitting: bond lengths and covalency change with the coordination number. */

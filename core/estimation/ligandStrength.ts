@@ -25,7 +25,11 @@ const confidenceSigma = (confidence: 'high' | 'medium' | 'low' | null): number =
 
 const charge = (ion: string): number => Number(/(\d)\+$/.exec(ion)?.[1] ?? 0);
 
-/** Weighted mean of the logarithms; the result is never surer than its best member. */
+/**
+ * Weighted mean of the logarithms. The result is never surer than its best member allows, and where the members scatter
+ * more than their own standard deviations explain, it is less sure by the ratio of the two (R. T. Birge, Phys. Rev. 40,
+ * 207, 1932).
+ */
 export function pool(evidence: readonly Evidence[]): { value: number; sigma: number } {
   let weight = 0;
   let sum = 0;
@@ -33,8 +37,17 @@ export function pool(evidence: readonly Evidence[]): { value: number; sigma: num
     weight += 1 / sigma ** 2;
     sum += Math.log(value) / sigma ** 2;
   }
+  const mean = sum / weight;
+  const scatter = evidence.reduce(
+    (total, { value, sigma }) => total + ((Math.log(value) - mean) / sigma) ** 2,
+    0,
+  );
+  const birge = evidence.length > 1 ? Math.sqrt(scatter / (evidence.length - 1)) : 1;
   const best = Math.min(...evidence.map(({ sigma }) => sigma));
-  return { value: Math.exp(sum / weight), sigma: Math.max(Math.sqrt(1 / weight), 0.7 * best) };
+  return {
+    value: Math.exp(mean),
+    sigma: Math.max(Math.sqrt(1 / weight), 0.7 * best) * Math.max(1, birge),
+  };
 }
 
 function publishedF(f: SourcedValue, acceptor: boolean): Evidence | null {

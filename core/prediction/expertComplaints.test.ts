@@ -2,7 +2,8 @@ import { describe, expect, it } from 'vitest';
 import { defaultLibrary, findIon, netCharge, withParameterSet } from '../library';
 import { checkCandidate } from '../record/candidateCheck';
 import { crossoverRatio } from '../spin';
-import { predict, predictMany, type Prediction } from '.';
+import { colourOfSolution, hueInWords } from '../colour';
+import { predict, predictMany, type Band, type Prediction } from '.';
 
 const of = (
   metal: string,
@@ -207,5 +208,38 @@ describe('what experts complain of', () => {
     expect(colourAtThreeStrengths.map(({ factor }) => factor)).toEqual([1 / 3, 1, 3]);
     expect(conditions.concentration_mM).toBeGreaterThan(0);
     expect(conditions.path_cm).toBeGreaterThan(0);
+  });
+
+  it('the absorbed colour shown as the seen one, or one wheel of complements for two bands', () => {
+    const band = (nm: number) => ({ energy_cm1: 1e7 / nm, width_cm1: 3000, molarAbsorptivity: 60 });
+    const seen = (...places: number[]) =>
+      colourOfSolution(places.map(band), { concentration_mM: 20, path_cm: 1 });
+    // Orange light is absorbed, blue is seen (common practice); with violet absorbed as well, green is left over.
+    expect(hueInWords(seen(600).lab)).toMatch(/blue/);
+    expect(hueInWords(seen(650, 420).lab)).toMatch(/green/);
+  });
+
+  it('selection rules dropped: a spin-forbidden band is far below the allowed ones, a tetrahedron far above an octahedron', () => {
+    const strongest = (bands: readonly Band[], kind: Band['kind']) =>
+      Math.max(...bands.filter((band) => band.kind === kind).map((band) => band.molarAbsorptivity));
+    const { bands } = of('Cr', 3, { nh3: 6 });
+    expect(strongest(bands, 'spin-forbidden')).toBeLessThan(strongest(bands, 'spin-allowed') / 5);
+    const tetrahedral = of('Co', 2, { cl: 4 }, { geometry: 'tetrahedral' }).bands;
+    const octahedral = of('Co', 2, { h2o: 6 }).bands;
+    expect(strongest(tetrahedral, 'spin-allowed')).toBeGreaterThan(
+      10 * strongest(octahedral, 'spin-allowed'),
+    );
+  });
+
+  it('pi acceptors trusted like ammines: cyanide on manganese(II) and bipyridine on iron(II) are less certain or say so', () => {
+    const doubt = ({ tenDq }: Prediction) => tenDq.sigma! / tenDq.value!;
+    const pairs = [
+      [of('Mn', 2, { cn: 6 }), of('Mn', 2, { nh3: 6 })],
+      [of('Fe', 2, { bipy: 3 }), of('Fe', 2, { nh3: 6 })],
+    ] as const;
+    for (const [acceptor, plain] of pairs) {
+      expect(doubt(acceptor)).toBeGreaterThan(1.3 * doubt(plain));
+      expect(acceptor.flags.map(({ severity }) => severity)).toContain('invalid');
+    }
   });
 });
