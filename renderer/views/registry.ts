@@ -4,6 +4,7 @@ import { candidatesView } from './candidates';
 import { diagramView } from './diagram';
 import { entryView } from './entry';
 import { libraryView } from './library';
+import { recordView } from './record';
 import { searchView } from './search';
 import { settingsView } from './settings';
 import { sheetView } from './sheet';
@@ -15,6 +16,7 @@ export const views: readonly ViewDefinition[] = [
   candidatesView,
   entryView,
   searchView,
+  recordView,
   sheetView,
   libraryView,
   diagramView,

@@ -23,6 +23,8 @@ export interface SpectrumPlotProps {
   /** Multiplies the molar absorptivity of a band into the quantity of the axis (c × l for absorbance). */
   readonly bandFactor?: number;
   readonly quantity?: 'molar-absorptivity' | 'absorbance';
+  /** Name of the y axis where it holds neither of the two. */
+  readonly yLabel?: string;
   readonly measured?: readonly (SpectrumCurve & { readonly name: string })[];
   readonly title?: string;
   readonly height?: number;
@@ -101,7 +103,7 @@ export function SpectrumPlot(props: SpectrumPlotProps) {
             : `${unit === 'THz' ? 'Frequency' : unit === 'cm-1' ? 'Wavenumber' : 'Energy'} / ${unitText[unit]}`,
         domain: axisDomain(shownRange_cm1(curves), unit),
       }}
-      y={{ label: axisName[quantity], domain: yDomain, log }}
+      y={{ label: props.yLabel ?? axisName[quantity], domain: yDomain, log }}
       margin={margin}
       height={props.height ?? 380}
       zoom="xy"

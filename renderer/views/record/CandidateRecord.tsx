@@ -3,7 +3,7 @@ import { complexFormula } from '../../../core/library/complexFormula';
 import type { Measurement } from '../../../core/record/measurement';
 import type { Candidate } from '../../../core/record/project';
 import { currentContent } from '../../../core/record/revisions';
-import { minuteOf, useAction, useSettings, useStored, useStore } from '../../app/services';
+import { minuteOf, useAction, useServices, useSettings, useStored, useStore } from '../../app/services';
 import { inputOf } from '../../app/session/candidateInput';
 import { useProject } from '../../app/session/ProjectSession';
 import { useLibrary } from '../../app/session/useLibrary';
@@ -16,6 +16,10 @@ import { pairsOf } from './agreement/recordPairs';
 import { keepingTheRest } from './draft/contentOf';
 import { blankMeasurement, draftOf } from './draft/measurementDraft';
 import { type Entered, MeasurementDialog } from './form/MeasurementDialog';
+import { DropArea } from './importing/DropArea';
+import { ImportDialog, type ImportedSpectra } from './importing/ImportDialog';
+import { PasteSpectrum } from './importing/PasteSpectrum';
+import type { IncomingFile } from './importing/useReadings';
 import { MeasurementList } from './MeasurementList';
 
 const shared = ['measurements', 'frozenPredictions', 'samples'] as const;
@@ -29,6 +33,9 @@ export function CandidateRecord({ candidate }: { readonly candidate: Candidate }
   const toast = useToast();
   const { settings } = useSettings();
   const [open, setOpen] = useState<'new' | Measurement | null>(null);
+  const [incoming, setIncoming] = useState<readonly IncomingFile[] | null>(null);
+  const [pasting, setPasting] = useState(false);
+  const { host } = useServices();
   const formula = complexFormula(candidate.composition, library);
   const input = useMemo(() => inputOf(candidate, conditions), [candidate, conditions]);
   const { counterIon } = candidate;
@@ -53,6 +60,22 @@ export function CandidateRecord({ candidate }: { readonly candidate: Candidate }
       const contents = [content];
       const { froze } = await store.measurements.add({ candidate, contents, batch, by, prediction, formula });
       toast({ message: froze ? 'Prediction frozen, then measurement saved' : 'Measurement saved', undo });
+    });
+  const keep = (imported: ImportedSpectra): Promise<boolean> =>
+    act(async () => {
+      const { froze, measurements } = await store.measurements.add({
+        candidate,
+        prediction,
+        formula,
+        ...imported,
+      });
+      const kept = measurements.length === 1 ? 'Spectrum kept' : `${measurements.length} spectra kept`;
+      toast({ message: froze ? `Prediction frozen, then ${kept.toLowerCase()}` : kept, undo });
+    });
+  const chooseFiles = (): void =>
+    void act(async () => {
+      const files = await host.openFiles({ kind: 'spectrum', many: true });
+      if (files.length > 0) setIncoming(files);
     });
   const correct = (measurement: Measurement, { content, by, why }: Entered): Promise<boolean> =>
     act(async () => {
@@ -91,20 +114,30 @@ export function CandidateRecord({ candidate }: { readonly candidate: Candidate }
         ? blankMeasurement(settings.initials, today)
         : draftOf(currentContent(open), null);
   return (
-    <div className="stack">
+    <DropArea onFiles={setIncoming}>
       <section className="panel stack" aria-labelledby="record-measured">
         <div className="record-head">
           <h2 id="record-measured">Measurements</h2>
-          <button type="button" className="button-main" disabled={waiting} onClick={() => setOpen('new')}>
-            Add measurement…
-          </button>
+          <span className="record-actions">
+            <button type="button" disabled={waiting} onClick={chooseFiles}>
+              Import spectra…
+            </button>
+            <button type="button" disabled={waiting} onClick={() => setPasting(true)}>
+              Paste a table…
+            </button>
+            <button type="button" className="button-main" disabled={waiting} onClick={() => setOpen('new')}>
+              Add measurement…
+            </button>
+          </span>
         </div>
         <p className="soft">
           {latest
             ? `${value.standing.length} frozen prediction${value.standing.length === 1 ? '' : 's'}, the latest of ${minuteOf(latest.frozenAt)}: ${latest.reason}.`
             : 'No frozen prediction yet; the first measurement freezes one before it is saved.'}
         </p>
-        {value.measurements.length === 0 && <p>Nothing measured yet.</p>}
+        {value.measurements.length === 0 && (
+          <p>Nothing measured yet. Drop a spectrum file here, import one, or type what was read off.</p>
+        )}
         <MeasurementList measurements={value.measurements} onCorrect={setOpen} onDelete={remove} />
       </section>
       {pairs.length > 0 && (
@@ -123,6 +156,25 @@ export function CandidateRecord({ candidate }: { readonly candidate: Candidate }
           onClose={() => setOpen(null)}
         />
       )}
-    </div>
+      {pasting && (
+        <PasteSpectrum
+          onClose={() => setPasting(false)}
+          onText={(file) => {
+            setPasting(false);
+            setIncoming([file]);
+          }}
+        />
+      )}
+      {incoming !== null && (
+        <ImportDialog
+          candidate={candidate}
+          incoming={incoming}
+          initials={settings.initials}
+          notice={notice}
+          onSave={keep}
+          onClose={() => setIncoming(null)}
+        />
+      )}
+    </DropArea>
   );
 }

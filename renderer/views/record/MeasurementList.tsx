@@ -2,6 +2,7 @@ import type { Measurement } from '../../../core/record/measurement';
 import { missingFields } from '../../../core/record/missing';
 import { currentContent } from '../../../core/record/revisions';
 import { dayOf, minuteOf } from '../../app/services';
+import { linkTo } from '../../app/router/RouterContext';
 import { contentText } from './contentText';
 
 interface MeasurementListProps {
@@ -9,6 +10,9 @@ interface MeasurementListProps {
   readonly onCorrect: (measurement: Measurement) => void;
   readonly onDelete: (measurement: Measurement) => void;
 }
+
+const correctedText = (times: number): string =>
+  times === 1 ? 'Corrected once' : `Corrected ${times} times`;
 
 /** What was measured, newest first, with what nobody wrote down and every former state. */
 export function MeasurementList({ measurements, onCorrect, onDelete }: MeasurementListProps) {
@@ -35,7 +39,7 @@ export function MeasurementList({ measurements, onCorrect, onDelete }: Measureme
               )}
               {measurement.revisions.length > 1 && (
                 <details>
-                  <summary>Corrected {measurement.revisions.length - 1} times</summary>
+                  <summary>{correctedText(measurement.revisions.length - 1)}</summary>
                   <ol>
                     {measurement.revisions.map((each) => (
                       <li key={each.number}>
@@ -49,6 +53,14 @@ export function MeasurementList({ measurements, onCorrect, onDelete }: Measureme
               )}
             </div>
             <div className="record-actions">
+              {(content.kind === 'spectrum' || content.kind === 'band list') && (
+                <a
+                  className="button"
+                  href={linkTo({ view: 'analysis', project: measurement.projectId, item: measurement.id })}
+                >
+                  {content.kind === 'spectrum' ? 'Treat and fit…' : 'Assign and fit…'}
+                </a>
+              )}
               {['band list', 'moment', 'observed colour', 'note'].includes(content.kind) && (
                 <button type="button" onClick={() => onCorrect(measurement)}>
                   Correct…

@@ -22,7 +22,16 @@ export function contentText(content: MeasurementContent): string {
       return `Colour seen: ${content.words}`;
     case 'note':
       return `Note: ${content.remark}`;
-    default:
-      return content.kind;
+    case 'spectrum':
+      return `Spectrum: ${content.name ?? content.source?.fileName ?? 'pasted'}`;
+    case 'moment series': {
+      const temperatures = content.points.map(({ temperature_K }) => temperature_K);
+      const [low, high] = [Math.min(...temperatures), Math.max(...temperatures)];
+      return `Moments at ${content.points.length} temperatures, ${low} to ${high} K`;
+    }
+    case 'emission': {
+      const places = content.maxima.map(({ energy_cm1 }) => formatFigures(1e7 / energy_cm1.value, 4));
+      return `Emission: ${places.join(', ')} nm`;
+    }
   }
 }

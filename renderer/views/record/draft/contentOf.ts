@@ -1,6 +1,7 @@
 import type { Problem } from '../../../../core/errors';
 import { accepted, type Checked, refused } from '../../../../core/errors';
 import type { Conditions, ListedBand, MeasurementContent } from '../../../../core/record/measurement';
+import type { Uncertain } from '../../../../core/record/uncertain';
 import { readNumber } from '../../../app/form';
 import type { BandDraft, ConditionsDraft, MeasurementDraft } from './measurementDraft';
 
@@ -151,16 +152,52 @@ function particulars(
   }
 }
 
-/** A corrected measurement keeps what the form does not show: attachments, readings, the diamagnetic correction. */
+const sameNumber = (one: number, other: number): boolean =>
+  Number(one.toPrecision(7)) === Number(other.toPrecision(7));
+
+/** A value that was not touched keeps the uncertainty that the form does not show. */
+function keepingUncertainty<T extends Uncertain | null>(before: T, corrected: T): T {
+  if (before === null || corrected === null) return corrected;
+  return sameNumber(before.value, corrected.value) && corrected.u === null ? before : corrected;
+}
+
+function keepingConditions(before: Conditions, corrected: Conditions): Conditions {
+  return {
+    ...corrected,
+    temperature_K: keepingUncertainty(before.temperature_K, corrected.temperature_K),
+    concentration_mM: keepingUncertainty(before.concentration_mM, corrected.concentration_mM),
+    path_cm: keepingUncertainty(before.path_cm, corrected.path_cm),
+    blank: before.blank,
+    bandwidth_nm: before.bandwidth_nm,
+  };
+}
+
+/** A band whose position was not touched keeps its width and note; a moved one is another band. */
+const keepingBands = (before: readonly ListedBand[], corrected: readonly ListedBand[]): ListedBand[] =>
+  corrected.map((band) => {
+    const same = before.find(({ energy_cm1 }) => sameNumber(energy_cm1.value, band.energy_cm1.value));
+    return same === undefined
+      ? band
+      : {
+          ...band,
+          energy_cm1: keepingUncertainty(same.energy_cm1, band.energy_cm1),
+          molarAbsorptivity: keepingUncertainty(same.molarAbsorptivity, band.molarAbsorptivity),
+          width_cm1: same.width_cm1,
+          note: same.note,
+        };
+  });
+
+/** A corrected measurement keeps what the form does not show: attachments, readings, uncertainties, widths. */
 export function keepingTheRest(
   before: MeasurementContent,
   corrected: MeasurementContent,
 ): MeasurementContent {
-  const { blank, bandwidth_nm } = before.conditions;
   const rest = {
     attachments: before.attachments,
-    conditions: { ...corrected.conditions, blank, bandwidth_nm },
+    conditions: keepingConditions(before.conditions, corrected.conditions),
   };
+  if (before.kind === 'band list' && corrected.kind === 'band list')
+    return { ...corrected, ...rest, bands: keepingBands(before.bands, corrected.bands) };
   if (before.kind === 'moment' && corrected.kind === 'moment')
     return { ...corrected, ...rest, readings: before.readings, diamagnetism: before.diamagnetism };
   if (before.kind === 'observed colour' && corrected.kind === 'observed colour')
