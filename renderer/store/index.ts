@@ -10,6 +10,7 @@ export {
   type TablePlan,
 } from './exchange/importProject';
 export { askForLastingStorage, type StorageState } from './persistence';
+export { type AnalysisFields } from './repositories/analyses';
 export { blankCandidate, type CandidateFields, type NewCandidate } from './repositories/candidates';
 export { type AddedMeasurements, type Correction, type NewMeasurements } from './repositories/measurements';
 export { type ProjectFields } from './repositories/projects';

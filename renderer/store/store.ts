@@ -5,6 +5,7 @@ import { EstimateCache } from './estimateCache';
 import { ChangeFeed } from './feed';
 import { Journal } from './journal/journal';
 import { type Clock, systemClock } from './journal/writer';
+import { AnalysisRepository } from './repositories/analyses';
 import { CandidateRepository } from './repositories/candidates';
 import { FrozenPredictionRepository, ParameterSetRepository } from './repositories/predictions';
 import { MeasurementRepository } from './repositories/measurements';
@@ -23,6 +24,7 @@ export interface Store {
   readonly frozenPredictions: FrozenPredictionRepository;
   readonly samples: SampleRepository;
   readonly measurements: MeasurementRepository;
+  readonly analyses: AnalysisRepository;
   readonly parameterSets: ParameterSetRepository;
   readonly settings: SettingsRepository;
   readonly bin: Bin;
@@ -59,6 +61,7 @@ export async function openStore(options: StoreOptions = {}): Promise<Store> {
     frozenPredictions: new FrozenPredictionRepository(db, journal),
     samples,
     measurements: new MeasurementRepository(db, journal, samples),
+    analyses: new AnalysisRepository(db, journal),
     parameterSets: new ParameterSetRepository(db),
     settings: new SettingsRepository(db),
     bin: new Bin(db, journal),

@@ -1,4 +1,5 @@
 import type { ViewDefinition } from '../app/view';
+import { analysisView } from './analysis';
 import { binView } from './bin';
 import { candidatesView } from './candidates';
 import { diagramView } from './diagram';
@@ -17,6 +18,7 @@ export const views: readonly ViewDefinition[] = [
   entryView,
   searchView,
   recordView,
+  analysisView,
   sheetView,
   libraryView,
   diagramView,

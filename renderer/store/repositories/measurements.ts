@@ -62,6 +62,10 @@ export class MeasurementRepository {
     return kept(await this.#db.measurements.where('projectId').equals(projectId).toArray());
   }
 
+  get(id: string): Promise<Measurement | undefined> {
+    return this.#db.measurements.get(id);
+  }
+
   async inBinOf(candidateId: string): Promise<Measurement[]> {
     const all = await this.#db.measurements.where('candidateId').equals(candidateId).toArray();
     return all.filter(({ deletedAt }) => deletedAt !== null);

@@ -7,9 +7,9 @@ import { useLibrary } from '../../app/session/useLibrary';
 import { EmptyState, ErrorPanel, Formula } from '../../parts';
 import { ParityPlot } from '../../plots';
 import type { Store } from '../../store';
-import { AgreementFigures } from './agreement/AgreementFigures';
-import { PairTable } from './agreement/PairTable';
-import { countedPairs, pairsOf } from './agreement/recordPairs';
+import { AgreementFigures } from '../agreement/AgreementFigures';
+import { PairTable } from '../agreement/PairTable';
+import { countedPairs, pairsOf } from '../agreement/recordPairs';
 
 const shared = ['measurements', 'frozenPredictions'] as const;
 

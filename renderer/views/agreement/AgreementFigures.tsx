@@ -1,6 +1,6 @@
-import { formatFigures, formatShare } from '../../../parts';
+import { formatFigures, formatShare } from '../../parts';
 import { agreementOf, countedPairs, type BandPair } from './recordPairs';
-import type { Share } from '../../../../core/agreement';
+import type { Share } from '../../../core/agreement';
 
 const shareText = ({ hits, of, share, interval95 }: Share): string =>
   share === null

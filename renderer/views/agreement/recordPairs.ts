@@ -4,12 +4,12 @@ import {
   standardScore,
   type ErrorSummary,
   type Share,
-} from '../../../../core/agreement';
-import { assignBands } from '../../../../core/measured/assignment/assignBands';
-import type { ListedBand, Measurement } from '../../../../core/record/measurement';
-import type { FrozenPrediction } from '../../../../core/record/project';
-import { currentContent } from '../../../../core/record/revisions';
-import type { Band } from '../../../../core/transitions/types';
+} from '../../../core/agreement';
+import { assignBands } from '../../../core/measured/assignment/assignBands';
+import type { ListedBand, Measurement } from '../../../core/record/measurement';
+import type { FrozenPrediction } from '../../../core/record/project';
+import { currentContent } from '../../../core/record/revisions';
+import type { Band } from '../../../core/transitions/types';
 
 /** One measured band beside the band of the prediction that stood when it was saved. */
 export interface BandPair {

@@ -1,5 +1,5 @@
 import type { ReactNode } from 'react';
-import { formatFigures, NumberWithRange, TermSymbol } from '../../../parts';
+import { formatFigures, NumberWithRange, TermSymbol } from '../../parts';
 import type { BandPair } from './recordPairs';
 
 interface PairTableProps {

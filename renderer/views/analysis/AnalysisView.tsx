@@ -1,0 +1,180 @@
+import { useCallback, useMemo } from 'react';
+import { complexFormula } from '../../../core/library/complexFormula';
+import type { Analysis } from '../../../core/record/analysis';
+import { currentContent } from '../../../core/record/revisions';
+import { linkTo, useRouter } from '../../app/router/RouterContext';
+import { useAction, useStored, useStore } from '../../app/services';
+import { useVersion } from '../../app/session/observable';
+import { useProject } from '../../app/session/ProjectSession';
+import { useLibrary } from '../../app/session/useLibrary';
+import { ViewHeader } from '../../app/shell/ViewHeader';
+import { EmptyState, ErrorPanel, Formula } from '../../parts';
+import type { AnalysisFields, Store } from '../../store';
+import { AssignPanel } from './assign/AssignPanel';
+import { measuredBands } from './assign/measuredBands';
+import { FieldFitPanel } from './field/FieldFitPanel';
+import { FitPanel } from './fit/FitPanel';
+import { treated } from './treatment/treated';
+import { TreatmentPanel } from './treatment/TreatmentPanel';
+import './AnalysisView.css';
+
+const tables = ['measurements', 'analyses', 'frozenPredictions'] as const;
+
+/** From one measured spectrum or list of bands to an assignment and the field that fits it. */
+export default function AnalysisView() {
+  const { address } = useRouter();
+  const { project, rows } = useProject();
+  useVersion(rows);
+  const store = useStore();
+  const act = useAction();
+  const library = useLibrary();
+  const id = address.item ?? '';
+  const ask = useCallback((from: Store) => everythingOf(from, project.id, id), [project.id, id]);
+  const { value, error } = useStored(ask, tables);
+  const content = value?.measurement && currentContent(value.measurement);
+  const curve = value?.curve ?? null;
+  const treatment = value?.analysis?.treatment;
+  const result = useMemo(
+    () =>
+      curve === null ? null : treated(curve, treatment ?? [], (wanted) => value?.blanks.get(wanted)?.curve),
+    [curve, treatment, value?.blanks],
+  );
+  if (error !== null)
+    return (
+      <ErrorPanel
+        title="This measurement cannot be read"
+        problems={[{ code: 'integrity', field: '', message: error }]}
+      />
+    );
+  if (!value) return <p className="soft">Opening…</p>;
+  const { measurement, analysis, frozen, blanks } = value;
+  const candidate = measurement && rows.get(measurement.candidateId);
+  if (!measurement || !content || !candidate || measurement.deletedAt !== null) {
+    return (
+      <>
+        <ViewHeader title="Not found" />
+        <EmptyState
+          title="This measurement is not here"
+          actions={
+            <a className="button" href={linkTo({ view: 'record', project: project.id })}>
+              The lab record
+            </a>
+          }
+        >
+          It may have been deleted, or its candidate lies in the bin.
+        </EmptyState>
+      </>
+    );
+  }
+  const save = (fields: AnalysisFields, label: string): Promise<boolean> =>
+    act(() => store.analyses.save(measurement, analysis, fields, label));
+  const bands = measuredBands(content, analysis);
+  return (
+    <div className="stack">
+      <nav className="sheet-way" aria-label="Way back">
+        <a href={linkTo({ view: 'record', project: project.id, item: candidate.id })}>Lab record</a>
+      </nav>
+      <ViewHeader
+        title={<Formula formula={complexFormula(candidate.composition, library)} />}
+        summary={
+          content.kind === 'spectrum'
+            ? `Spectrum ${content.name ?? content.source?.fileName ?? ''}. The raw numbers stay as they were read.`
+            : 'Bands as they were typed.'
+        }
+      />
+      {content.kind === 'spectrum' && curve === null && (
+        <ErrorPanel
+          title="The numbers of this spectrum are missing"
+          problems={[
+            {
+              code: 'integrity',
+              field: '',
+              message: 'They did not travel with the project.',
+              remedy: 'Import the file again, or restore a snapshot.',
+            },
+          ]}
+        />
+      )}
+      {curve !== null && result !== null && (
+        <>
+          <TreatmentPanel
+            curve={curve}
+            steps={analysis?.treatment ?? []}
+            result={result}
+            conditions={content.conditions}
+            blanks={blanks}
+            onSave={(steps, label) => save({ treatment: [...steps] }, label)}
+          />
+          <FitPanel
+            key={analysis?.bandFit ? 'fitted' : 'open'}
+            points={result.points}
+            quantity={result.quantity}
+            kept={analysis?.bandFit ?? null}
+            onSave={(bandFit, label) => save({ bandFit, assignment: [], fieldFit: null }, label)}
+          />
+        </>
+      )}
+      {bands.length > 0 && (
+        <>
+          <AssignPanel
+            measured={bands}
+            frozen={frozen}
+            kept={analysis?.assignment ?? []}
+            onSave={(assignment, label) => save({ assignment, fieldFit: null }, label)}
+          />
+          <FieldFitPanel
+            candidate={candidate}
+            frozen={frozen}
+            measured={bands}
+            assignment={analysis?.assignment ?? []}
+            kept={analysis?.fieldFit ?? null}
+            onSave={(fieldFit, label) => save({ fieldFit }, label)}
+          />
+        </>
+      )}
+    </div>
+  );
+}
+
+async function everythingOf(store: Store, projectId: string, id: string) {
+  const measurement = await store.measurements.get(id);
+  if (measurement === undefined) return { measurement: null, ...nothing };
+  const content = currentContent(measurement);
+  const curve =
+    content.kind === 'spectrum' ? ((await store.measurements.curve(content.curveId)) ?? null) : null;
+  const frozen =
+    (await store.frozenPredictions.ofProject(projectId)).get(measurement.frozenPredictionId ?? '') ?? null;
+  return {
+    measurement,
+    curve,
+    frozen,
+    analysis: await store.analyses.of(id),
+    blanks: await possibleBlanks(store, projectId, id),
+  };
+}
+
+const nothing = {
+  curve: null,
+  frozen: null,
+  analysis: null as Analysis | null,
+  blanks: new Map<string, never>(),
+};
+
+/** Other spectra of the project by the id of their curve; the curves of those that serve as a blank are few and small. */
+async function possibleBlanks(store: Store, projectId: string, id: string) {
+  const blanks = new Map<
+    string,
+    { name: string; curve: Awaited<ReturnType<Store['measurements']['curve']>> }
+  >();
+  for (const each of await store.measurements.ofProject(projectId)) {
+    const content = currentContent(each);
+    if (content.kind !== 'spectrum' || each.id === id || blanks.has(content.curveId)) continue;
+    if (blanks.size >= mostBlanks) break;
+    const name = content.name ?? content.source?.fileName ?? 'a spectrum';
+    blanks.set(content.curveId, { name, curve: await store.measurements.curve(content.curveId) });
+  }
+  return blanks;
+}
+
+/** A list to choose from that anybody can still read. */
+const mostBlanks = 100;
