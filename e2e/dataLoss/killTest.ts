@@ -128,7 +128,9 @@ async function tornSnapshots(copies: string): Promise<string[]> {
 export async function killTest(
   kills: number,
   seed: number,
-  onKill: (done: number, faults: number) => void = () => undefined,
+  onKill: (done: number, faults: readonly string[]) => void = () => undefined,
+  /** Leaves profile and copies where something was lost, for looking at. */
+  keep = false,
 ): Promise<KillReport> {
   const folder = await mkdtemp(join(tmpdir(), 'spinhue-kill-'));
   const profile = join(folder, 'profile');
@@ -148,6 +150,7 @@ export async function killTest(
   const progress: Progress = { attempted: 0, confirmed: 0, starred: false, starring: false };
   const watch = new CopyWatch(copies, /"notes":"edit (\d+):/);
   let running = await startBrowser(profile);
+  let whole = false;
   try {
     await cleanStart(running, server.windowAddress(), faults);
     await running.page.getByRole('link', { name: /^Demo: a filter/ }).waitFor({ timeout: 60_000 });
@@ -193,14 +196,16 @@ export async function killTest(
       if (watch.number < progress.confirmed)
         faults.push(`kill ${kill}: the copy did not catch up after the start`);
       catchUps_ms.push(Date.now() - drawn);
-      onKill(kill + 1, faults.length);
+      onKill(kill + 1, faults);
     }
     faults.push(...watch.torn, ...(await tornSnapshots(copies)));
+    whole = faults.length === 0;
   } finally {
     await running.kill();
     watch.stop();
     await server.close();
-    await rm(folder, { recursive: true, force: true, maxRetries: 10 });
+    if (whole || !keep) await rm(folder, { recursive: true, force: true, maxRetries: 10 });
+    else process.stderr.write(`what is left of it: ${folder}\n`);
   }
   return { kills, confirmed: progress.attempted, faults, lags_ms: watch.lags_ms, catchUps_ms };
 }

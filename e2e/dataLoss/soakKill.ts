@@ -15,10 +15,18 @@ const quantile = (values: readonly number[], share: number): number =>
 const spread = (values: readonly number[]): string =>
   `median ${quantile(values, 0.5)} ms, 99 % ${quantile(values, 0.99)} ms, largest ${Math.max(0, ...values)} ms`;
 
-const report = await killTest(Number(values.count), Number(values.seed), (done, faults) => {
-  if (done % 10 === 0) process.stderr.write(`${done} kills, ${faults} faults\n`);
-});
-report.faults.forEach((fault) => process.stdout.write(`${fault}\n`));
+let told = 0;
+const report = await killTest(
+  Number(values.count),
+  Number(values.seed),
+  (done, faults) => {
+    // Told at once: what comes after a loss may stop the run before its end.
+    for (; told < faults.length; told++) process.stdout.write(`${faults[told]}\n`);
+    if (done % 10 === 0) process.stderr.write(`${done} kills, ${faults.length} faults\n`);
+  },
+  true,
+);
+report.faults.slice(told).forEach((fault) => process.stdout.write(`${fault}\n`));
 process.stdout.write(
   `${report.kills} kills during ${report.confirmed} edits, ${report.faults.length} faults; ` +
     `copy behind the screen: ${spread(report.lags_ms)}; caught up after a start: ${spread(report.catchUps_ms)}\n`,
