@@ -62,7 +62,7 @@ export async function openStore(options: StoreOptions = {}): Promise<Store> {
     samples,
     measurements: new MeasurementRepository(db, journal, samples),
     analyses: new AnalysisRepository(db, journal),
-    parameterSets: new ParameterSetRepository(db),
+    parameterSets: new ParameterSetRepository(db, journal),
     settings: new SettingsRepository(db),
     bin: new Bin(db, journal),
     estimates: new EstimateCache(db),

@@ -1,4 +1,5 @@
 import type { ViewDefinition } from '../app/view';
+import { agreementView } from './agreement';
 import { analysisView } from './analysis';
 import { binView } from './bin';
 import { candidatesView } from './candidates';
@@ -18,6 +19,7 @@ export const views: readonly ViewDefinition[] = [
   entryView,
   searchView,
   recordView,
+  agreementView,
   analysisView,
   sheetView,
   libraryView,

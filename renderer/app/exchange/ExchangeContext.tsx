@@ -6,6 +6,7 @@ import { useRouter } from '../router/RouterContext';
 import { useAction, useServices } from '../services';
 import { ImportPreview } from './ImportPreview';
 import { type ImportOffer, readImport } from './readImport';
+import { snapshotBefore } from './snapshotBefore';
 
 interface Exchange {
   /** Writes the whole project to a file that the user chooses. */
@@ -59,12 +60,8 @@ export function ExchangeProvider({ children }: { readonly children: ReactNode })
       if (!plan) return;
       setOffer(null);
       void act(async () => {
-        if (plan.known && how === 'in-place' && (await host.mirror.status()).state === 'ready') {
-          const bundle = await exportProject(store.db, plan.projectId);
-          await host.mirror.takeSnapshot(
-            { projectId: plan.projectId, projectName: plan.projectName, bundle },
-            'before-import',
-          );
+        if (plan.known && how === 'in-place') {
+          await snapshotBefore(host, store, { id: plan.projectId, name: plan.projectName }, 'before-import');
         }
         const projectId =
           how === 'copy'

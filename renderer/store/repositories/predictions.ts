@@ -60,19 +60,34 @@ export class FrozenPredictionRepository {
   }
 }
 
+/** Parameter sets of a project: added and chosen, never edited. */
 export class ParameterSetRepository {
   readonly #db: SpinhueDatabase;
+  readonly #journal: Journal;
 
-  constructor(db: SpinhueDatabase) {
+  constructor(db: SpinhueDatabase, journal: Journal) {
     this.#db = db;
+    this.#journal = journal;
   }
 
   get(id: string): Promise<ParameterSet | undefined> {
     return this.#db.parameterSets.get(id);
   }
 
+  /** Newest first. */
   async of(projectId: string): Promise<ParameterSet[]> {
     const all = await this.#db.parameterSets.where('projectId').equals(projectId).toArray();
-    return all.filter(({ deletedAt }) => deletedAt === null);
+    return all
+      .filter(({ deletedAt }) => deletedAt === null)
+      .sort((one, other) => other.createdAt.localeCompare(one.createdAt));
+  }
+
+  /** Keeps a set and lets the project use it, as one step. */
+  adopt(set: NewRow<'parameterSets'>, label: string): Promise<ParameterSet> {
+    return this.#journal.record(set.projectId, label, async (writer) => {
+      const [row] = await writer.create('parameterSets', [set]);
+      await writer.update('projects', set.projectId, { parameterSetId: row!.id });
+      return row!;
+    });
   }
 }

@@ -2,7 +2,7 @@ import { formatFigures, formatShare } from '../../parts';
 import { agreementOf, countedPairs, type BandPair } from './recordPairs';
 import type { Share } from '../../../core/agreement';
 
-const shareText = ({ hits, of, share, interval95 }: Share): string =>
+export const shareText = ({ hits, of, share, interval95 }: Share): string =>
   share === null
     ? 'none'
     : `${hits} of ${of}, ${formatShare(share)} (95 % interval ${formatShare(interval95[0])} to ${formatShare(interval95[1])})`;
@@ -48,10 +48,10 @@ export function AgreementFigures({ pairs }: { readonly pairs: readonly BandPair[
         </div>
       </dl>
       <p className="soft small">
-        Bands were paired by the closest match, which flatters the agreement where a measured band lies
-        between two predicted ones; nobody has assigned them.
+        Bands that nobody assigned were paired by the closest match, which flatters the agreement where a
+        measured band lies between two predicted ones.
         {left > 0 &&
-          ` Not counted: ${left} (shoulders, bands without a partner, or measured before freezing).`}
+          ` Not counted: ${left} (shoulders, bands without a partner, in-sample, or measured before freezing).`}
       </p>
     </>
   );

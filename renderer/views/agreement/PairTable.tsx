@@ -10,8 +10,9 @@ interface PairTableProps {
 
 const signed = (value: number, figures = 3): string => (value > 0 ? '+' : '') + formatFigures(value, figures);
 
-function remarkOf({ feature, predicted, frozenAfterwards }: BandPair): string {
+function remarkOf({ feature, predicted, frozenAfterwards, isInSample }: BandPair): string {
   if (predicted === null) return 'no predicted band near it';
+  if (isInSample) return 'went into these parameters, not counted';
   if (frozenAfterwards) return 'measured before freezing, not counted';
   return feature === 'shoulder' ? 'a shoulder is no centre, not counted' : '';
 }

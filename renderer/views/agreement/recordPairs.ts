@@ -6,8 +6,11 @@ import {
   type Share,
 } from '../../../core/agreement';
 import { assignBands } from '../../../core/measured/assignment/assignBands';
-import type { ListedBand, Measurement } from '../../../core/record/measurement';
-import type { FrozenPrediction } from '../../../core/record/project';
+import { complexKey } from '../../../core/library/parameterLibrary';
+import type { Analysis } from '../../../core/record/analysis';
+import type { Composition } from '../../../core/record/composition';
+import type { ListedBand, Measurement, MeasurementContent } from '../../../core/record/measurement';
+import type { FrozenPrediction, ParameterSet } from '../../../core/record/project';
 import { currentContent } from '../../../core/record/revisions';
 import type { Band } from '../../../core/transitions/types';
 
@@ -27,6 +30,8 @@ export interface BandPair {
   readonly score: number | null;
   /** The measurement is dated before its prediction was frozen: no test of it. */
   readonly frozenAfterwards: boolean;
+  /** The complex itself went into the parameters of its prediction: agreement says nothing of others. */
+  readonly isInSample: boolean;
 }
 
 /** Bands of a frozen prediction; it is kept as loose JSON, perhaps by an older version. */
@@ -53,46 +58,114 @@ function partners(bands: readonly Band[], measured: readonly ListedBand[]): read
   return strong.some(({ kind }) => kind === 'spin-allowed') ? strong : bands;
 }
 
-/** Pairs of one measurement: the cheapest one-to-one matching with the bands of its frozen prediction. */
-export function pairsOf(measurement: Measurement, frozen: FrozenPrediction | null): BandPair[] {
-  const content = currentContent(measurement);
-  if (content.kind !== 'band list') return [];
-  const predicted = partners(bandsOf(frozen), content.bands);
-  const matched = assignBands(
-    content.bands.map(({ energy_cm1, molarAbsorptivity }) => ({
+/** A band of a measurement that a prediction can be held against. */
+interface Compared {
+  readonly energy_cm1: { readonly value: number; readonly u: number | null };
+  readonly feature: ListedBand['feature'];
+  readonly partner: Band | null;
+}
+
+/** Bands of a kept assignment beside the partners that were chosen or found for them. */
+function assigned(analysis: Analysis, feature: Compared['feature'], predicted: readonly Band[]): Compared[] {
+  return analysis.assignment.map(({ energy_cm1, label, predicted_cm1 }) => ({
+    energy_cm1,
+    feature,
+    partner:
+      label === null
+        ? null
+        : (predicted.find((band) => band.label === label && band.energy_cm1 === predicted_cm1) ?? null),
+  }));
+}
+
+/** Bands of a list beside the partners of the cheapest one-to-one matching. */
+function matched(bands: readonly ListedBand[], predicted: readonly Band[]): Compared[] {
+  const possible = partners(predicted, bands);
+  const found = assignBands(
+    bands.map(({ energy_cm1, molarAbsorptivity }) => ({
       energy_cm1: energy_cm1.value,
       u_cm1: energy_cm1.u ?? 0,
       molarAbsorptivity: molarAbsorptivity?.value ?? null,
     })),
-    predicted,
+    possible,
     { count: 1 },
   );
-  return content.bands.map(({ energy_cm1, feature }, index): BandPair => {
-    const place = matched?.best.pairs[index]?.predicted ?? null;
-    const partner = place === null ? null : predicted[place]!;
-    const [measured, u] = [energy_cm1.value, energy_cm1.u];
-    return {
-      id: `${measurement.id} ${index}`,
-      measurementId: measurement.id,
-      candidateId: measurement.candidateId,
-      feature,
-      measured,
-      u,
-      predicted: partner,
-      residual: partner === null ? null : measured - partner.energy_cm1,
-      score:
-        partner === null
-          ? null
-          : standardScore({
-              predicted: partner.energy_cm1,
-              sigma: partner.sigma_cm1,
-              measured,
-              uncertainty: u ?? 0,
-            }),
-      frozenAfterwards: isFrozenAfterwards(content.conditions.date, frozen),
-    };
+  return bands.map(({ energy_cm1, feature }, index) => {
+    const place = found?.best.pairs[index]?.predicted ?? null;
+    return { energy_cm1, feature, partner: place === null ? null : possible[place]! };
   });
 }
+
+function comparedOf(
+  content: MeasurementContent,
+  analysis: Analysis | null,
+  predicted: readonly Band[],
+): Compared[] {
+  const kept = analysis !== null && analysis.assignment.length > 0 ? analysis : null;
+  if (content.kind === 'spectrum') return kept === null ? [] : assigned(kept, 'fitted centre', predicted);
+  if (content.kind !== 'band list') return [];
+  if (kept?.assignment.length !== content.bands.length) return matched(content.bands, predicted);
+  // The assignment says whose band it is; how it was read off is told by the list itself.
+  return assigned(kept, 'maximum', predicted).map((band, index) => ({
+    ...band,
+    feature: content.bands[index]!.feature,
+  }));
+}
+
+/**
+ * Pairs of one measurement: bands as they were assigned, else the cheapest matching with the bands of its frozen
+ * prediction. A spectrum counts once its bands are fitted and assigned.
+ *
+ * @param informed Complexes whose measurements went into the parameters of the prediction: no test of it.
+ */
+export function pairsOf(
+  measurement: Measurement,
+  frozen: FrozenPrediction | null,
+  analysis: Analysis | null = null,
+  informed: ReadonlySet<string> = none,
+): BandPair[] {
+  const content = currentContent(measurement);
+  const isInSample = frozen !== null && informed.has(keyOfFrozen(frozen));
+  return comparedOf(content, analysis, bandsOf(frozen)).map(
+    ({ energy_cm1, feature, partner }, index): BandPair => {
+      const [measured, u] = [energy_cm1.value, energy_cm1.u];
+      return {
+        id: `${measurement.id} ${index}`,
+        measurementId: measurement.id,
+        candidateId: measurement.candidateId,
+        feature,
+        measured,
+        u,
+        predicted: partner,
+        residual: partner === null ? null : measured - partner.energy_cm1,
+        score:
+          partner === null
+            ? null
+            : standardScore({
+                predicted: partner.energy_cm1,
+                sigma: partner.sigma_cm1,
+                measured,
+                uncertainty: u ?? 0,
+              }),
+        frozenAfterwards: isFrozenAfterwards(content.conditions.date, frozen),
+        isInSample,
+      };
+    },
+  );
+}
+
+const none: ReadonlySet<string> = new Set();
+
+/** Key of the complex that a frozen prediction is about; empty where it names none. */
+function keyOfFrozen({ prediction }: FrozenPrediction): string {
+  const { composition } = prediction as { composition?: Composition };
+  return composition === undefined ? '' : complexKey(composition);
+}
+
+/** Complexes that informed the parameter set a prediction was made with, by the hash of the set. */
+export const informedBy = (
+  sets: readonly ParameterSet[],
+  frozen: FrozenPrediction | null,
+): ReadonlySet<string> => new Set(sets.find(({ hash }) => hash === frozen?.parameterHash)?.informedBy ?? []);
 
 export type Counted = BandPair & {
   readonly predicted: NonNullable<BandPair['predicted']>;
@@ -103,7 +176,7 @@ export type Counted = BandPair & {
 export const countedPairs = (pairs: readonly BandPair[]): Counted[] =>
   pairs.filter(
     (pair): pair is Counted =>
-      pair.predicted !== null && pair.feature !== 'shoulder' && !pair.frozenAfterwards,
+      pair.predicted !== null && pair.feature !== 'shoulder' && !pair.frozenAfterwards && !pair.isInSample,
   );
 
 export interface Agreement {

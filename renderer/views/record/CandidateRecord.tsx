@@ -12,7 +12,7 @@ import { ErrorPanel, useToast } from '../../parts';
 import type { Store } from '../../store';
 import { AgreementFigures } from '../agreement/AgreementFigures';
 import { PairTable } from '../agreement/PairTable';
-import { pairsOf } from '../agreement/recordPairs';
+import { informedBy, pairsOf } from '../agreement/recordPairs';
 import { keepingTheRest } from './draft/contentOf';
 import { blankMeasurement, draftOf } from './draft/measurementDraft';
 import { type Entered, MeasurementDialog } from './form/MeasurementDialog';
@@ -22,7 +22,7 @@ import { PasteSpectrum } from './importing/PasteSpectrum';
 import type { IncomingFile } from './importing/useReadings';
 import { MeasurementList } from './MeasurementList';
 
-const shared = ['measurements', 'frozenPredictions', 'samples'] as const;
+const shared = ['measurements', 'frozenPredictions', 'samples', 'analyses', 'parameterSets'] as const;
 
 /** The record of one candidate: what was predicted, what was measured, and how they agree. */
 export function CandidateRecord({ candidate }: { readonly candidate: Candidate }) {
@@ -50,6 +50,8 @@ export function CandidateRecord({ candidate }: { readonly candidate: Candidate }
       measurements: await from.measurements.of(candidate.id),
       standing: await from.frozenPredictions.of(candidate.id),
       frozen: await from.frozenPredictions.ofProject(candidate.projectId),
+      analyses: await from.analyses.ofProject(candidate.projectId),
+      sets: await from.parameterSets.of(candidate.projectId),
     }),
     [candidate.id, candidate.projectId],
   );
@@ -97,9 +99,10 @@ export function CandidateRecord({ candidate }: { readonly candidate: Candidate }
       />
     );
   if (!value) return <p className="soft">Opening…</p>;
-  const pairs = value.measurements.flatMap((each) =>
-    pairsOf(each, value.frozen.get(each.frozenPredictionId ?? '') ?? null),
-  );
+  const pairs = value.measurements.flatMap((each) => {
+    const before = value.frozen.get(each.frozenPredictionId ?? '') ?? null;
+    return pairsOf(each, before, value.analyses.get(each.id) ?? null, informedBy(value.sets, before));
+  });
   const [latest] = value.standing;
   const notice = latest
     ? null

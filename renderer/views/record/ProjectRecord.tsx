@@ -1,31 +1,56 @@
-import { useCallback } from 'react';
+import { useVirtualizer } from '@tanstack/react-virtual';
+import { useCallback, useMemo, useRef, useState } from 'react';
 import { complexFormula } from '../../../core/library/complexFormula';
-import { linkTo, useRouter } from '../../app/router/RouterContext';
-import { useStored } from '../../app/services';
+import type { Measurement } from '../../../core/record/measurement';
+import { currentContent } from '../../../core/record/revisions';
+import { Field } from '../../app/form';
+import { linkTo } from '../../app/router/RouterContext';
+import { dayOf, useStored } from '../../app/services';
 import { useProject } from '../../app/session/ProjectSession';
 import { useLibrary } from '../../app/session/useLibrary';
 import { EmptyState, ErrorPanel, Formula } from '../../parts';
-import { ParityPlot } from '../../plots';
-import type { Store } from '../../store';
-import { AgreementFigures } from '../agreement/AgreementFigures';
-import { PairTable } from '../agreement/PairTable';
-import { countedPairs, pairsOf } from '../agreement/recordPairs';
+import { counted, type Store } from '../../store';
+import { contentText } from './contentText';
 
-const shared = ['measurements', 'frozenPredictions'] as const;
+const tables = ['measurements', 'candidates'] as const;
+const rowHeight = 44;
 
-/** Agreement over all candidates of the project. */
+interface Line {
+  readonly id: string;
+  readonly candidateId: string;
+  readonly formula: string;
+  readonly text: string;
+  readonly when: string;
+  /** Everything that the filter looks at, in lower case. */
+  readonly words: string;
+}
+
+/** All measurements of the project, newest first. Curves stay in the database until one is opened. */
 export function ProjectRecord() {
   const { project, rows } = useProject();
-  const { go } = useRouter();
   const library = useLibrary();
-  const ask = useCallback(
-    async (store: Store) => ({
-      measurements: await store.measurements.ofProject(project.id),
-      frozen: await store.frozenPredictions.ofProject(project.id),
-    }),
-    [project.id],
-  );
-  const { value, error } = useStored(ask, shared);
+  const [filter, setFilter] = useState('');
+  const ask = useCallback((store: Store) => store.measurements.ofProject(project.id), [project.id]);
+  const { value, error } = useStored(ask, tables);
+  const lines = useMemo(() => {
+    const formulas = new Map<string, string>();
+    const formulaOf = (id: string): string => {
+      const known = formulas.get(id);
+      if (known !== undefined) return known;
+      const made = complexFormula(rows.get(id)!.composition, library);
+      formulas.set(id, made);
+      return made;
+    };
+    return (value ?? [])
+      .filter(({ candidateId }) => rows.get(candidateId)?.deletedAt === null)
+      .map((each) => lineOf(each, formulaOf(each.candidateId)));
+  }, [value, rows, library]);
+  const shown = useMemo(() => {
+    const wanted = filter.toLowerCase().split(/\s+/).filter(Boolean);
+    return wanted.length === 0
+      ? lines
+      : lines.filter(({ words }) => wanted.every((word) => words.includes(word)));
+  }, [lines, filter]);
   if (error !== null)
     return (
       <ErrorPanel
@@ -34,51 +59,87 @@ export function ProjectRecord() {
       />
     );
   if (!value) return <p className="soft">Opening…</p>;
-  const pairs = value.measurements
-    // Measurements of a candidate in the bin are in the bin with it.
-    .filter(({ candidateId }) => rows.get(candidateId)?.deletedAt === null)
-    .flatMap((each) => pairsOf(each, value.frozen.get(each.frozenPredictionId ?? '') ?? null));
-  if (pairs.length === 0)
+  if (lines.length === 0)
     return (
-      <EmptyState title="No pair yet">
-        Choose a candidate above and add a measured band: it is held against the prediction frozen before.
+      <EmptyState title="Nothing measured yet">
+        Choose a candidate above, then import a spectrum or type what was read off. Its prediction is frozen
+        first, so that the comparison is honest.
       </EmptyState>
     );
-  const nameOf = (id: string): string => complexFormula(rows.get(id)!.composition, library);
-  const counted = countedPairs(pairs);
   return (
     <section className="panel stack" aria-labelledby="record-whole">
-      <h2 id="record-whole">The whole project</h2>
-      <AgreementFigures pairs={pairs} />
-      {counted.length > 0 && (
-        <ParityPlot
-          quantity="band position"
-          pairs={counted.map(({ id, candidateId, predicted, measured, u }) => ({
-            id,
-            name: `${nameOf(candidateId)} ${predicted.label}`,
-            predicted: predicted.energy_cm1,
-            sigma: predicted.sigma_cm1,
-            measured,
-            u,
-            group: rows.get(candidateId)!.composition.metal,
-          }))}
-          onOpen={(id) =>
-            go({
-              view: 'record',
-              project: project.id,
-              item: pairs.find((pair) => pair.id === id)!.candidateId,
-            })
-          }
-        />
-      )}
-      <PairTable
-        pairs={pairs}
-        complexOf={({ candidateId }) => (
-          <a href={linkTo({ view: 'record', project: project.id, item: candidateId })}>
-            <Formula formula={nameOf(candidateId)} />
-          </a>
+      <div className="record-head">
+        <h2 id="record-whole">{counted(lines.length, 'measurement')}</h2>
+        <a className="button" href={linkTo({ view: 'agreement', project: project.id })}>
+          Agreement of all
+        </a>
+      </div>
+      <Field label="Show only" hint="words of formula, kind, solvent, instrument, batch, initials or date">
+        {(attributes) => (
+          <input
+            {...attributes}
+            type="search"
+            value={filter}
+            onChange={(event) => setFilter(event.currentTarget.value)}
+          />
         )}
-      />
+      </Field>
+      <p className="soft" role="status">
+        {shown.length === lines.length ? 'All shown.' : `${shown.length} of ${lines.length} shown.`}
+      </p>
+      <MeasurementLines lines={shown} projectId={project.id} />
     </section>
   );
+}
+
+function MeasurementLines({
+  lines,
+  projectId,
+}: {
+  readonly lines: readonly Line[];
+  readonly projectId: string;
+}) {
+  const scroller = useRef<HTMLDivElement>(null);
+  // Its functions are new with each draw by design; nothing here is memoised by a compiler.
+  // eslint-disable-next-line react-hooks/incompatible-library
+  const virtual = useVirtualizer({
+    count: lines.length,
+    getScrollElement: () => scroller.current,
+    estimateSize: () => rowHeight,
+    overscan: 8,
+    getItemKey: (place) => lines[place]!.id,
+  });
+  return (
+    <div ref={scroller} className="record-lines" role="group" aria-label="Measurements" tabIndex={0}>
+      <ul style={{ blockSize: virtual.getTotalSize() }}>
+        {virtual.getVirtualItems().map(({ index, start }) => {
+          const line = lines[index]!;
+          return (
+            <li key={line.id} style={{ transform: `translateY(${start}px)`, blockSize: rowHeight }}>
+              <a href={linkTo({ view: 'record', project: projectId, item: line.candidateId })}>
+                <Formula formula={line.formula} />
+              </a>
+              <span className="record-line-text">{line.text}</span>
+              <span className="soft">{line.when}</span>
+            </li>
+          );
+        })}
+      </ul>
+    </div>
+  );
+}
+
+function lineOf(measurement: Measurement, formula: string): Line {
+  const content = currentContent(measurement);
+  const { date, solvent, instrument, operator } = content.conditions;
+  const when = dayOf(date ?? measurement.createdAt);
+  const text = contentText(content);
+  return {
+    id: measurement.id,
+    candidateId: measurement.candidateId,
+    formula,
+    text,
+    when,
+    words: [formula, text, content.kind, solvent, instrument, operator, date, when].join(' ').toLowerCase(),
+  };
 }

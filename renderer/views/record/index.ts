@@ -6,6 +6,7 @@ export const recordView = defineView({
   title: 'Lab record',
   place: 'project',
   order: 3,
+  command: 'show-record',
   keys: 'g r',
   hint: 'Measurements of each candidate beside what was predicted before them',
   component: lazy(() => import('./RecordView')),
