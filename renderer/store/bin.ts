@@ -1,5 +1,7 @@
 import { tableOf } from '../../core/record/bundle/tables';
-import type { Candidate, Project } from '../../core/record/project';
+import type { Measurement } from '../../core/record/measurement';
+import type { Candidate, FrozenPrediction, Project } from '../../core/record/project';
+import type { Sample } from '../../core/record/sample';
 import type { SpinhueDatabase } from './database';
 import type { Journal } from './journal/journal';
 import {
@@ -14,10 +16,22 @@ import {
 
 export const keptInBin_days = 30;
 
+/** A record of the laboratory in the bin, with the candidate that it is about. */
+export type BinRecord = (
+  | { readonly table: 'measurements'; readonly row: Measurement }
+  | { readonly table: 'samples'; readonly row: Sample }
+  | { readonly table: 'frozenPredictions'; readonly row: FrozenPrediction }
+) & { readonly candidate: Candidate; readonly projectName: string };
+
+const labTables = ['measurements', 'samples', 'frozenPredictions'] as const;
+const nounOf = { measurements: 'measurement', samples: 'batch', frozenPredictions: 'frozen prediction' };
+
 export interface BinContent {
   readonly projects: readonly Project[];
   /** Of projects that are not in the bin themselves. */
   readonly candidates: readonly (Candidate & { readonly projectName: string })[];
+  /** Of projects that are not in the bin themselves. */
+  readonly records: readonly BinRecord[];
 }
 
 /** What was deleted and can still be brought back. */
@@ -42,7 +56,39 @@ export class Bin {
         .filter((each) => names.has(each.projectId))
         .map((each) => ({ ...each, projectName: names.get(each.projectId)! }))
         .sort(latestFirst),
+      records: await this.#records(names),
     };
+  }
+
+  async #records(names: ReadonlyMap<string, string>): Promise<BinRecord[]> {
+    const found = await Promise.all(
+      labTables.map(async (table) => {
+        // Null is no key, so that this index holds the rows in the bin and no others.
+        const rows = await this.#db.table<BinRecord['row']>(table).where('deletedAt').above('').toArray();
+        return rows.map((row) => ({ table, row }) as Pick<BinRecord, 'table' | 'row'>);
+      }),
+    );
+    const records = found.flat().filter(({ row }) => names.has(row.projectId));
+    const candidates = await this.#db.candidates.bulkGet(records.map(({ row }) => row.candidateId));
+    return records
+      .map((each, i) => ({ ...each, candidate: candidates[i], projectName: names.get(each.row.projectId)! }))
+      .filter((each): each is BinRecord => each.candidate !== undefined)
+      .sort((one, other) => latestFirst(one.row, other.row));
+  }
+
+  /** Brings a record back, with the candidate, batch and frozen prediction that it rests on, as one step. */
+  restore({ table, row }: BinRecord): Promise<void> {
+    return this.#journal.record(row.projectId, `bring back a ${nounOf[table]}`, async (writer) => {
+      const wanted: { table: RecordTable; row: AnyRow }[] = [{ table, row }];
+      for (let next = wanted.pop(); next; next = wanted.pop()) {
+        await writer.updateMany(next.table, [next.row.id], () => ({ deletedAt: null }));
+        for (const link of tableOf(next.table).links(next.row)) {
+          const name = link.table as RecordTable;
+          const rests = link.id === null ? undefined : await this.#db.table<AnyRow>(name).get(link.id);
+          if (rests && rests.deletedAt !== null) wanted.push({ table: name, row: rests });
+        }
+      }
+    });
   }
 
   /** Removes for good what has lain in the bin for thirty days; gives how many rows went. */
@@ -61,7 +107,6 @@ export class Bin {
       const doomed = new Map<string, { table: RecordTable; row: AnyRow }>();
       let fresh: { table: RecordTable; row: AnyRow }[] = [];
       for (const table of recordTables) {
-        // Null is no key, so that this index holds the rows in the bin and no others.
         const rows = await db.table<AnyRow>(table).where('deletedAt').below(deletedBefore).toArray();
         fresh.push(...rows.map((row) => ({ table, row })));
       }

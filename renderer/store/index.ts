@@ -1,4 +1,4 @@
-export { keptInBin_days, type BinContent } from './bin';
+export { keptInBin_days, type BinContent, type BinRecord } from './bin';
 export { drafts } from './drafts';
 export type { EstimateCache } from './estimateCache';
 export { exportProject, fileNameFor, projectContent } from './exchange/exportProject';

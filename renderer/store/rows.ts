@@ -23,6 +23,7 @@ export type ContentTable = (typeof contentTables)[number];
 /** Rows that outlive the undoing of their creation: they go to the bin instead of vanishing. */
 export const appendOnlyTables: ReadonlySet<RecordTable> = new Set<RecordTable>([
   'frozenPredictions',
+  'samples',
   'measurements',
 ]);
 

@@ -1,11 +1,9 @@
-import { complexFormula } from '../../../core/library/complexFormula';
-import { defaultLibrary } from '../../../core/library/parameterLibrary';
 import { minuteOf, useAction, useStore } from '../../app/services';
 import { Formula } from '../../parts';
-import { type BinContent } from '../../store';
+import type { BinEntry } from './binEntries';
 
 /** What lies in the bin, latest first, each with its way back. */
-export function BinTable({ content }: { readonly content: BinContent }) {
+export function BinTable({ entries }: { readonly entries: readonly BinEntry[] }) {
   const store = useStore();
   const act = useAction();
   return (
@@ -21,34 +19,18 @@ export function BinTable({ content }: { readonly content: BinContent }) {
         </tr>
       </thead>
       <tbody>
-        {content.projects.map((project) => (
-          <tr key={project.id}>
-            <td>{minuteOf(project.deletedAt!)}</td>
-            <td>Project “{project.name}”</td>
-            <td>–</td>
+        {entries.map(({ id, deletedAt, what, formula, from, restore }) => (
+          <tr key={id}>
+            <td>{minuteOf(deletedAt)}</td>
+            <td>
+              {formula !== null && <Formula formula={formula} />} {what}
+            </td>
+            <td>{from ?? '–'}</td>
             <td>
               <button
                 type="button"
-                onClick={() => void act(() => store.projects.restore(project.id))}
-                aria-label={`Bring back the project ${project.name}`}
-              >
-                Bring back
-              </button>
-            </td>
-          </tr>
-        ))}
-        {content.candidates.map((candidate) => (
-          <tr key={candidate.id}>
-            <td>{minuteOf(candidate.deletedAt!)}</td>
-            <td>
-              <Formula formula={complexFormula(candidate.composition, defaultLibrary)} /> {candidate.name}
-            </td>
-            <td>{candidate.projectName}</td>
-            <td>
-              <button
-                type="button"
-                onClick={() => void act(() => store.candidates.restore(candidate.projectId, [candidate.id]))}
-                aria-label={`Bring back ${complexFormula(candidate.composition, defaultLibrary)}`}
+                onClick={() => void act(() => restore(store))}
+                aria-label={`Bring back ${[formula, what].filter(Boolean).join(' ')}`}
               >
                 Bring back
               </button>

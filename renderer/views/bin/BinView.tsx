@@ -1,18 +1,21 @@
-import { useState } from 'react';
+import { useMemo, useState } from 'react';
 import { ConfirmDialog } from '../../app/form';
 import { useAction, useStored, useStore } from '../../app/services';
 import { ViewHeader } from '../../app/shell/ViewHeader';
 import { EmptyState, ErrorPanel, useToast } from '../../parts';
 import { counted, keptInBin_days, type Store } from '../../store';
+import { binEntries } from './binEntries';
 import { BinTable } from './BinTable';
 
 const binContent = (store: Store) => store.bin.content();
+const shown = ['projects', 'candidates', 'measurements', 'samples', 'frozenPredictions'] as const;
 
 export default function BinView() {
-  const { value: content, error } = useStored(binContent, ['projects', 'candidates']);
+  const { value: content, error } = useStored(binContent, shown);
   const [asking, setAsking] = useState(false);
   const empty = useEmptyBin();
-  const count = content ? content.projects.length + content.candidates.length : 0;
+  const entries = useMemo(() => (content ? binEntries(content) : []), [content]);
+  const count = entries.length;
   return (
     <>
       <ViewHeader
@@ -35,7 +38,7 @@ export default function BinView() {
       {content && count === 0 && (
         <EmptyState title="The bin is empty">Nothing was deleted lately.</EmptyState>
       )}
-      {content && count > 0 && <BinTable content={content} />}
+      {count > 0 && <BinTable entries={entries} />}
       <ConfirmDialog
         open={asking}
         title="Empty the bin?"
@@ -44,8 +47,9 @@ export default function BinView() {
         onClose={() => setAsking(false)}
       >
         <p>
-          {counted(content?.projects.length ?? 0, 'project')} with all they hold and{' '}
-          {counted(content?.candidates.length ?? 0, 'candidate')} would be gone. This cannot be undone.
+          {counted(content?.projects.length ?? 0, 'project')} with all they hold,{' '}
+          {counted(content?.candidates.length ?? 0, 'candidate')} with their measurements and{' '}
+          {counted(content?.records.length ?? 0, 'single record')} would be gone. This cannot be undone.
           Records that measurements elsewhere depend on stay.
         </p>
       </ConfirmDialog>
