@@ -133,10 +133,13 @@ function checkOrdinates(y: readonly (number | null)[], scaling: Scaling, warning
   }
 }
 
+/** A printed number is taken as it stands; only multiplying brings in digits that the file does not have. */
+const scaledBy = (value: number, factor: number): number => (factor === 1 ? value : tidy(value * factor));
+
 function scaleY(ordinates: readonly (number | null)[], factor: number): (number | null)[] {
   return ordinates.map((value) => {
     if (value === null) return null;
-    const scaled = tidy(value * factor);
+    const scaled = scaledBy(value, factor);
     if (!Number.isFinite(scaled)) throw new ReadingError('bad-number', 'an ordinate is too large');
     return scaled === 0 ? 0 : scaled;
   });
@@ -184,7 +187,7 @@ export function readNumbers(
 
   const data = decodePairs(dataLines(record), form.columns, limit);
   if (data.x.length === 0) throw new ReadingError('too-few-points', `line ${record.line}: no points`);
-  const x = data.x.map((value) => tidy(value * scaling.xFactor));
+  const x = data.x.map((value) => scaledBy(value, scaling.xFactor));
   const y = scaleY(data.y, scaling.yFactor);
   if (scaling.points !== undefined && scaling.points !== x.length) {
     const ends =
@@ -218,7 +221,7 @@ export function withUnits(
   yLabel: string,
 ): Pick<ReadSpectrum, 'kind' | 'x' | 'y' | 'fileOrder' | 'xUnit' | 'yUnit'> {
   const { unit, factor } = xUnitOf(xLabel);
-  const x = factor === 1 ? numbers.x : numbers.x.map((value) => tidy(value * factor));
+  const x = numbers.x.map((value) => scaledBy(value, factor));
   return { ...numbers, x, xUnit: unit, yUnit: yUnitOf(yLabel) };
 }
 

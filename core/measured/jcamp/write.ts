@@ -1,5 +1,6 @@
 import { SpinhueError } from '../../errors';
 import type { CurveData } from '../../record/curve';
+import { tidy } from '../reading/order';
 
 export interface JcampHeader {
   readonly title: string;
@@ -21,32 +22,30 @@ const yUnits = {
 const oneLine = (text: string): string =>
   text.replace(/\s+/g, ' ').replaceAll('##', '# #').replaceAll('$$', '$ $').trim();
 
-/** Decimal factor under which all ordinates are whole numbers of at most nine digits, exactly where that is possible. */
-function yFactorDigits(values: readonly number[]): number {
+/** Decimal factor under which all ordinates are whole numbers of at most nine digits; null where there is none. */
+function yFactorDigits(values: readonly number[]): number | null {
   const largest = Math.max(...values.map(Math.abs), 1e-300);
-  const most = Math.max(0, 9 - Math.ceil(Math.log10(largest)));
-  for (let digits = 0; digits < most; digits++) {
-    const scale = 10 ** digits;
-    if (
-      values.every((value) => Math.abs(Math.round(value * scale) / scale - value) <= 1e-15 * Math.abs(value))
-    )
-      return digits;
+  const most = Math.min(15, Math.max(0, 9 - Math.ceil(Math.log10(largest))));
+  for (let digits = 0; digits <= most; digits++) {
+    const factor = Number(`1e-${digits}`);
+    if (values.every((value) => tidy(Math.round(value * 10 ** digits) * factor) === value)) return digits;
   }
-  return Math.min(most, 15);
+  return null;
 }
 
-/** Spacing of an evenly spaced axis, null for an uneven one. */
+/** Spacing of an axis that the reader lays out again exactly from its ends and its count, null for any other. */
 function spacing(x: readonly number[]): number | null {
   const step = (x.at(-1)! - x[0]!) / (x.length - 1);
-  return x.every((value, i) => Math.abs(value - (x[0]! + i * step)) <= 1e-7 * Math.abs(step)) ? step : null;
+  return x.every((value, i) => value === tidy(x[0]! + i * step, 13)) ? step : null;
 }
 
-const number = (value: number): string => String(Number(value.toPrecision(12)));
+const rounded = (value: number): string => String(tidy(value, 12));
 
 /**
  * A spectrum as JCAMP-DX 4.24 (R. S. McDonald, P. A. Wilks Jr., Appl. Spectrosc. 42, 151, 1988): `XYDATA` in AFFN form for
- * an even axis, `XYPOINTS` for an uneven one, `PEAK TABLE` for peaks; missing points as `?`. Throws a SpinhueError where
- * the units are not known: the format demands them.
+ * an even axis and ordinates of at most nine digits, `XYPOINTS` for all other curves, `PEAK TABLE` for peaks; missing points
+ * as `?`. No digit is lost: what is read again is the same, number by number. Throws a SpinhueError where the units are not
+ * known: the format demands them.
  */
 export function writeJcamp(curve: CurveData, header: JcampHeader): string {
   if (curve.xUnit === 'unknown' || curve.yUnit === 'unknown') {
@@ -60,7 +59,7 @@ export function writeJcamp(curve: CurveData, header: JcampHeader): string {
   const { x, y } = curve;
   const known = y.filter((value) => value !== null);
   const digits = yFactorDigits(known);
-  const step = curve.kind === 'curve' && x.length > 2 ? spacing(x) : null;
+  const step = curve.kind === 'curve' && x.length > 2 && digits !== null ? spacing(x) : null;
   const peaks = curve.kind === 'peaks';
   const lines = [
     `##TITLE=${oneLine(header.title)}`,
@@ -74,22 +73,21 @@ export function writeJcamp(curve: CurveData, header: JcampHeader): string {
     `##XUNITS=${xUnits[curve.xUnit]}`,
     `##YUNITS=${yUnits[curve.yUnit]}`,
     '##XFACTOR=1',
-    `##YFACTOR=${step === null ? 1 : Number(`1e-${digits}`)}`,
-    `##FIRSTX=${number(x[0]!)}`,
-    `##LASTX=${number(x.at(-1)!)}`,
-    ...(step === null ? [] : [`##DELTAX=${number(step)}`]),
-    ...(y[0] === null || peaks ? [] : [`##FIRSTY=${number(y[0]!)}`]),
+    `##YFACTOR=${step === null || digits === null ? 1 : Number(`1e-${digits}`)}`,
+    `##FIRSTX=${x[0]!}`,
+    `##LASTX=${x.at(-1)!}`,
+    ...(step === null ? [] : [`##DELTAX=${rounded(step)}`]),
+    ...(y[0] === null || peaks ? [] : [`##FIRSTY=${y[0]!}`]),
     `##NPOINTS=${x.length}`,
   ];
-  if (step === null) {
+  if (step === null || digits === null) {
     lines.push(peaks ? '##PEAK TABLE=(XY..XY)' : '##XYPOINTS=(XY..XY)');
-    for (const [i, value] of x.entries())
-      lines.push(`${number(value)}, ${y[i] === null ? '?' : number(y[i]!)}`);
+    for (const [i, value] of x.entries()) lines.push(`${value}, ${y[i] ?? '?'}`);
   } else {
     lines.push('##XYDATA=(X++(Y..Y))');
     const scale = 10 ** digits;
     for (let i = 0; i < x.length;) {
-      let line = number(x[i]!);
+      let line = rounded(x[i]!);
       // Lines of the standard hold at most 80 characters.
       while (i < x.length) {
         const value = y[i]!;
