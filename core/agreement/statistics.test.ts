@@ -27,6 +27,18 @@ describe('shares', () => {
     expect(interval95[1]).toBeCloseTo(0.955, 2);
   });
 
+  // Table I of R. G. Newcombe, Stat. Med. 17 (1998) 857, score method without continuity correction (from memory).
+  it.each([
+    [81, 263, 0.2553, 0.3662],
+    [15, 148, 0.0624, 0.1605],
+    [0, 20, 0, 0.1611],
+    [1, 29, 0.0061, 0.1718],
+  ])('of %i in %i lie between the published limits', (hits, of, low, high) => {
+    const [lower, upper] = wilsonInterval(hits, of);
+    expect(lower).toBeCloseTo(low, 4);
+    expect(upper).toBeCloseTo(high, 4);
+  });
+
   it('claim nothing from no trials', () => {
     expect(wilsonInterval(0, 0)).toEqual([0, 1]);
     expect(shareOf(0, 0).share).toBeNull();
@@ -38,6 +50,17 @@ describe('spin forecasts', () => {
     const always = [true, false, true].map((happened) => ({ probability: 0.5, happened }));
     expect(brierScore(always)).toBe(0.25);
     expect(brierScore([{ probability: 1, happened: true }])).toBe(0);
+  });
+
+  it('score 0.0375 in the worked example of scikit-learn for its Brier score', () => {
+    // Outcomes 0, 1, 1, 0 forecast with 0.1, 0.9, 0.8, 0.3: documentation of sklearn.metrics.brier_score_loss.
+    const forecasts = [
+      { probability: 0.1, happened: false },
+      { probability: 0.9, happened: true },
+      { probability: 0.8, happened: true },
+      { probability: 0.3, happened: false },
+    ];
+    expect(brierScore(forecasts)).toBeCloseTo(0.0375, 12);
   });
 
   it('fill a confusion table', () => {
@@ -72,5 +95,16 @@ describe('predicted beside measured', () => {
     expect(points[2]).toEqual({ mean: 11.5, difference: 3 });
     expect(bias).toBe(1);
     expect(limits[1]).toBeCloseTo(1 + 1.96 * 2, 12);
+  });
+
+  it('finds the published bias and limits between two flow meters', () => {
+    // First readings of 17 people with a large and a small peak flow meter, l/min (Bland and Altman, Lancet 327, 1986,
+    // 307, Table 1): mean difference -2.1, standard deviation 38.8. The paper draws two of them; 1.96 are drawn here.
+    const large = [494, 395, 516, 434, 476, 557, 413, 442, 650, 433, 417, 656, 267, 478, 178, 423, 427];
+    const small = [512, 430, 520, 428, 500, 600, 364, 380, 658, 445, 432, 626, 260, 477, 259, 350, 451];
+    const { bias, limits } = blandAltman(large.map((predicted, i) => ({ predicted, measured: small[i]! })));
+    expect(bias).toBeCloseTo(-2.1, 1);
+    expect((limits[1] - bias) / 1.96).toBeCloseTo(38.8, 1);
+    expect((bias - limits[0]) / 1.96).toBeCloseTo(38.8, 1);
   });
 });
