@@ -139,3 +139,30 @@ test('an import is preceded by a snapshot of what it changes', async ({ page, si
     })
     .toContainEqual(expect.stringContaining('before-import'));
 });
+
+test('a database that the browser threw away is filled again from the folder of copies', async ({
+  page,
+  site,
+}) => {
+  await page.goto(site.server.windowAddress());
+  await openCandidate(page, 'Thrown away');
+  await notesField(page).fill('written before the loss');
+  await notesField(page).blur();
+  await expect(page.getByText('Saved.', { exact: true })).toBeVisible();
+  const candidate = page.url();
+  // The copy is never more than two seconds behind.
+  await page.waitForTimeout(2500);
+  await page.goto(`${site.server.origin}/licences.txt`);
+  await page.evaluate(
+    () =>
+      new Promise<void>((resolve, reject) => {
+        const request = indexedDB.deleteDatabase('spinhue');
+        request.onsuccess = () => resolve();
+        request.onerror = () => reject(request.error);
+      }),
+  );
+  await page.goto(site.server.windowAddress());
+  await expect(page.getByText(/brought back from the folder of copies/)).toBeVisible();
+  await page.goto(candidate);
+  await expect(notesField(page)).toHaveValue('written before the loss');
+});

@@ -1,5 +1,5 @@
 import { useEffect, useMemo, type ReactNode } from 'react';
-import { ToastProvider, UnitProvider } from '../parts';
+import { ToastProvider, UnitProvider, useToast } from '../parts';
 import type { Settings } from '../store';
 import { CommandProvider } from './commands';
 import { ExchangeProvider } from './exchange/ExchangeContext';
@@ -15,12 +15,15 @@ interface AppProps {
   readonly services: Services;
   readonly settings: Settings;
   readonly views: readonly ViewDefinition[];
+  /** Something that happened before the first view was drawn. */
+  readonly notice: string | null;
 }
 
-export function App({ services, settings, views }: AppProps) {
+export function App({ services, settings, views, notice }: AppProps) {
   return (
     <ServicesProvider value={services}>
       <ToastProvider>
+        <StartNotice notice={notice} />
         <SettingsProvider initial={settings}>
           <RouterProvider>
             <Chosen>
@@ -35,6 +38,14 @@ export function App({ services, settings, views }: AppProps) {
       </ToastProvider>
     </ServicesProvider>
   );
+}
+
+function StartNotice({ notice }: { readonly notice: string | null }) {
+  const toast = useToast();
+  useEffect(() => {
+    if (notice !== null) toast({ message: notice });
+  }, [toast, notice]);
+  return null;
 }
 
 /** What follows from the settings and the address. */

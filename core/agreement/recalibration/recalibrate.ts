@@ -109,7 +109,7 @@ function judge(
   if (count < fewestComplexes || loo === null) {
     return {
       adopt: false,
-      statement: `${name}: ${count} complexes with an estimate; fewer than ${fewestComplexes} decide nothing`,
+      statement: `${name}: ${count} ${count === 1 ? 'complex' : 'complexes'} with an estimate; fewer than ${fewestComplexes} decide nothing`,
     };
   }
   const words = `leave-one-out error of ${name} over ${loo.n} complexes ${percent(loo.before)} before, ${percent(loo.after)} after`;

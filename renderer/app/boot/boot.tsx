@@ -7,6 +7,7 @@ import { bulkWorkers, startEstimateWorker } from '../../workers/startWorker';
 import { App } from '../App';
 import { followTheme } from '../services';
 import type { ViewDefinition } from '../view';
+import { bringBackLost, broughtBackWords } from './bringBackLost';
 import { warmUpSamples } from './warmUpSamples';
 import { loadDemoOnce } from './demo';
 import { StartFailure } from './StartFailure';
@@ -24,10 +25,18 @@ async function start(root: Root, host: Host, views: readonly ViewDefinition[]): 
     const store = await openStore({ onTakenOver: () => void host.reload() });
     void askForLastingStorage();
     void tidy(store);
+    const broughtBack = await bringBackLost(store, host);
     await loadDemoOnce(store);
     const settings = await store.settings.read();
     const pool = new EstimatePool(startEstimateWorker, bulkWorkers());
-    root.render(<App services={{ store, host, pool }} settings={settings} views={views} />);
+    root.render(
+      <App
+        services={{ store, host, pool }}
+        settings={settings}
+        views={views}
+        notice={broughtBack && broughtBackWords(broughtBack)}
+      />,
+    );
     requestIdleCallback(() => {
       void pool.warmUp(warmUpSamples);
       for (const { preload } of views) void preload?.().catch(() => undefined);

@@ -1,5 +1,5 @@
 import type { ReactNode } from 'react';
-import { formatFigures, NumberWithRange, TermSymbol } from '../../parts';
+import { MeasuredNumber, NumberWithRange, TermSymbol } from '../../parts';
 import type { BandPair } from './recordPairs';
 
 interface PairTableProps {
@@ -8,7 +8,7 @@ interface PairTableProps {
   readonly complexOf?: (pair: BandPair) => ReactNode;
 }
 
-const signed = (value: number, figures = 3): string => (value > 0 ? '+' : '') + formatFigures(value, figures);
+const signed = (value: number, digits: number): string => (value > 0 ? '+' : '') + value.toFixed(digits);
 
 function remarkOf({ feature, predicted, frozenAfterwards, isInSample }: BandPair): string {
   if (predicted === null) return 'no predicted band near it';
@@ -53,11 +53,11 @@ export function PairTable({ pairs, complexOf }: PairTableProps) {
                 )}
               </td>
               <td>
-                <NumberWithRange value={pair.measured} sigma={pair.u} figures={4} />
+                <MeasuredNumber value={pair.measured} u={pair.u} />
               </td>
               <td>{pair.feature}</td>
-              <td className="figures">{pair.residual === null ? '–' : `${signed(pair.residual)} cm⁻¹`}</td>
-              <td className="figures">{pair.score === null ? '–' : signed(pair.score, 2)}</td>
+              <td className="figures">{pair.residual === null ? '–' : `${signed(pair.residual, 0)} cm⁻¹`}</td>
+              <td className="figures">{pair.score === null ? '–' : signed(pair.score, 1)}</td>
               <td className="soft small">{remarkOf(pair)}</td>
             </tr>
           ))}

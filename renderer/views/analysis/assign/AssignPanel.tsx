@@ -4,7 +4,7 @@ import { recordAssignment } from '../../../../core/measured/records';
 import type { AssignedBand } from '../../../../core/record/analysis';
 import type { FrozenPrediction } from '../../../../core/record/project';
 import { bandsOf } from '../../agreement/recordPairs';
-import { formatFigures, NumberWithRange, TermSymbol } from '../../../parts';
+import { formatFigures, MeasuredNumber, NumberWithRange, TermSymbol } from '../../../parts';
 import type { NamedBand } from './measuredBands';
 
 interface AssignPanelProps {
@@ -109,7 +109,7 @@ export function AssignPanel({ measured, frozen, kept, onSave }: AssignPanelProps
                   }}
                 >
                   <th scope="row">
-                    <NumberWithRange value={band.energy_cm1} sigma={band.u_cm1} figures={4} />
+                    <MeasuredNumber value={band.energy_cm1} u={band.u_cm1} />
                   </th>
                   <td>{band.feature}</td>
                   <td>

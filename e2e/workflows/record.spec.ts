@@ -1,0 +1,188 @@
+/** A measured spectrum from the file to parameters that have learnt from it, and back again. */
+import AxeBuilder from '@axe-core/playwright';
+import type { Page } from '@playwright/test';
+import { readFile } from 'node:fs/promises';
+import { test } from '../workbench';
+import { arrived, expect } from './steps';
+
+const tags = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice'];
+async function accessible(page: Page, state: string): Promise<void> {
+  const { violations } = await new AxeBuilder({ page }).withTags(tags).analyze();
+  expect
+    .soft(
+      violations.map(({ id, nodes }) => `${id}: ${nodes[0]?.html.slice(0, 200)}`),
+      state,
+    )
+    .toEqual([]);
+}
+
+/**
+ * Absorbance of 50 mM hexaaquachromium(III) in 1 cm: two Gaussians at the maxima that textbooks print, 17 400 and
+ * 24 600 cm-1 (C. E. Housecroft, A. G. Sharpe, Inorganic Chemistry), with a ripple in place of noise.
+ */
+const spectrum = (): string => {
+  const lines = ['Wavelength (nm),Absorbance'];
+  for (let nm = 330; nm <= 800; nm++) {
+    const at = 1e7 / nm;
+    const band = (centre: number, width: number, height: number) =>
+      height * Math.exp(-4 * Math.LN2 * ((at - centre) / width) ** 2);
+    const ripple = 0.004 * (((nm * 7919) % 101) / 101 - 0.5);
+    lines.push(`${nm},${(band(17_400, 3600, 0.67) + band(24_600, 4000, 0.77) + ripple).toFixed(5)}`);
+  }
+  return lines.join('\n');
+};
+
+/** Drops a file of that content on the open record. */
+async function drop(page: Page, name: string, text: string): Promise<void> {
+  const data = await page.evaluateHandle(
+    ([fileName, content]) => {
+      const transfer = new DataTransfer();
+      transfer.items.add(new File([content!], fileName!, { type: 'text/csv' }));
+      return transfer;
+    },
+    [name, text],
+  );
+  const area = page.locator('.drop-area');
+  await area.dispatchEvent('dragover', { dataTransfer: data });
+  await area.dispatchEvent('drop', { dataTransfer: data });
+}
+
+/** Rows of a table as they are stored. */
+const stored = (page: Page, table: string): Promise<Record<string, unknown>[]> =>
+  page.evaluate(async (name) => {
+    const db = await new Promise<IDBDatabase>((resolve) => {
+      const request = indexedDB.open('spinhue');
+      request.onsuccess = () => resolve(request.result);
+    });
+    const rows = await new Promise<Record<string, unknown>[]>((resolve) => {
+      const request = db.transaction(name).objectStore(name).getAll();
+      request.onsuccess = () => resolve(request.result as Record<string, unknown>[]);
+    });
+    db.close();
+    return rows;
+  }, table);
+
+test('a dropped spectrum is kept, treated, fitted, assigned; its field is fitted and the parameters learn', async ({
+  workbench: page,
+}) => {
+  test.setTimeout(180_000);
+  await arrived(page);
+  await page.getByRole('link', { name: /^Open Demo/ }).click();
+  await page.getByText('41 candidates').waitFor();
+  await page.keyboard.press('g');
+  await page.keyboard.press('r');
+  await expect(page.getByRole('heading', { name: 'Nothing measured yet' })).toBeVisible();
+  await accessible(page, 'empty record');
+  const candidates = page.getByLabel('Candidate');
+  const names = await candidates.locator('option').allTextContents();
+  await candidates.selectOption({ index: names.findIndex((name) => name.includes('[Cr(H2O)6]3+')) });
+  await expect(page.getByRole('button', { name: 'Add measurement…' })).toBeEnabled();
+
+  await drop(page, 'aqua.csv', spectrum());
+  const dialog = page.getByRole('dialog', { name: 'Import a spectrum' });
+  await expect(dialog.getByText(/471 points, nm, absorbance/)).toBeVisible();
+  await expect(dialog.getByText(/No prediction is frozen yet/)).toBeVisible();
+  await accessible(page, 'import preview');
+  await dialog.getByLabel('Concentration').fill('50');
+  await dialog.getByLabel('Path length').fill('1');
+  await dialog.getByLabel('Initials').fill('MK');
+  await dialog.getByRole('button', { name: 'Keep the spectrum' }).click();
+  await expect(page.getByText('Prediction frozen, then spectrum kept')).toBeVisible();
+
+  await drop(page, 'again.csv', spectrum());
+  await expect(page.getByText(/This file is in the record already/)).toBeVisible();
+  await page.keyboard.press('Escape');
+  await drop(page, 'bare.txt', '400 0.1\n410 0.2\n420 0.3\n430 0.2\n440 0.1');
+  await page.getByRole('button', { name: 'Keep the spectrum' }).click();
+  await expect(page.getByText(/The file does not say what/).first()).toBeVisible();
+  await page.keyboard.press('Escape');
+  await drop(page, 'broken.jdx', '##TITLE=x\n##JCAMP-DX=4.24\n##DATA TYPE=UV-VIS SPECTRUM\n');
+  await expect(page.getByText('This file is refused')).toBeVisible();
+  await page.keyboard.press('Escape');
+
+  await page.getByRole('link', { name: 'Treat and fit…' }).click();
+  await page.getByRole('button', { name: 'Add a step…' }).click();
+  await page.getByLabel('Step', { exact: true }).selectOption('to molar absorptivity');
+  await page.getByRole('button', { name: 'Add the step' }).click();
+  await expect(page.getByRole('listitem').filter({ hasText: 'divided by 50 mM and 1 cm' })).toBeVisible();
+  await page.getByRole('button', { name: 'Suggest from the curve' }).click();
+  await page.getByRole('button', { name: 'Compare one to five bands' }).click();
+  await expect(page.getByText('(fewest that will do)')).toBeVisible();
+  await page.getByRole('row', { name: /^2/ }).getByRole('button', { name: 'Start from these' }).click();
+  await page.getByRole('button', { name: 'Fit', exact: true }).click();
+  await expect(page.getByText(/Fitted bands ± standard error; 471 points, status converged/)).toBeVisible();
+  await page.getByRole('button', { name: 'Keep this assignment' }).click();
+  await page.getByRole('button', { name: 'Fit the field to 2 bands' }).click();
+  await expect(page.getByText(/Fitted beside frozen prediction/)).toBeVisible();
+  await accessible(page, 'analysis');
+
+  // 10Dq is the first quartet band; B of the hexaaqua ion is 725 cm-1 in textbooks (17 400 and 24 600).
+  const [analysis] = (await stored(page, 'analyses')) as [
+    { fieldFit: { tenDq: { value: number }; B: { value: number } } },
+  ];
+  expect(Math.abs(analysis.fieldFit.tenDq.value - 17_400)).toBeLessThan(20);
+  expect(Math.abs(analysis.fieldFit.B.value - 725)).toBeLessThan(15);
+
+  await page.keyboard.press('Control+z');
+  await expect(page.getByText(/Fitted beside frozen prediction/)).toBeHidden();
+  await page.keyboard.press('Control+z');
+  await expect(page.getByRole('button', { name: 'Keep this assignment' })).toBeVisible();
+  await page.keyboard.press('Control+z');
+  await expect(page.getByText(/Fitted bands ± standard error/)).toBeHidden();
+  for (let step = 0; step < 3; step++) await page.keyboard.press('Control+Shift+z');
+  await expect(page.getByText(/Fitted beside frozen prediction/)).toBeVisible();
+
+  await page.keyboard.press('g');
+  await page.keyboard.press('a');
+  await page.getByRole('button', { name: 'Propose new parameters' }).click();
+  await page.getByLabel('Name of the parameter set').fill('First lot');
+  await page.getByLabel('Approved by').fill('MK');
+  await page.getByLabel('Reason').fill('own spectrum');
+  await accessible(page, 'agreement with a proposal');
+  const frozenBefore = await stored(page, 'frozenPredictions');
+  await page.getByRole('button', { name: 'Approve and use' }).click();
+  await expect(page.getByRole('radio', { name: /First lot/ })).toBeChecked();
+  expect(await stored(page, 'frozenPredictions')).toEqual(frozenBefore);
+  await page.getByRole('link', { name: 'Candidates', exact: true }).click();
+  await page.getByRole('link', { name: 'Cr H 2 O 6 charge 3 plus' }).click();
+  await expect(page.getByText(/^Made with First lot/)).toBeVisible();
+  await expect(page.getByText('measured on this very complex').first()).toBeVisible();
+
+  await page.keyboard.press('Control+z');
+  await expect(page.getByText(/^Made with library/)).toBeVisible();
+  await page.keyboard.press('Control+Shift+z');
+  await expect(page.getByText(/^Made with First lot/)).toBeVisible();
+
+  // Out, away, and in again: the same rows, and the raw file byte for byte.
+  const tables = ['measurements', 'analyses', 'curves', 'files', 'frozenPredictions', 'parameterSets'];
+  const before = await Promise.all(tables.map((table) => stored(page, table)));
+  const [download] = await Promise.all([
+    page.waitForEvent('download'),
+    page.keyboard.press('Control+Shift+e'),
+  ]);
+  const bundle = await readFile(await download.path());
+  await page.getByRole('link', { name: 'Projects', exact: true }).click();
+  await arrived(page);
+  await page.evaluate(async (names) => {
+    const db = await new Promise<IDBDatabase>((resolve) => {
+      const request = indexedDB.open('spinhue');
+      request.onsuccess = () => resolve(request.result);
+    });
+    const all = [...names, 'projects', 'candidates', 'samples', 'changes', 'edits', 'log'];
+    const writing = db.transaction(all, 'readwrite');
+    for (const name of all) writing.objectStore(name).clear();
+    await new Promise((resolve) => (writing.oncomplete = resolve));
+    db.close();
+  }, tables);
+  const [chooser] = await Promise.all([page.waitForEvent('filechooser'), page.keyboard.press('Control+o')]);
+  await chooser.setFiles({ name: 'demo.spinhue', mimeType: 'application/json', buffer: bundle });
+  await page
+    .getByRole('dialog')
+    .getByRole('button', { name: /^Import/ })
+    .click();
+  await expect(page.getByText('41 candidates')).toBeVisible();
+  const after = await Promise.all(tables.map((table) => stored(page, table)));
+  expect(after).toEqual(before);
+  const raw = (after[3]![0] as { base64: string }).base64;
+  expect(Buffer.from(raw, 'base64').toString('utf8')).toBe(spectrum());
+});
