@@ -30,11 +30,11 @@ const world = {
 
 const measuredComplexes = [
   chromium,
-  octahedral('Ni', 2, { im: 6 }),
+  octahedral('Cr', 3, { im: 4, h2o: 2 }),
   octahedral('V', 3, { im: 6 }),
-  octahedral('Ni', 2, { im: 3, h2o: 3 }),
+  octahedral('V', 3, { im: 3, h2o: 3 }),
   octahedral('Cr', 3, { im: 3, cl: 3 }),
-  octahedral('Ni', 2, { im: 4, h2o: 2 }),
+  octahedral('V', 3, { im: 3, cl: 3 }),
 ];
 /** Never measured, but with the ligand that the record teaches about. */
 const relative = octahedral('Co', 2, { im: 6 });
