@@ -1,11 +1,12 @@
-import { useCallback } from 'react';
+import { useCallback, useMemo } from 'react';
 import type { Measurement } from '../../../core/record/measurement';
 import { useStored } from '../../app/services';
+import { useVersion } from '../../app/session/observable';
 import { useProject } from '../../app/session/ProjectSession';
 import type { Store } from '../../store';
 import { type BandPair, informedBy, pairsOf } from './recordPairs';
 
-const tables = ['measurements', 'frozenPredictions', 'analyses', 'parameterSets', 'candidates'] as const;
+const tables = ['measurements', 'frozenPredictions', 'analyses', 'parameterSets'] as const;
 
 export interface RecordPairs {
   readonly pairs: readonly BandPair[];
@@ -17,23 +18,31 @@ export interface RecordPairs {
 /** Everything measured in the project beside what was predicted; candidates in the bin are left out. */
 export function useRecordPairs(): { readonly value: RecordPairs | undefined; readonly error: string | null } {
   const { project, rows } = useProject();
-  const ask = useCallback(
-    async (store: Store): Promise<RecordPairs> => {
-      const [all, frozen, analyses, sets] = await Promise.all([
-        store.measurements.ofProject(project.id),
-        store.frozenPredictions.ofProject(project.id),
-        store.analyses.ofProject(project.id),
-        store.parameterSets.of(project.id),
-      ]);
-      // Measurements of a candidate in the bin are in the bin with it.
-      const measurements = all.filter(({ candidateId }) => rows.get(candidateId)?.deletedAt === null);
-      const pairs = measurements.flatMap((each) => {
-        const prediction = frozen.get(each.frozenPredictionId ?? '') ?? null;
-        return pairsOf(each, prediction, analyses.get(each.id) ?? null, informedBy(sets, prediction));
-      });
-      return { pairs, measurements, frozen, analyses };
-    },
-    [project.id, rows],
-  );
-  return useStored(ask, tables);
+  const version = useVersion(rows);
+  const ask = useCallback((store: Store) => everything(store, project.id), [project.id]);
+  const { value: all, error } = useStored(ask, tables);
+  const value = useMemo(() => {
+    // After a change of parameters the rows are read anew; until then nobody knows which of them lie in the bin.
+    if (all === undefined || rows.state === 'reading') return undefined;
+    const kept = ({ candidateId }: { candidateId: string }): boolean =>
+      rows.get(candidateId)?.deletedAt === null;
+    return { ...all, measurements: all.measurements.filter(kept), pairs: all.pairs.filter(kept) };
+    // The rows change in place; their version says so.
+    // eslint-disable-next-line react-hooks/exhaustive-deps
+  }, [all, rows, rows.state, version]);
+  return { value, error };
+}
+
+async function everything(store: Store, projectId: string): Promise<RecordPairs> {
+  const [measurements, frozen, analyses, sets] = await Promise.all([
+    store.measurements.ofProject(projectId),
+    store.frozenPredictions.ofProject(projectId),
+    store.analyses.ofProject(projectId),
+    store.parameterSets.of(projectId),
+  ]);
+  const pairs = measurements.flatMap((each) => {
+    const prediction = frozen.get(each.frozenPredictionId ?? '') ?? null;
+    return pairsOf(each, prediction, analyses.get(each.id) ?? null, informedBy(sets, prediction));
+  });
+  return { pairs, measurements, frozen, analyses };
 }

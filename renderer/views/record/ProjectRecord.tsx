@@ -6,6 +6,7 @@ import { currentContent } from '../../../core/record/revisions';
 import { Field } from '../../app/form';
 import { linkTo } from '../../app/router/RouterContext';
 import { dayOf, useStored } from '../../app/services';
+import { useVersion } from '../../app/session/observable';
 import { useProject } from '../../app/session/ProjectSession';
 import { useLibrary } from '../../app/session/useLibrary';
 import { EmptyState, ErrorPanel, Formula } from '../../parts';
@@ -28,6 +29,7 @@ interface Line {
 /** All measurements of the project, newest first. Curves stay in the database until one is opened. */
 export function ProjectRecord() {
   const { project, rows } = useProject();
+  const version = useVersion(rows);
   const library = useLibrary();
   const [filter, setFilter] = useState('');
   const ask = useCallback((store: Store) => store.measurements.ofProject(project.id), [project.id]);
@@ -44,7 +46,9 @@ export function ProjectRecord() {
     return (value ?? [])
       .filter(({ candidateId }) => rows.get(candidateId)?.deletedAt === null)
       .map((each) => lineOf(each, formulaOf(each.candidateId)));
-  }, [value, rows, library]);
+    // The rows change in place; their version says so.
+    // eslint-disable-next-line react-hooks/exhaustive-deps
+  }, [value, rows, library, version]);
   const shown = useMemo(() => {
     const wanted = filter.toLowerCase().split(/\s+/).filter(Boolean);
     return wanted.length === 0
@@ -58,7 +62,7 @@ export function ProjectRecord() {
         problems={[{ code: 'integrity', field: '', message: error }]}
       />
     );
-  if (!value) return <p className="soft">Opening…</p>;
+  if (!value || rows.state === 'reading') return <p className="soft">Opening…</p>;
   if (lines.length === 0)
     return (
       <EmptyState title="Nothing measured yet">
