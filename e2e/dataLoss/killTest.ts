@@ -19,6 +19,12 @@ export interface KillReport {
   readonly faults: readonly string[];
   /** From the screen's confirmation to the copy in the folder, for edits that lived long enough. */
   readonly lags_ms: readonly number[];
+  /**
+   * How often the browser engine found its own store damaged after a kill and threw it away, and how many edits that the
+   * screen had confirmed were younger than the copy that it was filled from again.
+   */
+  readonly rescues: number;
+  readonly lostInRescues: number;
   /** From the page's being drawn to a copy that holds everything, after each kill. */
   readonly catchUps_ms: readonly number[];
 }
@@ -89,8 +95,8 @@ const demoIds = (page: Page): Promise<{ projectId: string; candidateId: string }
     return { projectId: rows[0]!.projectId, candidateId: rows[0]!.id };
   });
 
-/** The page is drawn, without a failure on screen or on the console. */
-async function cleanStart(running: KillableBrowser, address: string, faults: string[]): Promise<void> {
+/** The page is drawn, without a failure on the console; whether the database had to be filled from the copies. */
+async function cleanStart(running: KillableBrowser, address: string, faults: string[]): Promise<boolean> {
   const { page } = running;
   page.on('console', (message) => {
     if (message.type() === 'error') faults.push(`console: ${message.text()}`);
@@ -99,14 +105,20 @@ async function cleanStart(running: KillableBrowser, address: string, faults: str
   await page.addInitScript('globalThis.__name ??= (named) => named');
   page.on('pageerror', (error) => faults.push(`page: ${error.message}`));
   await page.goto(address);
+  const again = page.getByRole('button', { name: 'Try again' });
   try {
-    await shown(page, projectList(page));
+    await shown(page, projectList(page).or(again));
+    if (await again.isVisible()) {
+      await again.click();
+      await shown(page, projectList(page));
+    }
   } catch (error) {
     faults.push((error as Error).message);
     // What follows is compared all the same.
     await page.reload();
     await shown(page, projectList(page));
   }
+  return page.getByText('brought back from the folder of copies').isVisible();
 }
 
 async function tornSnapshots(copies: string): Promise<string[]> {
@@ -147,6 +159,7 @@ export async function killTest(
   const random = seeded(seed);
   const faults: string[] = [];
   const catchUps_ms: number[] = [];
+  let [rescues, lostInRescues] = [0, 0];
   const progress: Progress = { attempted: 0, confirmed: 0, starred: false, starring: false };
   const watch = new CopyWatch(copies, /"notes":"edit (\d+):/);
   let running = await startBrowser(profile);
@@ -180,10 +193,15 @@ export async function killTest(
 
       running = await startBrowser(profile);
       const startFaults: string[] = [];
-      await cleanStart(running, server.windowAddress(), startFaults);
+      const rescued = await cleanStart(running, server.windowAddress(), startFaults);
       const drawn = Date.now();
       const state = await readStored(running.page, projectId, candidateId);
-      const found = [...startFaults, ...faultsOf(state, progress)];
+      if (rescued) {
+        rescues += 1;
+        lostInRescues += Math.max(0, progress.confirmed - numberOf(state.notes));
+        if (numberOf(state.notes) < watch.number) faults.push(`kill ${kill}: older than the copy`);
+      }
+      const found = rescued ? startFaults : [...startFaults, ...faultsOf(state, progress)];
       faults.push(...found.map((fault) => `kill ${kill}: ${fault}`));
       // What is stored counts from here on, confirmed or not.
       progress.confirmed = numberOf(state.notes);
@@ -207,5 +225,13 @@ export async function killTest(
     if (whole || !keep) await rm(folder, { recursive: true, force: true, maxRetries: 10 });
     else process.stderr.write(`what is left of it: ${folder}\n`);
   }
-  return { kills, confirmed: progress.attempted, faults, lags_ms: watch.lags_ms, catchUps_ms };
+  return {
+    kills,
+    confirmed: progress.attempted,
+    faults,
+    rescues,
+    lostInRescues,
+    lags_ms: watch.lags_ms,
+    catchUps_ms,
+  };
 }

@@ -29,6 +29,8 @@ const report = await killTest(
 report.faults.slice(told).forEach((fault) => process.stdout.write(`${fault}\n`));
 process.stdout.write(
   `${report.kills} kills during ${report.confirmed} edits, ${report.faults.length} faults; ` +
+    `${report.rescues} times the engine threw its store away and it was filled from the copies, ` +
+    `${report.lostInRescues} confirmed edits younger than the copy; ` +
     `copy behind the screen: ${spread(report.lags_ms)}; caught up after a start: ${spread(report.catchUps_ms)}\n`,
 );
 process.exitCode = report.faults.length === 0 ? 0 : 1;
