@@ -1,3 +1,4 @@
+export { basisFor } from './basis';
 export { observationOf, type Observation } from './observations';
 export {
   recalibrate,

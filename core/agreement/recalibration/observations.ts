@@ -17,7 +17,7 @@ export interface Observation {
 }
 
 /** Common practice: published 10Dq agree to some 2 %, B to some 5 %. */
-const usual = { tenDq: 0.02, B: 0.05 } as const;
+export const usual = { tenDq: 0.02, B: 0.05 } as const;
 /** Where the cubic level is an envelope of components, or the source says its values are soft. */
 const soft = { tenDq: 0.05, B: 0.12 } as const;
 const softFlags = ['low-symmetry', 'jahn-teller', 'values-soft', 'CT-masked', 'sources-differ'];

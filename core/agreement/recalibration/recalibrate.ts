@@ -2,6 +2,7 @@ import { complexKey, type ParameterValues } from '../../library';
 import { quantile } from '../summary';
 import { evidenceFor, estimateOf, overlaid, type Evidence, type Quantity } from './evidence';
 import type { Observation } from './observations';
+import { ownValues } from './ownValues';
 import { asValues, proposeChanges, type ParameterChange, type Proposal } from './proposal';
 
 /** Relative errors (differences of logarithms) of one quantity. */
@@ -160,23 +161,6 @@ function part(
   };
 }
 
-/** What was measured on the complexes themselves: it beats every estimate of the same complex. */
-function complexValues(observations: readonly Observation[]): ParameterValues['values'] {
-  const entries: [string, ParameterValues['values'][string]][] = [];
-  for (const observation of observations) {
-    const key = complexKey(observation.composition);
-    for (const quantity of ['tenDq', 'B'] as const) {
-      const measured = observation[quantity];
-      if (measured === null) continue;
-      entries.push([
-        `complex.${key}.${quantity}`,
-        { value: measured.value, sigma: measured.u ?? 0, source: observation.source },
-      ]);
-    }
-  }
-  return Object.fromEntries(entries);
-}
-
 /**
  * Recalibrates f, g (from 10Dq) and h, k (from B) with the complexes of a record, each part on its own. A part is
  * declined where complexes are not predicted better from each other than from the literature. Nothing is changed: the
@@ -191,6 +175,6 @@ export function recalibrate(
   return {
     parts,
     values: asValues(adopted, 'recalibration'),
-    measuredComplexes: complexValues(observations),
+    measuredComplexes: ownValues(observations),
   };
 }
