@@ -1,11 +1,13 @@
 import type { ViewDefinition } from '../app/view';
 import { agreementView } from './agreement';
 import { analysisView } from './analysis';
+import { backupsView } from './backups';
 import { binView } from './bin';
 import { candidatesView } from './candidates';
 import { diagramView } from './diagram';
 import { entryView } from './entry';
 import { libraryView } from './library';
+import { mergeView } from './merge';
 import { recordView } from './record';
 import { searchView } from './search';
 import { settingsView } from './settings';
@@ -24,6 +26,8 @@ export const views: readonly ViewDefinition[] = [
   sheetView,
   libraryView,
   diagramView,
+  mergeView,
+  backupsView,
   binView,
   settingsView,
 ];

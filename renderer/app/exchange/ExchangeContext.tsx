@@ -1,6 +1,6 @@
 import { createContext, use, useCallback, useEffect, useMemo, useState, type ReactNode } from 'react';
 import { useToast } from '../../parts';
-import type { OpenedFile } from '../../host';
+import type { OpenedFile, SnapshotReason } from '../../host';
 import { bringIn, bringInAsCopy, exportProject, fileNameFor } from '../../store';
 import { useRouter } from '../router/RouterContext';
 import { useAction, useServices } from '../services';
@@ -13,11 +13,15 @@ interface Exchange {
   readonly exportProject: (projectId: string) => void;
   /** Asks for a file, shows what it would change, and takes it when told to. */
   readonly importProject: () => void;
+  /** Shows what a bundle from elsewhere (a snapshot) would change, and takes it when told to. */
+  readonly offerBundle: (file: NamedBytes, reason: SnapshotReason) => void;
 }
+type NamedBytes = Pick<OpenedFile, 'name' | 'bytes'>;
 
 const ExchangeContext = createContext<Exchange>({
   exportProject: () => undefined,
   importProject: () => undefined,
+  offerBundle: () => undefined,
 });
 export const useExchange = (): Exchange => use(ExchangeContext);
 
@@ -40,11 +44,16 @@ export function ExchangeProvider({ children }: { readonly children: ReactNode })
     [act, store, host, toast],
   );
 
+  const [reason, setReason] = useState<SnapshotReason>('before-import');
   const look = useCallback(
-    (file: OpenedFile) => void act(async () => setOffer(await readImport(store, file))),
+    (file: NamedBytes, why: SnapshotReason = 'before-import') =>
+      void act(async () => {
+        setReason(why);
+        setOffer(await readImport(store, file));
+      }),
     [act, store],
   );
-  useEffect(() => host.onFileOpened(look), [host, look]);
+  useEffect(() => host.onFileOpened((file) => look(file)), [host, look]);
   const importing = useCallback(
     () =>
       void act(async () => {
@@ -61,7 +70,7 @@ export function ExchangeProvider({ children }: { readonly children: ReactNode })
       setOffer(null);
       void act(async () => {
         if (plan.known && how === 'in-place') {
-          await snapshotBefore(host, store, { id: plan.projectId, name: plan.projectName }, 'before-import');
+          await snapshotBefore(host, store, { id: plan.projectId, name: plan.projectName }, reason);
         }
         const projectId =
           how === 'copy'
@@ -74,12 +83,12 @@ export function ExchangeProvider({ children }: { readonly children: ReactNode })
         go({ view: 'candidates', project: projectId });
       });
     },
-    [offer, act, host, store, toast, go],
+    [offer, reason, act, host, store, toast, go],
   );
 
   const value = useMemo(
-    () => ({ exportProject: exporting, importProject: importing }),
-    [exporting, importing],
+    () => ({ exportProject: exporting, importProject: importing, offerBundle: look }),
+    [exporting, importing, look],
   );
   return (
     <ExchangeContext value={value}>

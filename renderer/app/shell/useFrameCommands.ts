@@ -4,6 +4,7 @@ import { useExchange } from '../exchange/ExchangeContext';
 import { useRouter } from '../router/RouterContext';
 import { type History, useServices, useTheme } from '../services';
 import { useProjectState } from '../session/ProjectSession';
+import type { Host } from '../../host';
 import type { ViewDefinition } from '../view';
 
 interface FrameActions {
@@ -11,6 +12,13 @@ interface FrameActions {
   readonly find: () => void;
   readonly shortcuts: () => void;
 }
+
+const savePdf = (host: Host): Promise<unknown> =>
+  host.printToPdf({
+    suggestedName: `${document.title.replace(/[^\p{L}\p{N} -]/gu, '').trim() || 'page'}.pdf`,
+    pageSize: 'A4',
+    landscape: false,
+  });
 
 /** Commands that are on offer whatever view is on screen. */
 export function useFrameCommands(views: readonly ViewDefinition[], actions: FrameActions): void {
@@ -62,6 +70,10 @@ export function useFrameCommands(views: readonly ViewDefinition[], actions: Fram
         needsProject,
       ),
       menuCommand('print', () => void host.print()),
+      menuCommand('print-to-pdf', () => void (host.info.abilities.pdf ? savePdf(host) : host.print())),
+      menuCommand('choose-mirror-folder', () => void host.mirror.chooseFolder(), {
+        disabled: !host.info.abilities.chooseMirrorFolder,
+      }),
       ...(['system', 'light', 'dark'] as const).map((theme) =>
         menuCommand(`theme-${theme}`, () => choose(theme)),
       ),
