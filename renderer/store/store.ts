@@ -12,6 +12,7 @@ import { MeasurementRepository } from './repositories/measurements';
 import { ProjectRepository } from './repositories/projects';
 import { SampleRepository } from './repositories/samples';
 import { SettingsRepository } from './repositories/settings';
+import { WishRepository } from './repositories/wishes';
 
 /** Everything that views read and write. */
 export interface Store {
@@ -26,6 +27,7 @@ export interface Store {
   readonly measurements: MeasurementRepository;
   readonly analyses: AnalysisRepository;
   readonly parameterSets: ParameterSetRepository;
+  readonly wishes: WishRepository;
   readonly settings: SettingsRepository;
   readonly bin: Bin;
   readonly estimates: EstimateCache;
@@ -63,6 +65,7 @@ export async function openStore(options: StoreOptions = {}): Promise<Store> {
     measurements: new MeasurementRepository(db, journal, samples),
     analyses: new AnalysisRepository(db, journal),
     parameterSets: new ParameterSetRepository(db, journal),
+    wishes: new WishRepository(db, journal),
     settings: new SettingsRepository(db),
     bin: new Bin(db, journal),
     estimates: new EstimateCache(db),

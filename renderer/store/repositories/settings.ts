@@ -17,6 +17,25 @@ export const settingSchemas = {
   lastProject: z.string().max(100).nullable().catch(null),
   demoLoaded: z.boolean().catch(false),
   singleKeys: z.boolean().catch(true),
+  /** Ids of the ligands at hand. */
+  shelf: z.array(z.string().max(60)).max(2000).catch([]),
+  /** Searches that were under way when they were last heard of, so that closing the window loses none. */
+  openSearches: z
+    .array(
+      z.strictObject({
+        id: z.string().max(100),
+        projectId: z.string().max(100),
+        startedAt: z.string().max(40),
+        wish: z.looseObject({ name: z.string().max(200) }),
+        /** How far it had come. */
+        done: z.number().nonnegative(),
+        count: z.number().nonnegative(),
+        /** What the search needs to go on from there; null where it starts again. */
+        checkpoint: z.unknown().nullable(),
+      }),
+    )
+    .max(20)
+    .catch([]),
 } as const;
 
 export type Settings = { readonly [K in keyof typeof settingSchemas]: z.infer<(typeof settingSchemas)[K]> };
