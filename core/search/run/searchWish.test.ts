@@ -57,6 +57,24 @@ describe('a search', () => {
     );
   }, 120_000);
 
+  it('that goes on from any point ends as one that was never interrupted', () => {
+    const wish = wished({
+      name: 'w',
+      ions: ['Cr3+', 'Ni2+'],
+      ligands: { allow: ['h2o', 'nh3', 'en', 'cl'], maxKinds: 2 },
+      bands: [{ from_nm: 540, to_nm: 600 }],
+    });
+    const whole = finish(wish, { top: 8 });
+    for (const step of searchWish(wish, defaultLibrary, { top: 8 })) {
+      // What is kept of a run has been through a file.
+      const from = JSON.parse(JSON.stringify(step)) as SearchProgress;
+      expect(from.evaluated + from.skipped).toBeLessThanOrEqual(whole.count);
+      expect(JSON.parse(JSON.stringify(finish(wish, { top: 8, from })))).toEqual(
+        JSON.parse(JSON.stringify(whole)),
+      );
+    }
+  });
+
   it('counts the same space that it runs through', () => {
     const wish = wished({ name: 'x', ions: ['Cr3+'], ligands: { allow: ['nh3', 'en', 'cl'], maxKinds: 3 } });
     expect(finish(wish, { top: 1, brute: true }).evaluated).toBe(

@@ -26,6 +26,8 @@ export interface SearchOptions {
   readonly top: number;
   /** Estimate every candidate, for checking: no bound is used. */
   readonly brute?: boolean;
+  /** How far a run of the same wish over the same library came: this one goes on from there. */
+  readonly from?: Pick<SearchProgress, 'evaluated' | 'skipped' | 'results'>;
 }
 
 /** Below this a candidate does not count as an answer: it would only pad the list. */
@@ -66,15 +68,22 @@ const reportEvery = 50;
 export function* searchWish(
   wish: Wish,
   library: ParameterLibrary,
-  { top, brute = false }: SearchOptions,
+  { top, brute = false, from }: SearchOptions,
 ): Generator<SearchProgress, SearchProgress> {
   const space = spaceOf(wish, library);
   const count = countCandidates(space);
   const list = new TopList<SearchResult>(top);
-  let evaluated = 0;
-  let skipped = 0;
+  from?.results.forEach((result) => list.offer(result));
+  let evaluated = from?.evaluated ?? 0;
+  let skipped = from?.skipped ?? 0;
+  // The order is the same in every run, so that those gone through are the first ones.
+  let toPass = evaluated + skipped;
   const progress = (): SearchProgress => ({ count, evaluated, skipped, results: [...list.items] });
   for (const candidate of candidatesIn(space, library)) {
+    if (toPass > 0) {
+      if (--toPass % (100 * reportEvery) === 0) yield progress();
+      continue;
+    }
     const least = Math.max(list.threshold, leastProbability);
     if (!brute && upperBound(candidate, wish, library) < least) {
       skipped++;
