@@ -102,17 +102,17 @@ export function measuredProject(name: string): string {
     });
     const conditions = { ...noConditions, date: '2026-03-10', solvent: 'water', operator: 'MK' };
     if (measuredComplexes.includes(composition)) {
-      const there = predicted(composition, id, world).bands;
-      const bands = prediction.bands
-        .filter(({ kind }) => kind === 'spin-allowed')
-        .flatMap((band) => {
-          const found = there.find(
-            ({ label, component }) => label === band.label && component === band.component,
-          );
-          if (found === undefined) return [];
-          const value = Math.round(found.energy_cm1 * (1 + 0.004 * random.normal()));
-          return [{ band, energy_cm1: { value, u: 100 } }];
-        });
+      const allowed = (prediction: Prediction) =>
+        prediction.bands
+          .filter(({ kind }) => kind === 'spin-allowed')
+          .sort((one, other) => one.energy_cm1 - other.energy_cm1);
+      const there = allowed(predicted(composition, id, world));
+      const bands = allowed(prediction).flatMap((band, k) => {
+        const found = there[k];
+        if (found?.label !== band.label || band.energy_cm1 > 40_000) return [];
+        const value = Math.round(found.energy_cm1 * (1 + 0.004 * random.normal()));
+        return [{ band, energy_cm1: { value, u: 100 } }];
+      });
       measure(id, {
         kind: 'band list',
         conditions,

@@ -1,4 +1,4 @@
-export { formatFigures, formatGiven, formatShare } from './formatNumber';
+export { formatFigures, formatGiven, formatShare, writeToStep } from './formatNumber';
 export { writeRange } from './formatRange';
 export { NumberWithRange, type NumberWithRangeProps } from './NumberWithRange';
 export { intervalUnit, UnitProvider, useUnit, type UnitChoice } from './UnitContext';

@@ -1,6 +1,7 @@
 import { formatFigures, formatShare } from '../../parts';
 import { agreementOf, countedPairs, type BandPair } from './recordPairs';
 import type { Share } from '../../../core/agreement';
+import './AgreementFigures.css';
 
 export const shareText = ({ hits, of, share, interval95 }: Share): string =>
   share === null
@@ -17,7 +18,7 @@ export function AgreementFigures({ pairs }: { readonly pairs: readonly BandPair[
   const left = pairs.length - countedPairs(pairs).length;
   return (
     <>
-      <dl className="record-figures">
+      <dl className="agreement-figures">
         <div>
           <dt>Pairs counted</dt>
           <dd>{errors.n}</dd>

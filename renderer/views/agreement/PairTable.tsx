@@ -1,6 +1,7 @@
 import type { ReactNode } from 'react';
-import { MeasuredNumber, NumberWithRange, TermSymbol } from '../../parts';
+import { MeasuredNumber, NumberWithRange, TermSymbol, writeToStep } from '../../parts';
 import type { BandPair } from './recordPairs';
+import './PairTable.css';
 
 interface PairTableProps {
   readonly pairs: readonly BandPair[];
@@ -8,7 +9,7 @@ interface PairTableProps {
   readonly complexOf?: (pair: BandPair) => ReactNode;
 }
 
-const signed = (value: number, digits: number): string => (value > 0 ? '+' : '') + value.toFixed(digits);
+const signed = (value: number, step: number): string => (value > 0 ? '+' : '') + writeToStep(value, step);
 
 function remarkOf({ feature, predicted, frozenAfterwards, isInSample }: BandPair): string {
   if (predicted === null) return 'no predicted band near it';
@@ -20,8 +21,8 @@ function remarkOf({ feature, predicted, frozenAfterwards, isInSample }: BandPair
 /** Frozen prediction and measurement side by side. */
 export function PairTable({ pairs, complexOf }: PairTableProps) {
   return (
-    <div className="record-scroll">
-      <table className="plain-table record-pairs">
+    <div className="pair-scroll">
+      <table className="plain-table pair-table">
         <thead>
           <tr>
             {complexOf && <th scope="col">Complex</th>}
@@ -56,8 +57,8 @@ export function PairTable({ pairs, complexOf }: PairTableProps) {
                 <MeasuredNumber value={pair.measured} u={pair.u} />
               </td>
               <td>{pair.feature}</td>
-              <td className="figures">{pair.residual === null ? '–' : `${signed(pair.residual, 0)} cm⁻¹`}</td>
-              <td className="figures">{pair.score === null ? '–' : signed(pair.score, 1)}</td>
+              <td className="figures">{pair.residual === null ? '–' : `${signed(pair.residual, 1)} cm⁻¹`}</td>
+              <td className="figures">{pair.score === null ? '–' : signed(pair.score, 0.1)}</td>
               <td className="soft small">{remarkOf(pair)}</td>
             </tr>
           ))}

@@ -1,5 +1,6 @@
 import { useCallback, useMemo } from 'react';
 import type { Measurement } from '../../../core/record/measurement';
+import type { ParameterSet } from '../../../core/record/project';
 import { useStored } from '../../app/services';
 import { useVersion } from '../../app/session/observable';
 import { useProject } from '../../app/session/ProjectSession';
@@ -13,6 +14,8 @@ export interface RecordPairs {
   readonly measurements: readonly Measurement[];
   readonly frozen: Awaited<ReturnType<Store['frozenPredictions']['ofProject']>>;
   readonly analyses: Awaited<ReturnType<Store['analyses']['ofProject']>>;
+  /** Parameter sets of the project, newest first. */
+  readonly sets: readonly ParameterSet[];
 }
 
 /** Everything measured in the project beside what was predicted; candidates in the bin are left out. */
@@ -44,5 +47,5 @@ async function everything(store: Store, projectId: string): Promise<RecordPairs>
     const prediction = frozen.get(each.frozenPredictionId ?? '') ?? null;
     return pairsOf(each, prediction, analyses.get(each.id) ?? null, informedBy(sets, prediction));
   });
-  return { pairs, measurements, frozen, analyses };
+  return { pairs, measurements, frozen, analyses, sets };
 }

@@ -1,19 +1,15 @@
-import { useCallback } from 'react';
 import type { ParameterSet } from '../../../../core/record/project';
-import { minuteOf, useStored } from '../../../app/services';
-import { useProject } from '../../../app/session/ProjectSession';
-import type { Store } from '../../../store';
+import { minuteOf } from '../../../app/services';
 
 interface ParameterSetsProps {
+  /** Newest first. */
+  readonly sets: readonly ParameterSet[];
   readonly current: ParameterSet | null;
   readonly onChoose: (set: ParameterSet | null) => void;
 }
 
 /** Sets of the project with author, reason and hash; one of them, or the plain library, is in use. */
-export function ParameterSets({ current, onChoose }: ParameterSetsProps) {
-  const { project } = useProject();
-  const ask = useCallback((store: Store) => store.parameterSets.of(project.id), [project.id]);
-  const { value: sets = [] } = useStored(ask, ['parameterSets']);
+export function ParameterSets({ sets, current, onChoose }: ParameterSetsProps) {
   if (sets.length === 0) return null;
   return (
     <fieldset className="stack">

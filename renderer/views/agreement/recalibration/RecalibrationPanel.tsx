@@ -1,5 +1,5 @@
-import { useCallback, useMemo, useRef, useState } from 'react';
-import type { Recalibration } from '../../../../core/agreement/recalibration';
+import { useCallback, useEffect, useMemo, useRef, useState } from 'react';
+import { basisFor } from '../../../../core/agreement/recalibration';
 import type { ParameterSet } from '../../../../core/record/project';
 import { snapshotBefore } from '../../../app/exchange/snapshotBefore';
 import { useAction, useServices, useStore } from '../../../app/services';
@@ -7,7 +7,7 @@ import { useProject } from '../../../app/session/ProjectSession';
 import { ErrorPanel, Progress, useToast } from '../../../parts';
 import { recalibrateInWorker } from '../../../workers/recalibration/recalibrateInWorker';
 import type { RecordPairs } from '../useRecordPairs';
-import { adoptedSet, type Approval } from './adoptedSet';
+import { adoptedSet, type Approval, type Proposal } from './adoptedSet';
 import { observationsOf } from './observationsOf';
 import { ParameterSets } from './ParameterSets';
 import { ProposalForm } from './ProposalForm';
@@ -20,32 +20,40 @@ export function RecalibrationPanel({ record }: { readonly record: RecordPairs })
   const act = useAction();
   const toast = useToast();
   const [progress, setProgress] = useState<{ done: number; of: number } | null>(null);
-  const [proposal, setProposal] = useState<Recalibration | null>(null);
+  const [proposal, setProposal] = useState<Proposal | null>(null);
   const [error, setError] = useState<string | null>(null);
   const abort = useRef<AbortController | null>(null);
   const observations = useMemo(
     () => observationsOf(record.measurements, record.analyses, record.frozen, (id) => rows.get(id)),
     [record, rows],
   );
+  const basis = useMemo(
+    () => basisFor(observations, parameterSet, record.sets),
+    [observations, parameterSet, record.sets],
+  );
+  useEffect(() => () => abort.current?.abort(), []);
   const run = useCallback(() => {
     const controller = new AbortController();
     abort.current = controller;
     setError(null);
     setProposal(null);
     setProgress({ done: 0, of: observations.length });
-    recalibrateInWorker({ observations, overlay: parameterSet }, controller.signal, (done, of) =>
+    recalibrateInWorker({ observations, overlay: basis }, controller.signal, (done, of) =>
       setProgress({ done, of }),
     )
-      .then(setProposal, (cause: unknown) => {
-        if (!controller.signal.aborted) setError(cause instanceof Error ? cause.message : String(cause));
-      })
+      .then(
+        (value) => setProposal({ value, observations, basis }),
+        (cause: unknown) => {
+          if (!controller.signal.aborted) setError(cause instanceof Error ? cause.message : String(cause));
+        },
+      )
       .finally(() => setProgress(null));
-  }, [observations, parameterSet]);
+  }, [observations, basis]);
   const approve = (approval: Approval): void => {
     if (proposal === null) return;
     void act(async () => {
       await snapshotBefore(host, store, project, 'before-recalibration');
-      const set = adoptedSet(proposal, observations, approval, project.id, parameterSet, store.clock);
+      const set = adoptedSet(proposal, approval, project.id, store.clock);
       await store.parameterSets.adopt(set, `use the parameters “${set.name}”`);
       setProposal(null);
       toast({
@@ -66,6 +74,9 @@ export function RecalibrationPanel({ record }: { readonly record: RecordPairs })
         {observations.length === 0
           ? 'Fit the field of measured complexes in the lab record first: their 10Dq and B are what the parameters can learn from.'
           : `${observations.length} field ${observations.length === 1 ? 'fit' : 'fits'} in this record. A proposal shows what would change and whether complexes are predicted better from each other; nothing changes before you approve it.`}
+        {observations.length > 0 &&
+          basis !== parameterSet &&
+          ` Some of these complexes went into the parameters in use, so a proposal starts again from ${basis === null ? 'the literature' : `“${basis.name}”`}: evidence counts once.`}
       </p>
       <div>
         <button
@@ -89,7 +100,7 @@ export function RecalibrationPanel({ record }: { readonly record: RecordPairs })
         <ErrorPanel title="No proposal" problems={[{ code: 'no-convergence', field: '', message: error }]} />
       )}
       {proposal && <ProposalForm proposal={proposal} onApprove={approve} onClose={() => setProposal(null)} />}
-      <ParameterSets current={parameterSet} onChoose={choose} />
+      <ParameterSets sets={record.sets} current={parameterSet} onChoose={choose} />
     </section>
   );
 }

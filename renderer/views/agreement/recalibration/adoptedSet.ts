@@ -9,22 +9,27 @@ export interface Approval {
   readonly name: string;
   readonly author: string;
   readonly reason: string;
-  /** Keys that were taken out. */
+  /** Keys that were taken out, of parameters and of values measured on complexes. */
   readonly without: ReadonlySet<string>;
-  readonly keepMeasuredComplexes: boolean;
+}
+
+/** A recalibration with what it was worked out from. */
+export interface Proposal {
+  readonly value: Recalibration;
+  readonly observations: readonly PlainObservation[];
+  /** Set that it starts from; null for the library as it is. */
+  readonly basis: ParameterSet | null;
 }
 
 /** The parameter set that an approved proposal makes. */
 export const adoptedSet = (
-  proposal: Recalibration,
-  observations: readonly PlainObservation[],
+  { value, observations, basis }: Proposal,
   approval: Approval,
   projectId: string,
-  parent: ParameterSet | null,
   clock: Store['clock'],
 ): ParameterSet =>
   parameterSetFrom(
-    proposal,
+    value,
     observations.map((observation) => ({ ...observation, library: defaultLibrary })),
     {
       ...approval,
@@ -32,6 +37,7 @@ export const adoptedSet = (
       projectId,
       at: clock.now(),
       libraryVersion: defaultLibrary.version,
-      parent,
+      parent: basis,
+      keepMeasuredComplexes: true,
     },
   );
