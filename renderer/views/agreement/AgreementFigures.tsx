@@ -50,7 +50,8 @@ export function AgreementFigures({ pairs }: { readonly pairs: readonly BandPair[
       </dl>
       <p className="soft small">
         Bands that nobody assigned were paired by the closest match, which flatters the agreement where a
-        measured band lies between two predicted ones.
+        measured band lies between two predicted ones. Bands of one complex err together, so that the
+        intervals are narrower than they ought to be.
         {left > 0 &&
           ` Not counted: ${left} (shoulders, bands without a partner, in-sample, or measured before freezing).`}
       </p>

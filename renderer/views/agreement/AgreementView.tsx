@@ -44,7 +44,13 @@ export default function AgreementView() {
         />
       </>
     );
-  if (!value) return head;
+  if (!value)
+    return (
+      <>
+        {head}
+        <p className="soft">Opening…</p>
+      </>
+    );
   const { pairs } = value;
   const counted = countedPairs(pairs);
   const inSample = pairs.filter((pair) => pair.isInSample);

@@ -58,10 +58,10 @@ export function ExportButtons({ record, nameOf }: ExportButtonsProps) {
   return (
     <>
       <button type="button" onClick={() => save('csv', 'agreement.csv', toCsv([header, ...rows]))}>
-        CSV
+        Pairs as CSV
       </button>
       <button type="button" onClick={() => save('json', 'agreement.json', json())}>
-        JSON
+        Pairs as JSON
       </button>
       <button type="button" onClick={() => save('text', 'bands.txt', siTableText(si()))}>
         Bands as text

@@ -1,7 +1,7 @@
 import type { ParameterChange } from '../../../../core/agreement/recalibration';
 import type { ParameterLibrary } from '../../../../core/library/parameterLibrary';
-import { Formula, formatFigures, formatShare } from '../../../parts';
-import { shareInUse, spoken, subjectOf } from './proposalRows';
+import { Formula, formatFigures, formatShare, writeToStep } from '../../../parts';
+import { ionFormula, shareInUse, spoken, subjectOf } from './proposalRows';
 
 interface ChangeTableProps {
   readonly changes: readonly ParameterChange[];
@@ -24,7 +24,7 @@ export function ChangeTable({ changes, library, from, without, onToggle }: Chang
         <tr>
           <th scope="col">Take</th>
           <th scope="col">Parameter</th>
-          <th scope="col">{from} ± σ</th>
+          <th scope="col">{from === 'literature' ? 'Literature' : from} ± σ</th>
           <th scope="col">Proposed ± σ</th>
           <th scope="col">
             <abbr title="change in standard deviations of the value it starts from; beyond 2 that value and the record contradict each other">
@@ -54,14 +54,13 @@ export function ChangeTable({ changes, library, from, without, onToggle }: Chang
                 />
               </td>
               <th scope="row">
-                {subject.words} <Formula formula={subject.formula} />
+                {subject.words} {subject.ion !== null && <Formula formula={ionFormula(subject.ion)} />}{' '}
+                {subject.more}
                 {subject.unit !== '' && ` / ${subject.unit}`}
               </th>
               <td className="figures">{pair(change.before)}</td>
               <td className="figures">{pair(change.after)}</td>
-              <td className="figures">
-                {Math.abs(change.shift) < 0.05 ? '0.0' : formatFigures(change.shift, 2)}
-              </td>
+              <td className="figures">{writeToStep(change.shift, 0.1)}</td>
               <td className="figures">{formatShare(shareInUse(change))}</td>
               <td>
                 {length} {length === 1 ? 'fit' : 'fits'}

@@ -80,7 +80,7 @@ export function ProposalForm({ proposal, onApprove, onClose }: ProposalFormProps
           <ChangeTable
             changes={changes}
             library={library}
-            from={basis === null ? 'Literature' : `“${basis.name}”`}
+            from={basis === null ? 'literature' : `“${basis.name}”`}
             without={without}
             onToggle={toggle}
           />

@@ -11,27 +11,30 @@ const factorWords: Readonly<Record<string, string>> = {
   k: 'nephelauxetic factor k of',
 };
 
-/** What a change is about: words in front, and a ligand or an ion as a formula. */
+/** What a change is about: words, with ions between them as formulas. */
 export interface Subject {
   readonly words: string;
-  readonly formula: string;
+  readonly ion: string | null;
+  readonly more: string;
   readonly unit: string;
 }
-
-/** `Cr3+` with its charge marked, so that it is set as a superscript. */
-const ionFormula = (ion: string): string => ion.replace(/^([A-Z][a-z]?)/, '$1^');
 
 /** `ligand.nh3.f` as people say it. */
 export function subjectOf(key: string, library: ParameterLibrary): Subject {
   const [kind = '', subject = '', quantity = ''] = key.split('.');
-  const ligand = (id: string): string => library.ligands.get(id)?.abbreviation ?? id;
-  if (kind === 'anchor') return { words: `10Dq of ${subject} with`, formula: ligand(quantity), unit: 'cm⁻¹' };
+  const ligand = (id: string): string => library.ligands.get(id)?.commonName ?? id;
   const words = factorWords[quantity] ?? `${quantity} of`;
-  if (kind === 'ion') return { words, formula: ionFormula(subject), unit: quantity === 'g' ? 'cm⁻¹' : '' };
-  return { words, formula: ligand(subject), unit: '' };
+  if (kind === 'anchor') {
+    return { words: '10Dq of', ion: subject, more: `with ${ligand(quantity)} alone`, unit: 'cm⁻¹' };
+  }
+  if (kind === 'ion') return { words, ion: subject, more: '', unit: quantity === 'g' ? 'cm⁻¹' : '' };
+  return { words: `${words} ${ligand(subject)}`, ion: null, more: '', unit: '' };
 }
 
-export const spoken = ({ words, formula }: Subject): string => `${words} ${formula.replace('^', '')}`;
+/** `Cr3+` with its charge marked, so that it is set as a superscript. */
+export const ionFormula = (ion: string): string => ion.replace(/^([A-Z][a-z]?)/, '$1^');
+
+export const spoken = ({ words, ion, more }: Subject): string => [words, ion, more].filter(Boolean).join(' ');
 
 /**
  * Share of what is proposed that still comes from the value in use: precisions add up, so it is the ratio of the relative
