@@ -7,6 +7,7 @@ export const coreLayers = {
   errors: [],
   units: ['errors'],
   numerics: ['errors'],
+  formula: ['errors', 'library', 'record'],
   library: ['errors', 'units'],
   symmetry: ['errors', 'numerics'],
   geometry: ['errors', 'units', 'numerics', 'library', 'symmetry', 'record'],

@@ -1,0 +1,2 @@
+export { readFormula } from './readFormula';
+export type { FormulaProblem, FormulaReading, ReadFormula } from './types';
