@@ -102,6 +102,7 @@ export default function AnalysisView() {
             steps={analysis?.treatment ?? []}
             result={result}
             conditions={content.conditions}
+            title={`${complexFormula(candidate.composition, library)} ${content.kind === 'spectrum' ? (content.name ?? '') : ''}`.trim()}
             blanks={blanks}
             onSave={(steps, label) => save({ treatment: [...steps] }, label)}
           />

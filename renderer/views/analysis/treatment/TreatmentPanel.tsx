@@ -7,6 +7,7 @@ import { ErrorPanel } from '../../../parts';
 import { SpectrumPlot } from '../../../plots';
 import { StepForm } from './StepForm';
 import { stepText } from './stepText';
+import { TreatedExport } from './TreatedExport';
 import { pointsOf, type TreatedCurve } from './treated';
 
 export type Blanks = ReadonlyMap<string, { readonly name: string }>;
@@ -16,6 +17,8 @@ interface TreatmentPanelProps {
   readonly steps: readonly TreatmentStep[];
   readonly result: TreatedCurve;
   readonly conditions: Conditions;
+  /** What the spectrum is of, for the files that leave the program. */
+  readonly title: string;
   readonly blanks: Blanks;
   readonly onSave: (steps: readonly TreatmentStep[], label: string) => Promise<boolean>;
 }
@@ -30,7 +33,7 @@ const axisWords = {
 
 /** Raw and treated spectrum with the steps between them, each of which can be taken back. */
 export function TreatmentPanel(props: TreatmentPanelProps) {
-  const { curve, steps, result, conditions, blanks, onSave } = props;
+  const { curve, steps, result, conditions, title, blanks, onSave } = props;
   const [adding, setAdding] = useState(false);
   const remarks = [
     ...absorbanceSanity(curve).map(({ message }) => message),
@@ -105,10 +108,13 @@ export function TreatmentPanel(props: TreatmentPanelProps) {
           onClose={() => setAdding(false)}
         />
       ) : (
-        <div>
+        <div className="analysis-actions">
           <button type="button" onClick={() => setAdding(true)}>
             Add a step…
           </button>
+          {result.shown !== null && (
+            <TreatedExport curve={result.shown} steps={steps} conditions={conditions} title={title} />
+          )}
         </div>
       )}
     </section>
