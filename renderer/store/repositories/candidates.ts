@@ -62,6 +62,20 @@ export class CandidateRepository {
     );
   }
 
+  /** Adds some and changes others as one step. */
+  takeOver(
+    projectId: string,
+    label: string,
+    fresh: readonly NewCandidate[],
+    changed: readonly { readonly id: string; readonly fields: CandidateFields }[],
+  ): Promise<void> {
+    const rows = fresh.map((each): NewRow<'candidates'> => ({ ...blankCandidate, ...each, projectId }));
+    return this.#journal.record(projectId, label, async (writer) => {
+      if (rows.length > 0) await writer.create('candidates', rows);
+      for (const { id, fields } of changed) await writer.update('candidates', id, fields);
+    });
+  }
+
   update(candidate: Candidate, label: string, fields: CandidateFields, basedOn?: number): Promise<Candidate> {
     return this.#journal.record(candidate.projectId, label, (writer) =>
       writer.update('candidates', candidate.id, fields, basedOn),

@@ -14,6 +14,8 @@ import { FilterBar } from './FilterBar';
 import { parseFilter } from './filter/parseFilter';
 import { CandidateGrid } from './grid/CandidateGrid';
 import { shownColumns } from './grid/columns';
+import { PasteDialog } from './paste/PasteDialog';
+import { usePaste } from './paste/usePaste';
 import { SelectionBar } from './selection/SelectionBar';
 import { tableText } from './selection/tableText';
 import { TagDialog } from './selection/TagDialog';
@@ -42,6 +44,8 @@ export default function CandidatesView() {
   const subjects = useSubjects(shown, selection.ids, current);
   const [tagged, setTagged] = useState<readonly TableRow[] | null>(null);
   const copy = useCopy(subjects);
+  const [pasted, setPasted] = usePaste();
+  const startPasting = useCallback(() => setPasted(''), [setPasted]);
   const startTagging = useCallback(() => setTagged(subjects), [subjects]);
   const { settings } = useSettings();
   const columns = useMemo(
@@ -55,9 +59,15 @@ export default function CandidatesView() {
     actions,
     onTag: startTagging,
     onCopy: copy,
+    onPaste: startPasting,
     onSelectAll: selection.all,
   });
 
+  const paste = (
+    <button type="button" onClick={startPasting}>
+      Paste…
+    </button>
+  );
   const add = (
     <a className="button button-main" href={linkTo({ view: 'entry', project: project.id })}>
       Add a candidate…
@@ -75,6 +85,7 @@ export default function CandidatesView() {
             <>
               <TargetButton />
               <ColumnChooser />
+              {paste}
               {add}
             </>
           )
@@ -82,7 +93,15 @@ export default function CandidatesView() {
       />
       <ReadingProblems />
       {empty ? (
-        <EmptyState title="No candidates yet" actions={add}>
+        <EmptyState
+          title="No candidates yet"
+          actions={
+            <>
+              {add}
+              {paste}
+            </>
+          }
+        >
           Enter the complexes you could make: a metal, its oxidation state, a geometry and the ligands. While
           you choose, the program says what it expects of each. Then rank them here.
         </EmptyState>
@@ -129,6 +148,7 @@ export default function CandidatesView() {
           />
         </>
       )}
+      {pasted !== null && <PasteDialog start={pasted} onClose={() => setPasted(null)} />}
       <TagDialog
         rows={tagged}
         all={all}

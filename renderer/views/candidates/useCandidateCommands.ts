@@ -12,13 +12,14 @@ interface CandidateCommands {
   readonly actions: RowActions;
   readonly onTag: () => void;
   readonly onCopy: () => void;
+  readonly onPaste: () => void;
   readonly onSelectAll: () => void;
 }
 
 const group = 'Candidates';
 
 export function useCandidateCommands(given: CandidateCommands): void {
-  const { projectId, subjects, actions, onTag, onCopy, onSelectAll } = given;
+  const { projectId, subjects, actions, onTag, onCopy, onPaste, onSelectAll } = given;
   const { go } = useRouter();
   const commands = useMemo((): readonly Command[] => {
     const disabled = subjects.length === 0;
@@ -46,6 +47,7 @@ export function useCandidateCommands(given: CandidateCommands): void {
         keys: ['f'],
         run: () => document.getElementById(filterFieldId)?.focus(),
       },
+      { id: 'candidates.paste', label: 'Paste formulas or a table', group, keys: ['v'], run: onPaste },
       { id: 'candidates.all', label: 'Select all that are shown', group, keys: ['Mod+A'], run: onSelectAll },
       command('star', 'Star or unstar', ['s'], () => actions.star(subjects)),
       command('tag', 'Tag', ['t'], onTag),
@@ -56,6 +58,6 @@ export function useCandidateCommands(given: CandidateCommands): void {
       ),
       command('delete', 'Delete', ['Delete'], () => actions.remove(subjects)),
     ];
-  }, [go, projectId, subjects, actions, onTag, onCopy, onSelectAll]);
+  }, [go, projectId, subjects, actions, onTag, onCopy, onPaste, onSelectAll]);
   useCommands(commands);
 }

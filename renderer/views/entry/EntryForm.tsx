@@ -10,6 +10,7 @@ import { usePrediction } from '../../app/session/usePrediction';
 import { DetailFields } from './DetailFields';
 import { compositionOf, placesTaken, withCount, withGeometry, withMetal } from './draft';
 import { LiveEstimate } from './estimate/LiveEstimate';
+import { FormulaField } from './formula/FormulaField';
 import { GeometryRow } from './GeometryRow';
 import { isomerNames } from './isomerNames';
 import { IsomerRow } from './IsomerRow';
@@ -96,6 +97,19 @@ export function EntryForm({ candidate }: { readonly candidate: Candidate | null 
   return (
     <form className="entry-form" onSubmit={submit}>
       <div className="entry-choices">
+        <FormulaField
+          library={library}
+          onRead={({ composition: read, counterIon, solvate }) =>
+            set({
+              ...draft,
+              ...read,
+              ligands: { ...read.ligands },
+              isomer: read.isomer ?? null,
+              counterIon: counterIon ?? draft.counterIon,
+              solvate: solvate ?? draft.solvate,
+            })
+          }
+        />
         <MetalGrid
           value={draft.metal}
           library={library}

@@ -27,7 +27,7 @@ const heads = [
 ];
 
 /** Spreadsheets take a leading = + - @ for a formula: an apostrophe makes it text again. */
-const asCell = (value: string | number | null): string => {
+export const asCell = (value: string | number | null): string => {
   if (value === null) return '';
   if (typeof value === 'number') return String(value);
   const line = value.replace(/[\t\r\n]+/g, ' ');
