@@ -16,6 +16,7 @@ export { type AddedMeasurements, type Correction, type NewMeasurements } from '.
 export { type ProjectFields } from './repositories/projects';
 export { type NamedBatch, type Phase } from './repositories/samples';
 export { defaultSettings, type Settings } from './repositories/settings';
+export { type ShortlistEntry } from './repositories/shortlist';
 export { type Change, type Edit, type NewRow, type RecordTable, type RowOf } from './rows';
 export { openStore, type Store, type StoreOptions } from './store';
 export { asStoreError, StoreError, type StoreErrorCode } from './storeError';

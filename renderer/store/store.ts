@@ -12,6 +12,7 @@ import { MeasurementRepository } from './repositories/measurements';
 import { ProjectRepository } from './repositories/projects';
 import { SampleRepository } from './repositories/samples';
 import { SettingsRepository } from './repositories/settings';
+import { ShortlistRepository } from './repositories/shortlist';
 import { WishRepository } from './repositories/wishes';
 
 /** Everything that views read and write. */
@@ -28,6 +29,7 @@ export interface Store {
   readonly analyses: AnalysisRepository;
   readonly parameterSets: ParameterSetRepository;
   readonly wishes: WishRepository;
+  readonly shortlist: ShortlistRepository;
   readonly settings: SettingsRepository;
   readonly bin: Bin;
   readonly estimates: EstimateCache;
@@ -66,6 +68,7 @@ export async function openStore(options: StoreOptions = {}): Promise<Store> {
     analyses: new AnalysisRepository(db, journal),
     parameterSets: new ParameterSetRepository(db, journal),
     wishes: new WishRepository(db, journal),
+    shortlist: new ShortlistRepository(journal),
     settings: new SettingsRepository(db),
     bin: new Bin(db, journal),
     estimates: new EstimateCache(db),

@@ -4,6 +4,7 @@ import { analysisView } from './analysis';
 import { backupsView } from './backups';
 import { binView } from './bin';
 import { candidatesView } from './candidates';
+import { compareView } from './compare';
 import { diagramView } from './diagram';
 import { entryView } from './entry';
 import { libraryView } from './library';
@@ -20,6 +21,7 @@ export const views: readonly ViewDefinition[] = [
   candidatesView,
   entryView,
   searchView,
+  compareView,
   recordView,
   agreementView,
   analysisView,

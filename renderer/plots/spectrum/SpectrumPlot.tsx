@@ -26,6 +26,8 @@ export interface SpectrumPlotProps {
   /** Name of the y axis where it holds neither of the two. */
   readonly yLabel?: string;
   readonly measured?: readonly (SpectrumCurve & { readonly name: string })[];
+  /** The curves of `measured` are predictions of several complexes, laid over each other. */
+  readonly allPredicted?: boolean;
   readonly title?: string;
   readonly height?: number;
   readonly note?: string;
@@ -115,6 +117,7 @@ export function SpectrumPlot(props: SpectrumPlotProps) {
         hasRange: range !== null,
         bands: bandsShown ? bands : [],
         measured,
+        allPredicted: props.allPredicted ?? false,
       })}
       tools={
         <>

@@ -12,6 +12,7 @@ export function spectrumLegend(drawn: {
   readonly hasRange: boolean;
   readonly bands: readonly Band[];
   readonly measured: readonly { readonly name: string }[];
+  readonly allPredicted?: boolean;
 }): LegendEntry[] {
   const has = (...kinds: Band['kind'][]): boolean => drawn.bands.some(({ kind }) => kinds.includes(kind));
   const entries: LegendEntry[] = [];
@@ -28,7 +29,7 @@ export function spectrumLegend(drawn: {
   }
   drawn.measured.forEach(({ name }, index) => {
     entries.push({
-      text: `measured: ${name}`,
+      text: drawn.allPredicted ? name : `measured: ${name}`,
       sample: line('spectrum-measured', measuredDash(index)),
     });
   });

@@ -1,86 +1,114 @@
-import { useMemo, useState } from 'react';
+import { useMemo } from 'react';
 import { complexKey } from '../../../core/library/parameterLibrary';
-import { useVersion } from '../../app/session/observable';
+import { useSettings } from '../../app/services';
 import { useProject } from '../../app/session/ProjectSession';
+import { useVersion } from '../../app/session/observable';
 import { useLibrary } from '../../app/session/useLibrary';
 import { ViewHeader } from '../../app/shell/ViewHeader';
-import { useAction, useStore } from '../../app/services';
-import { ErrorPanel, useToast } from '../../parts';
-import type { ShownResult } from '../../workers/search/protocol';
-import { SearchProgressPanel } from './SearchProgressPanel';
-import { ResultTable } from './ResultTable';
-import { useSearch } from './useSearch';
-import { WishForm } from './WishForm';
-import { freshDraft, wishesAnything, wishOf } from './wishDraft';
+import { ErrorPanel } from '../../parts';
+import { useReply } from './asking/useReply';
+import { Before } from './Before';
+import { ResultsPanel } from './results/ResultsPanel';
+import { LeftOver } from './run/LeftOver';
+import { RunPanel } from './run/RunPanel';
+import { RunTabs } from './run/RunTabs';
+import type { SearchRun } from './run/searchRun';
+import { searchRuns } from './run/searchRuns';
+import { SavedWishes } from './saved/SavedWishes';
+import { useDraft } from './useDraft';
+import { useRuns } from './useRuns';
+import { useShortlist } from './useShortlist';
+import { WhyNotPanel } from './whynot/WhyNotPanel';
+import { draftOf, wishesAnything, wishOf } from './wish/wishDraft';
+import { WishForm } from './wish/WishForm';
 import './SearchView.css';
 
 /** From a wish to the metal and ligand sets that would meet it. */
 export default function SearchView() {
-  const { project, rows, overlay, conditions } = useProject();
-  useVersion(rows);
+  const { project, overlay, conditions } = useProject();
   const library = useLibrary();
-  const search = useSearch();
-  const [draft, setDraft] = useState(freshDraft);
-  const add = useAdd();
-  const around = { ...conditions, targetLab: project.targetLab };
-  const ready = wishesAnything(draft, around);
-  const held = useMemo(
-    () => new Set(rows.values().map(({ composition }) => complexKey(composition))),
-    // The rows object stays the same while its content changes.
-    // eslint-disable-next-line react-hooks/exhaustive-deps
-    [rows, rows.size],
-  );
-  const begin = (): void => search.start(wishOf(draft, around), overlay);
+  const { settings, set } = useSettings();
+  const runs = useRuns(project.id);
+  const [draft, setDraft] = useDraft(project.id);
+  const ready = wishesAnything(draft);
+  const wish = useMemo(() => wishOf(draft, settings.shelf), [draft, settings.shelf]);
+  const count = useReply({ kind: 'count', wish: { ...wish, name: 'counted' }, overlay });
+  const refused = count.current && count.reply?.kind === 'refused';
+  const begin = (): void => runs.show(searchRuns.start(project.id, wish, overlay));
+  const { shown } = runs;
   return (
     <>
       <ViewHeader
         title="Find ligands"
-        summary="Say what is wanted; every combination that the choice allows is estimated and ranked."
+        summary="Say what is wanted; every combination that the choice allows is looked at and ranked."
         actions={
-          <button type="button" className="button-main" disabled={!ready} onClick={begin}>
-            {search.phase === 'running' || search.phase === 'paused' ? 'Start again' : 'Start the search'}
+          <button type="button" className="button-main" disabled={!ready || refused} onClick={begin}>
+            {runs.all.some(({ phase }) => phase === 'running') ? 'Start another search' : 'Start the search'}
           </button>
         }
       />
       <div className="search">
-        <WishForm
-          draft={draft}
-          onChange={setDraft}
-          library={library}
-          hasTarget={project.targetLab !== null}
-        />
-        <div className="search-answer stack" aria-live="polite" aria-busy={search.phase === 'running'}>
-          {!ready && (
-            <p className="soft">
-              Nothing is wanted yet: give a window to absorb in or to let through, a spin state, a range of
-              10Dq or a colour.
-            </p>
+        <div className="stack">
+          <SavedWishes
+            wish={wish}
+            name={draft.name}
+            onName={(name) => setDraft({ ...draft, name })}
+            onOpen={(opened) => setDraft(draftOf(opened))}
+          />
+          <WishForm
+            draft={draft}
+            onChange={setDraft}
+            library={library}
+            target={project.targetLab}
+            usual={conditions}
+            shelf={settings.shelf}
+            onShelf={(shelf) => set('shelf', [...shelf])}
+          />
+        </div>
+        <div className="search-answer stack">
+          <Before ready={ready} count={count} />
+          <LeftOver
+            left={runs.leftOver}
+            onTakeUp={(left) => runs.show(searchRuns.takeUp(left, overlay))}
+            onForget={(left) => searchRuns.forget(left)}
+          />
+          {shown && (
+            <>
+              <RunTabs
+                runs={runs.all}
+                shown={shown}
+                onShow={runs.show}
+                onClose={(run) => searchRuns.close(run)}
+              />
+              <Run key={shown.setup.id} run={shown} />
+            </>
           )}
-          <ErrorPanel problems={search.problems} title="This wish cannot be searched for" />
-          <SearchProgressPanel search={search} />
-          {search.state !== null && search.state.results.length > 0 && (
-            <div className="panel search-table">
-              <ResultTable results={search.state.results} held={held} onAdd={add} />
-            </div>
-          )}
+          <WhyNotPanel wish={wish} results={shown?.results ?? []} />
         </div>
       </div>
     </>
   );
 }
 
-function useAdd(): (result: ShownResult) => void {
-  const { project } = useProject();
-  const store = useStore();
-  const act = useAction();
-  const toast = useToast();
-  return ({ metal, oxidationState, geometry, isomer, ligands, formula }) =>
-    void act(async () => {
-      const composition = { metal, oxidationState, geometry, ligands, isomer: isomer ?? null };
-      await store.candidates.create(project.id, [{ composition, tags: ['found'] }], `add ${formula}`);
-      toast({
-        message: `${formula} is in the project`,
-        undo: () => void act(() => store.journal.undo(project.id)),
-      });
-    });
+function Run({ run }: { readonly run: SearchRun }) {
+  const { rows } = useProject();
+  useVersion(run);
+  useVersion(rows);
+  const add = useShortlist(run);
+  const held = useMemo(
+    () => new Set(rows.values().map(({ composition }) => complexKey(composition))),
+    // The rows object stays the same while its content changes.
+    // eslint-disable-next-line react-hooks/exhaustive-deps
+    [rows, rows.version],
+  );
+  return (
+    <>
+      <ErrorPanel
+        problems={run.problems}
+        title={run.phase === 'failed' ? 'The search ended early' : 'This wish cannot be searched for'}
+      />
+      <RunPanel run={run} />
+      <ResultsPanel run={run} held={held} onAdd={add} />
+    </>
+  );
 }

@@ -1,5 +1,6 @@
 import type { Problem } from '../../../core/errors';
-import type { SearchResult } from '../../../core/search';
+import type { Composition } from '../../../core/record/composition';
+import type { SearchResult, WishScore } from '../../../core/search';
 import type { CandidateSummary } from '../estimateSummary';
 import type { Overlay } from '../protocol';
 
@@ -8,23 +9,56 @@ export interface ShownResult extends SearchResult {
   readonly summary: CandidateSummary;
 }
 
+/** What a search needs to go on after its worker has gone: plain data that can be stored. */
+export interface Checkpoint {
+  readonly evaluated: number;
+  readonly skipped: number;
+  readonly results: readonly SearchResult[];
+}
+
 export interface SearchState {
   readonly count: number;
   readonly evaluated: number;
   readonly skipped: number;
   /** Candidates gone through each second of running time; null before there is one to tell from. */
   readonly rate: number | null;
-  readonly results: readonly ShownResult[];
+  /** Null where the list is that of the report before: most reports bring no new result. */
+  readonly results: readonly ShownResult[] | null;
 }
 
+interface Wished {
+  readonly wish: unknown;
+  readonly overlay: Overlay;
+}
+
+/** Questions about a wish that are answered in one go. */
+export type Question = { readonly job: number } & Wished &
+  (
+    | { readonly kind: 'count' }
+    /** How well one complex would meet the wish, part by part. */
+    | { readonly kind: 'score'; readonly composition: Composition }
+  );
+
 export type ToSearch =
-  | { readonly kind: 'count'; readonly wish: unknown; readonly overlay: Overlay }
-  | { readonly kind: 'start'; readonly wish: unknown; readonly overlay: Overlay; readonly top: number }
+  | ({ readonly kind: 'start'; readonly top: number; readonly from: Checkpoint | null } & Wished)
   | { readonly kind: 'pause' }
-  | { readonly kind: 'resume' };
+  | { readonly kind: 'resume' }
+  | Question;
+
+/** One complex held against a wish. */
+export interface ScoredCandidate {
+  readonly formula: string;
+  readonly score: WishScore;
+  readonly summary: CandidateSummary;
+}
+
+export type Reply =
+  | { readonly kind: 'refused'; readonly problems: readonly Problem[] }
+  | { readonly kind: 'counted'; readonly count: number }
+  | { readonly kind: 'scored'; readonly scored: ScoredCandidate };
 
 export type FromSearch =
-  | { readonly kind: 'counted'; readonly count: number }
   | { readonly kind: 'refused'; readonly problems: readonly Problem[] }
   | { readonly kind: 'progress'; readonly state: SearchState; readonly finished: boolean }
-  | { readonly kind: 'failed'; readonly message: string };
+  | { readonly kind: 'answer'; readonly job: number; readonly reply: Reply }
+  | { readonly kind: 'failed'; readonly message: string; readonly job?: number };

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { defaultLibrary } from '../../../core/library';
-import type { FromSearch } from './protocol';
+import type { FromSearch, SearchState, ShownResult, ToSearch } from './protocol';
 import { SearchRunner } from './runner';
 
 const wish = {
@@ -11,10 +11,10 @@ const wish = {
   bands: [{ from_nm: 540, to_nm: 580 }],
 };
 
-function start() {
+function runner() {
   const posted: FromSearch[] = [];
   let tell: () => void = () => undefined;
-  const runner = new SearchRunner(
+  const running = new SearchRunner(
     (message) => {
       posted.push(message);
       tell();
@@ -26,42 +26,91 @@ function start() {
       tell = () => enough() && resolve();
       tell();
     });
-  return { runner, posted, until };
+  return { running, posted, until };
 }
+
+const startOf = (given: unknown, from: Extract<ToSearch, { kind: 'start' }>['from'] = null): ToSearch => ({
+  kind: 'start',
+  wish: given,
+  overlay: null,
+  top: 5,
+  from,
+});
+
+const states = (posted: readonly FromSearch[]): SearchState[] =>
+  posted.flatMap((message) => (message.kind === 'progress' ? [message.state] : []));
 
 const finished = (posted: readonly FromSearch[]) => posted.some((m) => m.kind === 'progress' && m.finished);
 
+const lastList = (posted: readonly FromSearch[]): readonly ShownResult[] =>
+  states(posted).findLast(({ results }) => results !== null)!.results!;
+
 describe('the search beside the window', () => {
   it('counts, runs to the end and hands over rows ready to be shown', async () => {
-    const { runner, posted, until } = start();
-    runner.handle({ kind: 'count', wish, overlay: null });
-    runner.handle({ kind: 'start', wish, overlay: null, top: 5 });
+    const { running, posted, until } = runner();
+    running.handle({ kind: 'count', job: 7, wish, overlay: null });
+    running.handle(startOf(wish));
     await until(() => finished(posted));
-    const counted = posted.find((m) => m.kind === 'counted')!;
-    const last = posted.at(-1)!;
-    if (last.kind !== 'progress') throw new Error('no progress');
-    expect(last.state.count).toBe(counted.count);
-    expect(last.state.evaluated + last.state.skipped).toBe(counted.count);
-    expect(last.state.results.length).toBeGreaterThan(0);
-    expect(last.state.results[0]!.summary.ok).toBe(true);
+    const counted = posted.find((m) => m.kind === 'answer');
+    const last = states(posted).at(-1)!;
+    expect(counted).toEqual({ kind: 'answer', job: 7, reply: { kind: 'counted', count: last.count } });
+    expect(last.evaluated + last.skipped).toBe(last.count);
+    expect(lastList(posted).length).toBeGreaterThan(0);
+    expect(lastList(posted)[0]!.summary.ok).toBe(true);
   });
 
   it('refuses a wish that contradicts itself before it starts', () => {
-    const { runner, posted } = start();
-    runner.handle({ kind: 'start', wish: { ...wish, ions: ['Zz9+'] }, overlay: null, top: 5 });
+    const { running, posted } = runner();
+    running.handle(startOf({ ...wish, ions: ['Zz9+'] }));
     expect(posted).toMatchObject([{ kind: 'refused', problems: [{ field: 'ions[0]' }] }]);
   });
 
   it('loses nothing when it is paused and resumed', async () => {
-    const { runner, posted, until } = start();
-    runner.handle({ kind: 'start', wish, overlay: null, top: 5 });
-    runner.handle({ kind: 'pause' });
+    const { running, posted, until } = runner();
+    running.handle(startOf(wish));
+    running.handle({ kind: 'pause' });
     await new Promise((resolve) => setTimeout(resolve, 60));
-    runner.handle({ kind: 'resume' });
+    running.handle({ kind: 'resume' });
     await until(() => finished(posted));
-    const last = posted.at(-1)!;
-    expect(last.kind === 'progress' && last.state.evaluated + last.state.skipped).toBe(
-      last.kind === 'progress' && last.state.count,
-    );
+    const last = states(posted).at(-1)!;
+    expect(last.evaluated + last.skipped).toBe(last.count);
+  });
+
+  it('goes on from what another worker left, with the same list at the end', async () => {
+    const whole = runner();
+    whole.running.handle(startOf(wish));
+    await whole.until(() => finished(whole.posted));
+    const again = runner();
+    const { evaluated, skipped } = states(whole.posted).at(-1)!;
+    const left = lastList(whole.posted).map(({ summary: _, ...result }) => result);
+    again.running.handle(startOf(wish, { evaluated, skipped, results: left }));
+    await again.until(() => finished(again.posted));
+    const end = states(again.posted).at(-1)!;
+    expect([end.evaluated, end.skipped]).toEqual([evaluated, skipped]);
+    expect(lastList(again.posted)).toEqual(lastList(whole.posted));
+  });
+
+  it('says of one complex how far it meets the wish, part by part', () => {
+    const { running, posted } = runner();
+    const composition = {
+      metal: 'Ni',
+      oxidationState: 2,
+      geometry: 'octahedral',
+      ligands: { en: 3 },
+    } as const;
+    running.handle({ kind: 'score', job: 1, wish, overlay: null, composition });
+    expect(posted).toMatchObject([
+      { kind: 'answer', reply: { kind: 'scored', scored: { score: { parts: [{ part: 'bands[0]' }] } } } },
+    ]);
+    running.handle({
+      kind: 'score',
+      job: 2,
+      wish,
+      overlay: null,
+      composition: { ...composition, ligands: { en: 4 } },
+    });
+    expect(posted[1]).toMatchObject({
+      reply: { kind: 'refused', problems: [{ code: 'coordination-number' }] },
+    });
   });
 });

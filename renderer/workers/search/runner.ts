@@ -1,16 +1,15 @@
 import type { ParameterLibrary } from '../../../core/library';
 import {
   checkWish,
-  countCandidates,
   scoreCandidate,
   searchWish,
-  spaceOf,
   type SearchProgress,
   type SearchResult,
   type Wish,
 } from '../../../core/search';
 import { type CandidateSummary, summarise } from '../estimateSummary';
 import type { Overlay } from '../protocol';
+import { answer } from './answer';
 import type { FromSearch, SearchState, ShownResult, ToSearch } from './protocol';
 
 /** Longest stretch of work between two looks at the mail, and between two reports, ms. */
@@ -40,44 +39,49 @@ export class SearchRunner {
         this.#paused = false;
         this.#wake();
         return;
-      case 'count':
       case 'start':
-        this.#begin(message).catch((error: unknown) =>
-          this.#post({ kind: 'failed', message: error instanceof Error ? error.message : String(error) }),
+        this.#start(message).catch((error: unknown) =>
+          this.#post({ kind: 'failed', message: wordsOf(error) }),
         );
+        return;
+      default:
+        try {
+          const reply = answer(message, this.#libraryOf(message.overlay));
+          this.#post({ kind: 'answer', job: message.job, reply });
+        } catch (error) {
+          this.#post({ kind: 'failed', job: message.job, message: wordsOf(error) });
+        }
     }
   }
 
-  async #begin(message: Extract<ToSearch, { wish: unknown }>): Promise<void> {
+  async #start(message: Extract<ToSearch, { kind: 'start' }>): Promise<void> {
     const library = this.#libraryOf(message.overlay);
     const checked = checkWish(message.wish, library);
-    if (!checked.ok) {
-      this.#post({ kind: 'refused', problems: checked.problems });
-    } else if (message.kind === 'count') {
-      this.#post({ kind: 'counted', count: countCandidates(spaceOf(checked.value, library)) });
-    } else {
-      await this.#search(checked.value, library, message.top);
-    }
+    if (!checked.ok) this.#post({ kind: 'refused', problems: checked.problems });
+    else await this.#search(checked.value, library, message);
   }
 
-  async #search(wish: Wish, library: ParameterLibrary, top: number): Promise<void> {
-    const run = searchWish(wish, library, { top });
-    const summaries = new Map<string, CandidateSummary>();
+  async #search(
+    wish: Wish,
+    library: ParameterLibrary,
+    { top, from }: Extract<ToSearch, { kind: 'start' }>,
+  ): Promise<void> {
+    const run = searchWish(wish, library, { top, ...(from === null ? {} : { from }) });
+    const report = reporter(wish, library, from === null ? 0 : from.evaluated + from.skipped);
     let running_ms = 0;
     let reported_ms = -report_ms;
     for (;;) {
-      const from = performance.now();
+      const began = performance.now();
       let step = run.next();
-      while (step.done !== true && performance.now() - from < stretch_ms) step = run.next();
-      running_ms += performance.now() - from;
+      while (step.done !== true && performance.now() - began < stretch_ms) step = run.next();
+      running_ms += performance.now() - began;
       if (step.done === true || running_ms - reported_ms >= report_ms) {
         reported_ms = running_ms;
-        const state = shown(step.value, running_ms, (result) => {
-          const known = summaries.get(result.id) ?? summaryOf(result, wish, library);
-          summaries.set(result.id, known);
-          return known;
+        this.#post({
+          kind: 'progress',
+          state: report(step.value, running_ms),
+          finished: step.done === true,
         });
-        this.#post({ kind: 'progress', state, finished: step.done === true });
       }
       if (step.done === true) return;
       if (this.#paused) await new Promise<void>((resolve) => (this.#wake = resolve));
@@ -85,6 +89,8 @@ export class SearchRunner {
     }
   }
 }
+
+const wordsOf = (error: unknown): string => (error instanceof Error ? error.message : String(error));
 
 function summaryOf(result: SearchResult, wish: Wish, library: ParameterLibrary): CandidateSummary {
   const { id, metal, oxidationState, geometry, isomer, ligands } = result;
@@ -94,17 +100,31 @@ function summaryOf(result: SearchResult, wish: Wish, library: ParameterLibrary):
     : summarise({ ok: true, prediction: scored.prediction });
 }
 
-function shown(
-  { count, evaluated, skipped, results }: SearchProgress,
-  running_ms: number,
-  summary: (result: SearchResult) => CandidateSummary,
-): SearchState {
-  const done = evaluated + skipped;
-  return {
-    count,
-    evaluated,
-    skipped,
-    rate: done === 0 ? null : (1000 * done) / Math.max(1, running_ms),
-    results: results.map((result): ShownResult => ({ ...result, summary: summary(result) })),
+/** Turns progress into reports: rows get what they show, and a list that did not change is not sent again. */
+function reporter(
+  wish: Wish,
+  library: ParameterLibrary,
+  doneBefore: number,
+): (progress: SearchProgress, running_ms: number) => SearchState {
+  const summaries = new Map<string, CandidateSummary>();
+  let last: string | null = null;
+  return ({ count, evaluated, skipped, results }, running_ms) => {
+    const ids = results.map(({ id }) => id).join('\n');
+    const same = ids === last;
+    last = ids;
+    const fresh = evaluated + skipped - doneBefore;
+    return {
+      count,
+      evaluated,
+      skipped,
+      rate: fresh <= 0 ? null : (1000 * fresh) / Math.max(1, running_ms),
+      results: same
+        ? null
+        : results.map((result): ShownResult => {
+            const known = summaries.get(result.id) ?? summaryOf(result, wish, library);
+            summaries.set(result.id, known);
+            return { ...result, summary: known };
+          }),
+    };
   };
 }
