@@ -11,3 +11,6 @@ export {
   type SearchProgress,
   type SearchResult,
 } from './run/searchWish';
+export { isAnswer, whyNot, type Exclusion, type WhyNot } from './advice/whyNot';
+export { relaxations, type Relaxation } from './advice/relax';
+export { neededFields, type NeededField } from './inverse/neededField';

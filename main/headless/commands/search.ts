@@ -1,5 +1,5 @@
 import { defaultLibrary } from '../../../core/library';
-import { checkWish, countCandidates, searchWish, spaceOf } from '../../../core/search';
+import { checkWish, countCandidates, relaxations, searchWish, spaceOf } from '../../../core/search';
 import { SpinhueError } from '../../../core/errors';
 import type { Command } from '../command';
 
@@ -38,6 +38,7 @@ export const search: Command = {
       count,
       evaluated,
       skipped,
+      ...(results.length > 0 ? {} : { advice: relaxations(checked.value, defaultLibrary).slice(0, 5) }),
       results: results.map(
         ({ id, metal, oxidationState, geometry, isomer, ligands, formula, ...score }, i) => ({
           rank: i + 1,
