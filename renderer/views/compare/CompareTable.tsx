@@ -21,7 +21,12 @@ const rows: readonly (readonly [name: string, cell: Cell])[] = [
   [
     'Moment',
     ({ prediction: { spin } }) => (
-      <NumberWithRange kind="plain" unit="μB" value={spin.momentSpinOnly_BM} range={spin.momentRange_BM} />
+      <>
+        {spin.momentRange_BM && (
+          <>{spin.momentRange_BM.map((end) => end.toFixed(1)).join(' to ')} μB usual, </>
+        )}
+        <span className="soft">spin only {spin.momentSpinOnly_BM.toFixed(2)} μB</span>
+      </>
     ),
   ],
   ['Ground term', ({ prediction }) => <TermSymbol label={prediction.groundTerm} />],

@@ -9,7 +9,7 @@ interface BeforeProps {
 /** What a search would have to look at, or why it cannot start. */
 export function Before({ ready, count: { reply, current, error } }: BeforeProps) {
   return (
-    <>
+    <div className="search-before stack">
       <p className="search-count" data-waiting={!current || undefined} role="status">
         {reply?.kind === 'counted'
           ? `${formatGiven(reply.count)} candidate${reply.count === 1 ? '' : 's'}`
@@ -28,6 +28,6 @@ export function Before({ ready, count: { reply, current, error } }: BeforeProps)
       {reply?.kind === 'refused' && (
         <ErrorPanel problems={reply.problems} title="This wish cannot be met by any complex" />
       )}
-    </>
+    </div>
   );
 }

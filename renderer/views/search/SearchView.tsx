@@ -83,6 +83,13 @@ export default function SearchView() {
               <Run key={shown.setup.id} run={shown} />
             </>
           )}
+          {!shown && runs.leftOver.length === 0 && (
+            <p className="soft">
+              The search runs beside the window: go on working, look elsewhere and come back. Each complex
+              gets the chance that it meets the whole wish, and that of each part, so that you can overrule
+              it.
+            </p>
+          )}
           <WhyNotPanel wish={wish} results={shown?.results ?? []} />
         </div>
       </div>

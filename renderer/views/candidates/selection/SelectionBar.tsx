@@ -1,4 +1,6 @@
+import { linkTo } from '../../../app/router/RouterContext';
 import { counted } from '../../../store';
+import { comparedAtMost, compareItem } from '../../compare/compareItem';
 import type { TableRow } from '../tableRow';
 import type { RowActions } from './useRowActions';
 import './SelectionBar.css';
@@ -27,6 +29,18 @@ export function SelectionBar({ rows, actions, onTag, onCopy, onClear }: Selectio
       <button type="button" onClick={() => actions.duplicate(rows)}>
         Duplicate
       </button>
+      {rows.length > 1 && (
+        <a
+          className="button"
+          href={linkTo({
+            view: 'compare',
+            project: rows[0]!.candidate.projectId,
+            item: compareItem(rows.map(({ candidate }) => candidate.id)),
+          })}
+        >
+          {rows.length > comparedAtMost ? 'Order list' : 'Compare'}
+        </a>
+      )}
       <button type="button" onClick={onCopy}>
         Copy as table
       </button>

@@ -47,17 +47,16 @@ export const ResultRow = memo(function ResultRow(props: ResultRowProps) {
         {kind.length > 0 && <span className="search-detail">{kind.join(', ')}</span>}
         {variants > 1 && <span className="search-detail">and {variants - 1} more like it</span>}
       </th>
-      <td>
-        <div className="search-light">
-          <TransmissionStrip transmittance={summary.ok ? summary.transmittance : null} />
-          <Swatch colour={summary.ok ? summary.colour : null} size="row" text="words" />
-        </div>
-      </td>
       <td className="search-expected">
+        <TransmissionStrip transmittance={summary.ok ? summary.transmittance : null} />
         {summary.ok ? (
           <>
+            <span className="search-colour">
+              <Swatch colour={summary.colour} size="row" text="none" />
+              {summary.colour?.words ?? 'colour not estimated'}
+            </span>
             {band === null ? (
-              <span>no spin-allowed band</span>
+              <span className="search-detail">no spin-allowed band</span>
             ) : (
               <NumberWithRange value={band.energy} sigma={band.sigma} />
             )}

@@ -23,8 +23,7 @@ export function ResultTable({ rows, chosen, held, onChoose, onAdd }: ResultTable
           <th scope="col">Place</th>
           <th scope="col">Chance</th>
           <th scope="col">Complex</th>
-          <th scope="col">Light that passes</th>
-          <th scope="col">First band, spin</th>
+          <th scope="col">Light that passes, first band, spin</th>
           <th scope="col">Part by part</th>
           <th scope="col">
             <span className="visually-hidden">Actions</span>

@@ -47,7 +47,7 @@ export function ResultsPanel({ run, held, onAdd }: ResultsPanelProps) {
   return (
     <section className="panel stack" aria-labelledby="search-results">
       <div className="search-results-head">
-        <h2 id="search-results">Best so far</h2>
+        <h2 id="search-results">{run.phase === 'finished' ? 'Best' : 'Best so far'}</h2>
         <SegmentedChoice
           legend="Show the results as"
           options={[
