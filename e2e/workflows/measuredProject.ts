@@ -10,7 +10,7 @@ import type { Candidate, FrozenPrediction, Project } from '../../core/record/pro
 import { seeded } from '../../core/testing/seeded';
 
 const at = '2026-03-01T09:00:00.000Z';
-const row = (id: string) => ({ id, revision: 0, createdAt: at, updatedAt: at, deletedAt: null });
+const dated = (id: string) => ({ id, revision: 0, createdAt: at, updatedAt: at, deletedAt: null });
 
 const octahedral = (metal: string, oxidationState: number, ligands: Record<string, number>): Composition => ({
   metal,
@@ -52,6 +52,8 @@ function predicted(composition: Composition, id: string, parameterSet: typeof wo
  */
 export function measuredProject(name: string): string {
   const random = seeded(11);
+  // Two such projects must not share a row.
+  const row = (id: string) => dated(`${name} ${id}`);
   const project: Project = {
     ...row('measured'),
     name,
@@ -68,9 +70,9 @@ export function measuredProject(name: string): string {
     void measurements.push({
       ...row(`m-${id}`),
       projectId: project.id,
-      candidateId: id,
+      candidateId: row(id).id,
       sampleId: null,
-      frozenPredictionId: `f-${id}`,
+      frozenPredictionId: row(`f-${id}`).id,
       revisions: [{ number: 0, at, by: 'MK', why: '', content }],
     });
   for (const [i, composition] of [...measuredComplexes, relative, ...ironComplexes].entries()) {
@@ -89,11 +91,11 @@ export function measuredProject(name: string): string {
       archived: false,
       notes: '',
     });
-    const prediction = predicted(composition, id, null);
+    const prediction = predicted(composition, row(id).id, null);
     frozenPredictions.push({
       ...row(`f-${id}`),
       projectId: project.id,
-      candidateId: id,
+      candidateId: row(id).id,
       frozenAt: at,
       reason: 'before the series was made',
       parameterHash: prediction.madeWith.parameterHash,
@@ -106,7 +108,7 @@ export function measuredProject(name: string): string {
         prediction.bands
           .filter(({ kind }) => kind === 'spin-allowed')
           .sort((one, other) => one.energy_cm1 - other.energy_cm1);
-      const there = allowed(predicted(composition, id, world));
+      const there = allowed(predicted(composition, row(id).id, world));
       const bands = allowed(prediction).flatMap((band, k) => {
         const found = there[k];
         if (found?.label !== band.label || band.energy_cm1 > 40_000) return [];
@@ -144,7 +146,7 @@ export function measuredProject(name: string): string {
       analyses.push({
         ...row(`a-${id}`),
         projectId: project.id,
-        measurementId: `m-${id}`,
+        measurementId: row(`m-${id}`).id,
         treatment: [],
         bandFit: null,
         assignment: bands.map(({ band, energy_cm1 }) => ({
