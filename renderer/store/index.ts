@@ -14,7 +14,7 @@ export { type AnalysisFields } from './repositories/analyses';
 export { blankCandidate, type CandidateFields, type NewCandidate } from './repositories/candidates';
 export { type AddedMeasurements, type Correction, type NewMeasurements } from './repositories/measurements';
 export { type ProjectFields } from './repositories/projects';
-export { type NamedBatch, type Phase } from './repositories/samples';
+export { type NamedBatch, type Phase, type SampleFields } from './repositories/samples';
 export { defaultSettings, type Settings } from './repositories/settings';
 export { type ShortlistEntry } from './repositories/shortlist';
 export { type Change, type Edit, type NewRow, type RecordTable, type RowOf } from './rows';

@@ -28,6 +28,8 @@ export interface BandFitPlotProps {
   readonly quantity?: string;
   readonly title?: string;
   readonly note?: string;
+  /** A click on the spectrum, or Enter on the point being read: where somebody takes a band to be. */
+  readonly onPick?: (place: { readonly wavenumber_cm1: number; readonly value: number }) => void;
 }
 
 /** Room under the spectrum for the residuals and the x axis, px. */
@@ -37,7 +39,7 @@ const dashes = ['7 3', '2 3', '7 3 2 3', '12 3', '1 2', '12 3 2 3'];
 
 /** A measured spectrum, the fit with its bands, and what the fit leaves over, on one axis. */
 export function BandFitPlot(props: BandFitPlotProps) {
-  const { measured, fit, bands, baseline = null, noise = null } = props;
+  const { measured, fit, bands, baseline = null, noise = null, onPick } = props;
   const { unit } = useUnit();
   const data = useMemo(() => curveInUnit(measured, unit), [measured, unit]);
   const grid = measured.wavenumber_cm1;
@@ -86,6 +88,12 @@ export function BandFitPlot(props: BandFitPlotProps) {
       zoom="x"
       empty={grid.length === 0 ? 'No spectrum yet: open a file to fit its bands.' : null}
       series={readings}
+      {...(onPick && {
+        onOpen: ({ series, index }) => {
+          const reading = readings[series]!;
+          onPick({ wavenumber_cm1: toWavenumber(reading.xs[index]!, unit), value: reading.ys[index]! });
+        },
+      })}
       table={{
         columns: [
           `position / ${unitText[unit]}`,

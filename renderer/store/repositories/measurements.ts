@@ -39,6 +39,10 @@ export interface Correction {
   readonly by: string;
   readonly why: string;
   readonly content: MeasurementContent;
+  /** Attachments that come with it. */
+  readonly files?: readonly StoredFile[];
+  /** For a measurement whose batch nobody had named yet. */
+  readonly batch?: { readonly candidate: Candidate; readonly named: NamedBatch } | null;
 }
 
 /** Measurements: added and corrected by further revisions, never overwritten. */
@@ -131,20 +135,24 @@ export class MeasurementRepository {
    * @throws {SpinhueError} without a reason, or where the kind would change
    * @throws {StoreError} `changed-meanwhile` where somebody corrected it since it was opened
    */
-  async correct(measurement: Measurement, { by, why, content }: Correction): Promise<Measurement> {
+  async correct(measurement: Measurement, correction: Correction): Promise<Measurement> {
+    const { by, why, content, files = [], batch = null } = correction;
     const fresh = checked(content);
     const label = `correct ${nameOf([content])}`;
-    return await this.#journal.record(measurement.projectId, label, (writer) =>
-      writer.update(
+    return await this.#journal.record(measurement.projectId, label, async (writer) => {
+      await writer.addMissing('files', files);
+      const sample = batch && (await this.#samples.named(writer, batch.candidate, batch.named));
+      return await writer.update(
         'measurements',
         measurement.id,
         (row) => ({
+          sampleId: row.sampleId ?? sample?.id ?? null,
           revisions: correctMeasurement(row, { at: writer.now, by, why: why.trim(), content: fresh })
             .revisions,
         }),
         measurement.revision,
-      ),
-    );
+      );
+    });
   }
 
   /** Into the bin. */

@@ -1,6 +1,7 @@
 import type { Candidate } from '../../../core/record/project';
 import type { Sample } from '../../../core/record/sample';
 import type { SpinhueDatabase } from '../database';
+import type { Journal } from '../journal/journal';
 import type { Writer } from '../journal/writer';
 
 export type Phase = Sample['phase'];
@@ -10,6 +11,12 @@ export interface NamedBatch {
   readonly batch: string;
   readonly phase: Phase;
 }
+
+/** What can be written down about a batch. */
+export type SampleFields = Omit<
+  Sample,
+  'id' | 'revision' | 'createdAt' | 'updatedAt' | 'deletedAt' | 'projectId' | 'candidateId'
+>;
 
 /** Batches as they were made. */
 export class SampleRepository {
@@ -56,5 +63,21 @@ export class SampleRepository {
       },
     ]);
     return made!;
+  }
+
+  /** A batch written down on its own, before or after something was measured on it. */
+  async add(journal: Journal, candidate: Candidate, fields: SampleFields): Promise<Sample> {
+    const { projectId, id: candidateId } = candidate;
+    return await journal.record(projectId, `write down batch ${fields.batch}`, async (writer) => {
+      const [made] = await writer.create('samples', [{ ...fields, projectId, candidateId }]);
+      return made!;
+    });
+  }
+
+  /** @throws {StoreError} `changed-meanwhile` where another window saved it since it was opened */
+  async change(journal: Journal, sample: Sample, fields: SampleFields): Promise<Sample> {
+    return await journal.record(sample.projectId, `change batch ${sample.batch}`, (writer) =>
+      writer.update('samples', sample.id, fields, sample.revision),
+    );
   }
 }

@@ -1,6 +1,7 @@
 import { useCallback, useMemo } from 'react';
 import { complexFormula } from '../../../core/library/complexFormula';
 import type { Analysis } from '../../../core/record/analysis';
+import type { Curve } from '../../../core/record/curve';
 import { currentContent } from '../../../core/record/revisions';
 import { linkTo, useRouter } from '../../app/router/RouterContext';
 import { useAction, useStored, useStore } from '../../app/services';
@@ -36,7 +37,9 @@ export default function AnalysisView() {
   const treatment = value?.analysis?.treatment;
   const result = useMemo(
     () =>
-      curve === null ? null : treated(curve, treatment ?? [], (wanted) => value?.blanks.get(wanted)?.curve),
+      curve === null
+        ? null
+        : treated(curve, treatment ?? [], (wanted) => value?.blanks.get(wanted)?.curve ?? undefined),
     [curve, treatment, value?.blanks],
   );
   if (error !== null)
@@ -145,34 +148,42 @@ async function everythingOf(store: Store, projectId: string, id: string) {
     content.kind === 'spectrum' ? ((await store.measurements.curve(content.curveId)) ?? null) : null;
   const frozen =
     (await store.frozenPredictions.ofProject(projectId)).get(measurement.frozenPredictionId ?? '') ?? null;
-  return {
-    measurement,
-    curve,
-    frozen,
-    analysis: await store.analyses.of(id),
-    blanks: await possibleBlanks(store, projectId, id),
-  };
+  const analysis = await store.analyses.of(id);
+  const subtracted = (analysis?.treatment ?? []).flatMap((step) =>
+    step.op === 'subtract blank' ? step.curveId : [],
+  );
+  const blanks = await possibleBlanks(store, projectId, id, new Set(subtracted));
+  return { measurement, curve, frozen, analysis, blanks };
 }
 
 const nothing = {
   curve: null,
   frozen: null,
   analysis: null as Analysis | null,
-  blanks: new Map<string, never>(),
+  blanks: new Map<string, Blank>() as ReadonlyMap<string, Blank>,
 };
 
-/** Other spectra of the project by the id of their curve; the curves of those that serve as a blank are few and small. */
-async function possibleBlanks(store: Store, projectId: string, id: string) {
-  const blanks = new Map<
-    string,
-    { name: string; curve: Awaited<ReturnType<Store['measurements']['curve']>> }
-  >();
+interface Blank {
+  readonly name: string;
+  /** Null until a step subtracts it: numbers are read only where they are used. */
+  readonly curve: Curve | null;
+}
+
+/** Other spectra of the project by the id of their curve, those that are subtracted first. */
+async function possibleBlanks(
+  store: Store,
+  projectId: string,
+  id: string,
+  subtracted: ReadonlySet<string>,
+): Promise<ReadonlyMap<string, Blank>> {
+  const blanks = new Map<string, Blank>();
   for (const each of await store.measurements.ofProject(projectId)) {
     const content = currentContent(each);
     if (content.kind !== 'spectrum' || each.id === id || blanks.has(content.curveId)) continue;
-    if (blanks.size >= mostBlanks) break;
-    const name = content.name ?? content.source?.fileName ?? 'a spectrum';
-    blanks.set(content.curveId, { name, curve: await store.measurements.curve(content.curveId) });
+    const isUsed = subtracted.has(content.curveId);
+    if (blanks.size >= mostBlanks && !isUsed) continue;
+    const curve = isUsed ? ((await store.measurements.curve(content.curveId)) ?? null) : null;
+    blanks.set(content.curveId, { name: content.name ?? content.source?.fileName ?? 'a spectrum', curve });
   }
   return blanks;
 }

@@ -15,12 +15,14 @@ import { PairTable } from '../agreement/PairTable';
 import { informedBy, pairsOf } from '../agreement/recordPairs';
 import { keepingTheRest } from './draft/contentOf';
 import { blankMeasurement, draftOf } from './draft/measurementDraft';
+import { substanceOf } from './draft/substance';
 import { type Entered, MeasurementDialog } from './form/MeasurementDialog';
 import { DropArea } from './importing/DropArea';
 import { ImportDialog, type ImportedSpectra } from './importing/ImportDialog';
 import { PasteSpectrum } from './importing/PasteSpectrum';
 import type { IncomingFile } from './importing/useReadings';
 import { MeasurementList } from './MeasurementList';
+import { SamplePanel } from './samples/SamplePanel';
 
 const shared = ['measurements', 'frozenPredictions', 'samples', 'analyses', 'parameterSets'] as const;
 
@@ -51,16 +53,26 @@ export function CandidateRecord({ candidate }: { readonly candidate: Candidate }
       standing: await from.frozenPredictions.of(candidate.id),
       frozen: await from.frozenPredictions.ofProject(candidate.projectId),
       analyses: await from.analyses.ofProject(candidate.projectId),
+      samples: await from.samples.of(candidate.id),
       sets: await from.parameterSets.of(candidate.projectId),
     }),
     [candidate.id, candidate.projectId],
   );
   const { value, error } = useStored(ask, shared);
+  const substance = useMemo(() => substanceOf(candidate, library), [candidate, library]);
   const undo = (): void => void act(() => store.journal.undo(candidate.projectId));
-  const add = ({ content, batch, by }: Entered): Promise<boolean> =>
+  const add = ({ content, batch, by, files }: Entered): Promise<boolean> =>
     act(async () => {
       const contents = [content];
-      const { froze } = await store.measurements.add({ candidate, contents, batch, by, prediction, formula });
+      const { froze } = await store.measurements.add({
+        candidate,
+        contents,
+        batch,
+        by,
+        prediction,
+        formula,
+        files,
+      });
       toast({ message: froze ? 'Prediction frozen, then measurement saved' : 'Measurement saved', undo });
     });
   const keep = (imported: ImportedSpectra): Promise<boolean> =>
@@ -79,11 +91,16 @@ export function CandidateRecord({ candidate }: { readonly candidate: Candidate }
       const files = await host.openFiles({ kind: 'spectrum', many: true });
       if (files.length > 0) setIncoming(files);
     });
-  const correct = (measurement: Measurement, { content, by, why }: Entered): Promise<boolean> =>
+  const correct = (measurement: Measurement, entered: Entered): Promise<boolean> =>
     act(async () => {
-      const whole = keepingTheRest(currentContent(measurement), content);
-      const signed = settings.initials || by;
-      await store.measurements.correct(measurement, { by: signed, why, content: whole });
+      const { by, why, files, batch } = entered;
+      await store.measurements.correct(measurement, {
+        by: settings.initials || by,
+        why,
+        files,
+        content: keepingTheRest(currentContent(measurement), entered.content),
+        batch: batch && { candidate, named: batch },
+      });
       toast({ message: 'Saved as a new revision', undo });
     });
   const remove = (measurement: Measurement): void =>
@@ -141,8 +158,14 @@ export function CandidateRecord({ candidate }: { readonly candidate: Candidate }
         {value.measurements.length === 0 && (
           <p>Nothing measured yet. Drop a spectrum file here, import one, or type what was read off.</p>
         )}
-        <MeasurementList measurements={value.measurements} onCorrect={setOpen} onDelete={remove} />
+        <MeasurementList
+          measurements={value.measurements}
+          samples={value.samples}
+          onCorrect={setOpen}
+          onDelete={remove}
+        />
       </section>
+      <SamplePanel candidate={candidate} samples={value.samples} />
       {pairs.length > 0 && (
         <section className="panel stack" aria-labelledby="record-pairs">
           <h2 id="record-pairs">Measured beside predicted</h2>
@@ -153,7 +176,9 @@ export function CandidateRecord({ candidate }: { readonly candidate: Candidate }
       {open !== null && draft !== null && (
         <MeasurementDialog
           start={draft}
-          correcting={open !== 'new'}
+          substance={substance}
+          before={open === 'new' ? null : currentContent(open)}
+          withSample={open === 'new' || open.sampleId === null}
           notice={open === 'new' ? notice : null}
           onSave={(entered) => (open === 'new' ? add(entered) : correct(open, entered))}
           onClose={() => setOpen(null)}

@@ -23,6 +23,9 @@ interface FitPanelProps {
   readonly onSave: (fit: BandFitRecord | null, label: string) => Promise<boolean>;
 }
 
+/** Where nobody said a width: d-d bands of solutions are 2000 to 5000 cm⁻¹ wide (common practice). */
+const usualWidth_cm1 = 3000;
+
 const text = (value: number, figures: number): string => String(Number(value.toPrecision(figures)));
 const draftOf = ({ centre_cm1, fwhm_cm1, height }: GaussianBand): StartDraft => ({
   centre: text(centre_cm1, 5),
@@ -86,7 +89,10 @@ export function FitPanel({ points, quantity, kept, onSave }: FitPanelProps) {
         baseline={curves?.baseline ?? null}
         quantity={quantity === 'molar-absorptivity' ? 'Molar absorptivity / L mol⁻¹ cm⁻¹' : 'Absorbance'}
         title="Spectrum and fitted bands"
-        note="Bands are Gaussians in wavenumber. A maximum is not a centre: overlap moves it."
+        note="Bands are Gaussians in wavenumber. A maximum is not a centre: overlap moves it. Click on the curve, or press Enter on the point being read, to start a band there."
+        onPick={({ wavenumber_cm1: centre_cm1, value: height }) => {
+          if (height > 0) setStart([...start, draftOf({ centre_cm1, fwhm_cm1: usualWidth_cm1, height })]);
+        }}
       />
       <StartTable start={start} range={range} onStart={setStart} onRange={setRange} />
       <div className="analysis-actions">
@@ -102,7 +108,10 @@ export function FitPanel({ points, quantity, kept, onSave }: FitPanelProps) {
         <button type="button" onClick={suggest}>
           Suggest from the curve
         </button>
-        <button type="button" onClick={() => setStart([...start, { centre: '', width: '3000', height: '' }])}>
+        <button
+          type="button"
+          onClick={() => setStart([...start, { centre: '', width: String(usualWidth_cm1), height: '' }])}
+        >
           Add a band
         </button>
         <button

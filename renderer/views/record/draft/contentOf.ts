@@ -1,37 +1,10 @@
-import type { Problem } from '../../../../core/errors';
 import { accepted, type Checked, refused } from '../../../../core/errors';
 import type { Conditions, ListedBand, MeasurementContent } from '../../../../core/record/measurement';
 import type { Uncertain } from '../../../../core/record/uncertain';
-import { readNumber } from '../../../app/form';
+import type { Substance } from './substance';
+import { momentOf, seriesOf } from './magneticContent';
+import { Reader, words } from './reader';
 import type { BandDraft, ConditionsDraft, MeasurementDraft } from './measurementDraft';
-
-const words = (text: string): string | null => (text.trim() === '' ? null : text.trim().slice(0, 200));
-
-/** Collects what is wrong while numbers are read, so that all of it is said at once. */
-class Reader {
-  readonly problems: Problem[] = [];
-
-  refuse(field: string, message: string, remedy: string): null {
-    this.problems.push({ code: 'out-of-range', field, message, remedy });
-    return null;
-  }
-
-  /** Null for an empty text; a problem for anything that is no number above `above`. */
-  number(text: string, field: string, above = 0): number | null {
-    if (text.trim() === '') return null;
-    const value = readNumber(text);
-    if (value === null)
-      return this.refuse(field, `“${text}” is not a number.`, 'Enter digits, or leave it empty.');
-    if (value <= above)
-      return this.refuse(field, `${text} is not above ${above}.`, 'Correct it, or leave it empty.');
-    return value;
-  }
-
-  certain(text: string, field: string): { value: number; u: null } | null {
-    const value = this.number(text, field);
-    return value === null ? null : { value, u: null };
-  }
-}
 
 /** Conditions as typed; an empty field is a missing one, never a zero. */
 function conditionsFrom(draft: ConditionsDraft, reader: Reader): Conditions {
@@ -40,11 +13,11 @@ function conditionsFrom(draft: ConditionsDraft, reader: Reader): Conditions {
     operator: words(draft.operator),
     instrument: words(draft.instrument),
     solvent: words(draft.solvent),
-    temperature_K: reader.certain(draft.temperature, 'temperature'),
-    concentration_mM: reader.certain(draft.concentration, 'concentration'),
-    path_cm: reader.certain(draft.path, 'path length'),
-    blank: null,
-    bandwidth_nm: null,
+    temperature_K: reader.uncertain(draft.temperature, draft.temperatureU, 'temperature'),
+    concentration_mM: reader.uncertain(draft.concentration, draft.concentrationU, 'concentration'),
+    path_cm: reader.uncertain(draft.path, draft.pathU, 'path length'),
+    blank: words(draft.blank),
+    bandwidth_nm: reader.number(draft.bandwidth, 'spectral bandwidth'),
   };
 }
 
@@ -89,49 +62,69 @@ function band(draft: BandDraft, index: number, unit: 'nm' | 'cm-1', reader: Read
 const isBlank = ({ position, uncertainty, absorptivity }: BandDraft): boolean =>
   `${position}${uncertainty}${absorptivity}`.trim() === '';
 
-/** The measurement that a draft describes, or everything that is wrong with it. */
-export function contentOf(draft: MeasurementDraft): Checked<MeasurementContent> {
+/** The bands of a draft from low to high energy; null with a problem where there is none. */
+function bandsOf(draft: MeasurementDraft, unit: 'nm' | 'cm-1', reader: Reader): ListedBand[] | null {
+  const bands = draft.bands
+    .filter((each) => !isBlank(each))
+    .map((each, index) => band(each, index, unit, reader))
+    .filter((each) => each !== null);
+  if (bands.length === 0 && reader.problems.length === 0)
+    return reader.refuse('bands', 'No band is entered.', 'Enter the position of at least one band.');
+  return bands.sort((one, other) => one.energy_cm1.value - other.energy_cm1.value);
+}
+
+/**
+ * The measurement that a draft describes, or everything that is wrong with it.
+ *
+ * @param substance What molar mass and diamagnetism are computed for.
+ * @param before Where it corrects a measurement: its numbers of a spectrum stay.
+ */
+export function contentOf(
+  draft: MeasurementDraft,
+  substance: Substance,
+  before: MeasurementContent | null = null,
+): Checked<MeasurementContent> {
   const reader = new Reader();
   const common = {
     conditions: conditionsFrom(draft, reader),
     remark: draft.remark.trim(),
     attachments: [],
   };
-  const content = particulars(draft, reader, common);
+  const content = particulars(draft, substance, before, reader, common);
   return content === null || reader.problems.length > 0 ? refused(...reader.problems) : accepted(content);
 }
 
+type Common = Pick<MeasurementContent, 'conditions' | 'remark' | 'attachments'>;
+
 function particulars(
   draft: MeasurementDraft,
+  substance: Substance,
+  before: MeasurementContent | null,
   reader: Reader,
-  common: Pick<MeasurementContent, 'conditions' | 'remark' | 'attachments'>,
+  common: Common,
 ): MeasurementContent | null {
   switch (draft.kind) {
+    case 'spectrum':
+      return before?.kind === 'spectrum'
+        ? { ...before, ...common }
+        : reader.refuse('spectrum', 'A spectrum comes from a file.', 'Import or paste it.');
     case 'band list': {
-      const bands = draft.bands
-        .filter((each) => !isBlank(each))
-        .map((each, index) => band(each, index, draft.reportedIn, reader))
-        .filter((each) => each !== null);
-      if (bands.length === 0 && reader.problems.length === 0)
-        return reader.refuse('bands', 'No band is entered.', 'Enter the position of at least one band.');
-      bands.sort((one, other) => one.energy_cm1.value - other.energy_cm1.value);
-      return { kind: 'band list', ...common, reportedIn: draft.reportedIn, bands };
+      const bands = bandsOf(draft, draft.reportedIn, reader);
+      return bands && { kind: 'band list', ...common, reportedIn: draft.reportedIn, bands };
+    }
+    case 'emission': {
+      const maxima = bandsOf(draft, draft.reportedIn, reader);
+      const excitation_nm = reader.number(draft.excitation, 'excitation');
+      const lifetime_us = reader.uncertain(draft.lifetime, '', 'lifetime');
+      return maxima && { kind: 'emission', ...common, maxima, excitation_nm, lifetime_us };
     }
     case 'moment': {
-      const value = reader.number(draft.moment, 'moment', -1e-9);
-      const u = reader.number(draft.momentUncertainty, 'uncertainty of the moment');
-      if (value === null)
-        return draft.moment.trim() === ''
-          ? reader.refuse('moment', 'The moment is missing.', 'Enter it in Bohr magnetons.')
-          : null;
-      return {
-        kind: 'moment',
-        ...common,
-        method: draft.method,
-        readings: {},
-        diamagnetism: { chi_cm3_mol: 0, basis: 'none' },
-        moment_BM: { value, u },
-      };
+      const moment = momentOf(draft, common.conditions, substance, reader);
+      return moment && { kind: 'moment', ...common, method: draft.method, ...moment };
+    }
+    case 'moment series': {
+      const series = seriesOf(draft, substance, reader);
+      return series && { kind: 'moment series', ...common, ...series };
     }
     case 'observed colour': {
       const seen = words(draft.words);
@@ -161,17 +154,6 @@ function keepingUncertainty<T extends Uncertain | null>(before: T, corrected: T)
   return sameNumber(before.value, corrected.value) && corrected.u === null ? before : corrected;
 }
 
-function keepingConditions(before: Conditions, corrected: Conditions): Conditions {
-  return {
-    ...corrected,
-    temperature_K: keepingUncertainty(before.temperature_K, corrected.temperature_K),
-    concentration_mM: keepingUncertainty(before.concentration_mM, corrected.concentration_mM),
-    path_cm: keepingUncertainty(before.path_cm, corrected.path_cm),
-    blank: before.blank,
-    bandwidth_nm: before.bandwidth_nm,
-  };
-}
-
 /** A band whose position was not touched keeps its width and note; a moved one is another band. */
 const keepingBands = (before: readonly ListedBand[], corrected: readonly ListedBand[]): ListedBand[] =>
   corrected.map((band) => {
@@ -187,20 +169,32 @@ const keepingBands = (before: readonly ListedBand[], corrected: readonly ListedB
         };
   });
 
-/** A corrected measurement keeps what the form does not show: attachments, readings, uncertainties, widths. */
+/** A correction that was not touched keeps how it was come by. */
+const sameSize = <T extends { readonly chi_cm3_mol: number }>(before: T, corrected: T): T =>
+  sameNumber(before.chi_cm3_mol, corrected.chi_cm3_mol) ? before : corrected;
+
+/** A corrected measurement keeps what the form does not show: widths and notes of bands, how a value was come by. */
 export function keepingTheRest(
   before: MeasurementContent,
   corrected: MeasurementContent,
 ): MeasurementContent {
-  const rest = {
-    attachments: before.attachments,
-    conditions: keepingConditions(before.conditions, corrected.conditions),
-  };
   if (before.kind === 'band list' && corrected.kind === 'band list')
-    return { ...corrected, ...rest, bands: keepingBands(before.bands, corrected.bands) };
-  if (before.kind === 'moment' && corrected.kind === 'moment')
-    return { ...corrected, ...rest, readings: before.readings, diamagnetism: before.diamagnetism };
+    return { ...corrected, bands: keepingBands(before.bands, corrected.bands) };
+  if (before.kind === 'moment' && corrected.kind === 'moment') {
+    // A moment that was typed says nothing new about its correction for diamagnetism.
+    const typed = Object.keys({ ...before.readings, ...corrected.readings }).length === 0;
+    const diamagnetism = typed ? before.diamagnetism : sameSize(before.diamagnetism, corrected.diamagnetism);
+    return { ...corrected, diamagnetism };
+  }
+  if (before.kind === 'moment series' && corrected.kind === 'moment series')
+    return { ...corrected, diamagnetism: sameSize(before.diamagnetism, corrected.diamagnetism) };
+  if (before.kind === 'emission' && corrected.kind === 'emission')
+    return {
+      ...corrected,
+      maxima: keepingBands(before.maxima, corrected.maxima),
+      lifetime_us: keepingUncertainty(before.lifetime_us, corrected.lifetime_us),
+    };
   if (before.kind === 'observed colour' && corrected.kind === 'observed colour')
-    return { ...corrected, ...rest, lab: before.lab };
-  return { ...corrected, ...rest };
+    return { ...corrected, lab: before.lab };
+  return corrected;
 }

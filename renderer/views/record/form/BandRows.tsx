@@ -1,5 +1,6 @@
 import { bandFeatures } from '../../../../core/record/measurement';
 import { SegmentedChoice } from '../../../parts';
+import { pastedCells } from '../draft/pastedCells';
 import { blankBand, type BandDraft, type Feature, type MeasurementDraft } from '../draft/measurementDraft';
 
 interface BandRowsProps {
@@ -13,6 +14,23 @@ export function BandRows({ draft, onChange }: BandRowsProps) {
   const unit = reportedIn === 'nm' ? 'nm' : 'cm⁻¹';
   const set = (index: number, change: Partial<BandDraft>): void =>
     onChange({ bands: bands.map((each, place) => (place === index ? { ...each, ...change } : each)) });
+  /** Several lines pasted into a position fill the lines from there on: position, ε, and `sh` for a shoulder. */
+  const paste = (index: number, text: string): boolean => {
+    const cells = pastedCells(text);
+    if (cells.length === 0 || (cells.length === 1 && cells[0]!.length === 1)) return false;
+    const pasted = cells.map(([position = '', ...rest]): BandDraft => {
+      const shoulder = /sh/i.test([position, ...rest].join(' '));
+      const number = (cell = ''): string => cell.replace(/[^\d.,eE+-]/g, '');
+      return {
+        position: number(position),
+        uncertainty: '',
+        absorptivity: number(rest.find((cell) => /\d/.test(cell))),
+        feature: shoulder ? 'shoulder' : 'maximum',
+      };
+    });
+    onChange({ bands: [...bands.slice(0, index), ...pasted, ...bands.slice(index + pasted.length)] });
+    return true;
+  };
   return (
     <div className="stack">
       <SegmentedChoice
@@ -45,6 +63,7 @@ export function BandRows({ draft, onChange }: BandRowsProps) {
                   label={`Position of band ${index + 1} in ${unit}`}
                   value={band.position}
                   onChange={(position) => set(index, { position })}
+                  onPaste={(text) => paste(index, text)}
                 />
               </td>
               <td>
@@ -90,7 +109,8 @@ export function BandRows({ draft, onChange }: BandRowsProps) {
       <div>
         <button type="button" onClick={() => onChange({ bands: [...bands, blankBand] })}>
           Another band
-        </button>
+        </button>{' '}
+        <span className="soft small">or paste lines of position and ε into a position</span>
       </div>
     </div>
   );
@@ -100,9 +120,11 @@ interface NumberCellProps {
   readonly label: string;
   readonly value: string;
   readonly onChange: (value: string) => void;
+  /** Whether the pasted text was taken. */
+  readonly onPaste?: (text: string) => boolean;
 }
 
-const NumberCell = ({ label, value, onChange }: NumberCellProps) => (
+const NumberCell = ({ label, value, onChange, onPaste }: NumberCellProps) => (
   <input
     className="record-number"
     aria-label={label}
@@ -110,5 +132,8 @@ const NumberCell = ({ label, value, onChange }: NumberCellProps) => (
     autoComplete="off"
     value={value}
     onChange={(event) => onChange(event.currentTarget.value)}
+    onPaste={(event) => {
+      if (onPaste?.(event.clipboardData.getData('text'))) event.preventDefault();
+    }}
   />
 );

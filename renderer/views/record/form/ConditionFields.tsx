@@ -2,6 +2,7 @@ import { phases } from '../../../../core/record/sample';
 import { Field } from '../../../app/form';
 import type { ConditionsDraft } from '../draft/measurementDraft';
 import { TextField } from './TextField';
+import { UncertainField } from './UncertainField';
 
 interface ConditionFieldsProps {
   readonly draft: ConditionsDraft;
@@ -16,19 +17,37 @@ export function ConditionFields({ draft, onChange, withSample }: ConditionFields
     <fieldset className="record-fields">
       <legend>Conditions, as far as they are known</legend>
       <TextField label="Solvent" value={draft.solvent} onChange={(solvent) => onChange({ solvent })} />
-      <TextField
+      <UncertainField
         label="Temperature"
         unit="K"
         value={draft.temperature}
+        u={draft.temperatureU}
         onChange={(temperature) => onChange({ temperature })}
+        onU={(temperatureU) => onChange({ temperatureU })}
       />
-      <TextField
+      <UncertainField
         label="Concentration"
         unit="mM"
         value={draft.concentration}
+        u={draft.concentrationU}
         onChange={(concentration) => onChange({ concentration })}
+        onU={(concentrationU) => onChange({ concentrationU })}
       />
-      <TextField label="Path length" unit="cm" value={draft.path} onChange={(path) => onChange({ path })} />
+      <UncertainField
+        label="Path length"
+        unit="cm"
+        value={draft.path}
+        u={draft.pathU}
+        onChange={(path) => onChange({ path })}
+        onU={(pathU) => onChange({ pathU })}
+      />
+      <TextField label="Blank" value={draft.blank} onChange={(blank) => onChange({ blank })} />
+      <TextField
+        label="Spectral bandwidth"
+        unit="nm"
+        value={draft.bandwidth}
+        onChange={(bandwidth) => onChange({ bandwidth })}
+      />
       {withSample && (
         <>
           <TextField label="Batch" value={draft.batch} onChange={(batch) => onChange({ batch })} />

@@ -1,11 +1,14 @@
 import { useId, useState, type FormEvent } from 'react';
 import type { Problem } from '../../../../core/errors';
+import type { StoredFile } from '../../../../core/record/file';
 import type { MeasurementContent } from '../../../../core/record/measurement';
 import { Field } from '../../../app/form';
 import { Dialog, ErrorPanel, SegmentedChoice } from '../../../parts';
 import type { NamedBatch } from '../../../store';
 import { contentOf } from '../draft/contentOf';
 import type { ConditionsDraft, MeasurementDraft } from '../draft/measurementDraft';
+import type { Substance } from '../draft/substance';
+import { AttachmentFields, type Attached } from './AttachmentFields';
 import { ConditionFields } from './ConditionFields';
 import { ParticularFields } from './ParticularFields';
 import { TextField } from './TextField';
@@ -17,12 +20,17 @@ export interface Entered {
   readonly by: string;
   /** Only for a correction. */
   readonly why: string;
+  /** Attachments that are not in the record yet. */
+  readonly files: readonly StoredFile[];
 }
 
 interface MeasurementDialogProps {
   readonly start: MeasurementDraft;
-  /** A correction keeps the kind and asks for the reason. */
-  readonly correcting: boolean;
+  readonly substance: Substance;
+  /** What is corrected: it keeps its kind, and the reason is asked for. Null for a new measurement. */
+  readonly before: MeasurementContent | null;
+  /** Whether the batch can be named here: it stays with a measurement for good. */
+  readonly withSample: boolean;
   /** Said above the form: what saving will also do. */
   readonly notice: string | null;
   /** Resolves to whether it was saved. */
@@ -34,17 +42,22 @@ export const batchOf = ({ batch, phase }: ConditionsDraft): NamedBatch | null =>
   batch.trim() === '' ? null : { batch: batch.trim().slice(0, 100), phase: phase === '' ? null : phase };
 
 /** A measurement as it is typed, new or corrected. */
-export function MeasurementDialog({ start, correcting, notice, onSave, onClose }: MeasurementDialogProps) {
+export function MeasurementDialog(props: MeasurementDialogProps) {
+  const { start, substance, before, withSample, notice, onSave, onClose } = props;
+  const correcting = before !== null;
   const form = useId();
   const [draft, setDraft] = useState(start);
   const [why, setWhy] = useState('');
+  const [attached, setAttached] = useState<readonly Attached[]>(() =>
+    (before?.attachments ?? []).map((each) => ({ ...each, file: null })),
+  );
   const [problems, setProblems] = useState<readonly Problem[]>([]);
   const [saving, setSaving] = useState(false);
-  const change = (part: Partial<MeasurementDraft>): void => setDraft((before) => ({ ...before, ...part }));
+  const change = (part: Partial<MeasurementDraft>): void => setDraft((old) => ({ ...old, ...part }));
   const submit = (event: FormEvent): void => {
     event.preventDefault();
     if (saving) return;
-    const checked = contentOf(draft);
+    const checked = contentOf(draft, substance, before);
     const found = checked.ok ? [] : [...checked.problems];
     if (correcting && why.trim() === '')
       found.push({
@@ -56,12 +69,17 @@ export function MeasurementDialog({ start, correcting, notice, onSave, onClose }
     setProblems(found);
     if (!checked.ok || found.length > 0) return;
     setSaving(true);
-    void onSave({ content: checked.value, batch: batchOf(draft), by: draft.operator.trim(), why }).then(
-      (done) => {
-        setSaving(false);
-        if (done) onClose();
-      },
-    );
+    const attachments = attached.map(({ name, fileId }) => ({ name, fileId }));
+    void onSave({
+      content: { ...checked.value, attachments },
+      batch: batchOf(draft),
+      by: draft.operator.trim(),
+      why,
+      files: attached.flatMap(({ file }) => file ?? []),
+    }).then((done) => {
+      setSaving(false);
+      if (done) onClose();
+    });
   };
   return (
     <Dialog
@@ -88,6 +106,8 @@ export function MeasurementDialog({ start, correcting, notice, onSave, onClose }
             options={[
               { id: 'band list', label: 'Bands' },
               { id: 'moment', label: 'Moment' },
+              { id: 'moment series', label: 'Moments over T' },
+              { id: 'emission', label: 'Emission' },
               { id: 'observed colour', label: 'Colour seen' },
               { id: 'note', label: 'Note' },
             ]}
@@ -95,8 +115,8 @@ export function MeasurementDialog({ start, correcting, notice, onSave, onClose }
             onChange={(kind) => change({ kind })}
           />
         )}
-        <ParticularFields draft={draft} onChange={change} />
-        <ConditionFields draft={draft} onChange={change} withSample={!correcting} />
+        <ParticularFields draft={draft} substance={substance} onChange={change} />
+        <ConditionFields draft={draft} onChange={change} withSample={withSample} />
         <Field label="Note">
           {(attributes) => (
             <textarea
@@ -107,6 +127,7 @@ export function MeasurementDialog({ start, correcting, notice, onSave, onClose }
             />
           )}
         </Field>
+        <AttachmentFields attached={attached} onChange={setAttached} />
         {correcting && (
           <TextField
             label="Why it is corrected"

@@ -1,60 +1,45 @@
-import { Field } from '../../../app/form';
 import type { MeasurementDraft } from '../draft/measurementDraft';
+import type { Substance } from '../draft/substance';
 import { BandRows } from './BandRows';
+import { MomentFields } from './MomentFields';
+import { SeriesFields } from './SeriesFields';
 import { TextField } from './TextField';
 
 interface ParticularFieldsProps {
   readonly draft: MeasurementDraft;
+  readonly substance: Substance;
   readonly onChange: (change: Partial<MeasurementDraft>) => void;
 }
 
-const methods = ['Evans', 'balance', 'magnetometer', 'typed'] as const;
-const methodWords = {
-  Evans: 'Evans, NMR',
-  balance: 'balance',
-  magnetometer: 'magnetometer',
-  typed: 'not stated',
-};
-
 /** What only this kind of measurement has. */
-export function ParticularFields({ draft, onChange }: ParticularFieldsProps) {
+export function ParticularFields({ draft, substance, onChange }: ParticularFieldsProps) {
   switch (draft.kind) {
     case 'band list':
       return <BandRows draft={draft} onChange={onChange} />;
-    case 'moment':
+    case 'emission':
       return (
-        <div className="record-fields">
-          <TextField
-            label="Effective moment"
-            unit="μB"
-            value={draft.moment}
-            onChange={(moment) => onChange({ moment })}
-          />
-          <TextField
-            label="Uncertainty"
-            unit="μB"
-            value={draft.momentUncertainty}
-            onChange={(momentUncertainty) => onChange({ momentUncertainty })}
-          />
-          <Field label="Method">
-            {(attributes) => (
-              <select
-                {...attributes}
-                value={draft.method}
-                onChange={(event) =>
-                  onChange({ method: event.currentTarget.value as MeasurementDraft['method'] })
-                }
-              >
-                {methods.map((method) => (
-                  <option key={method} value={method}>
-                    {methodWords[method]}
-                  </option>
-                ))}
-              </select>
-            )}
-          </Field>
+        <div className="stack">
+          <BandRows draft={draft} onChange={onChange} />
+          <div className="record-fields">
+            <TextField
+              label="Excited at"
+              unit="nm"
+              value={draft.excitation}
+              onChange={(excitation) => onChange({ excitation })}
+            />
+            <TextField
+              label="Lifetime"
+              unit="μs"
+              value={draft.lifetime}
+              onChange={(lifetime) => onChange({ lifetime })}
+            />
+          </div>
         </div>
       );
+    case 'moment':
+      return <MomentFields draft={draft} substance={substance} onChange={onChange} />;
+    case 'moment series':
+      return <SeriesFields draft={draft} substance={substance} onChange={onChange} />;
     case 'observed colour':
       return (
         <div className="record-fields">
@@ -71,6 +56,10 @@ export function ParticularFields({ draft, onChange }: ParticularFieldsProps) {
             onChange={(lightSource) => onChange({ lightSource })}
           />
         </div>
+      );
+    case 'spectrum':
+      return (
+        <p className="soft">The numbers stay as they were read; only what stands around them changes.</p>
       );
     case 'note':
       return null;
