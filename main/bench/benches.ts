@@ -1,4 +1,5 @@
 import { bulkCandidates } from './bulkCandidates';
+import { candidateTable } from './candidateTable';
 import { lowSymmetryLevels } from './lowSymmetryLevels';
 import { octahedralLevels } from './octahedralLevels';
 import { type Bench } from './report';
@@ -14,4 +15,5 @@ export const benches: readonly Bench[] = [
   bulkCandidates,
   wholeEstimate,
   scaling,
+  candidateTable,
 ];
