@@ -85,6 +85,8 @@ const setText = (text: string): string =>
 
 async function measured(browser: Browser, address: string, origin: string, count: number): Promise<Measured> {
   const context = await browser.newContext({ viewport: { width: 1280, height: 800 }, bypassCSP: true });
+  // The TypeScript runner marks functions with this helper, which the page does not know.
+  await context.addInitScript('globalThis.__name ??= (named) => named');
   const page = await context.newPage();
   await page.goto(address);
   await page.getByRole('heading', { level: 1, name: 'Projects' }).waitFor();
