@@ -1,3 +1,4 @@
+import { studentT95 } from './studentT';
 import { mean } from './summary';
 import { shareOf, type Share } from './wilson';
 
@@ -25,6 +26,8 @@ export function coverage(pairs: readonly Pair[]): { readonly within68: Share; re
 export interface BlandAltman {
   readonly points: readonly { readonly mean: number; readonly difference: number }[];
   readonly bias: number;
+  /** 95 % interval of the bias by Student's t. */
+  readonly biasInterval: readonly [number, number];
   /** Bias ± 1.96 standard deviations of the differences. */
   readonly limits: readonly [number, number];
 }
@@ -42,5 +45,11 @@ export function blandAltman(
   const variance =
     differences.reduce((sum, difference) => sum + (difference - bias) ** 2, 0) / (differences.length - 1);
   const spread = 1.96 * Math.sqrt(variance);
-  return { points, bias, limits: [bias - spread, bias + spread] };
+  const half = studentT95(differences.length - 1) * Math.sqrt(variance / differences.length);
+  return {
+    points,
+    bias,
+    biasInterval: [bias - half, bias + half],
+    limits: [bias - spread, bias + spread],
+  };
 }

@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { blandAltman, coverage, standardScore } from './pairs';
 import { brierScore, confusionTable } from './brier';
+import { studentT95 } from './studentT';
 import { errorSummary, median, quantile } from './summary';
 import { shareOf, wilsonInterval } from './wilson';
 
@@ -42,6 +43,16 @@ describe('shares', () => {
   it('claim nothing from no trials', () => {
     expect(wilsonInterval(0, 0)).toEqual([0, 1]);
     expect(shareOf(0, 0).share).toBeNull();
+  });
+});
+
+describe('the width of an interval', () => {
+  it('follows Student beyond the end of the table too (printed tables: 2.000 for 60, 1.980 for 120)', () => {
+    expect(studentT95(16)).toBe(2.12);
+    expect(studentT95(60)).toBeCloseTo(2.0, 3);
+    expect(studentT95(120)).toBeCloseTo(1.98, 3);
+    expect(studentT95(31)).toBeLessThan(studentT95(30));
+    expect(studentT95(0)).toBe(Infinity);
   });
 });
 
@@ -99,11 +110,16 @@ describe('predicted beside measured', () => {
 
   it('finds the published bias and limits between two flow meters', () => {
     // First readings of 17 people with a large and a small peak flow meter, l/min (Bland and Altman, Lancet 327, 1986,
-    // 307, Table 1): mean difference -2.1, standard deviation 38.8. The paper draws two of them; 1.96 are drawn here.
+    // 307, Table 1): mean difference -2.1 with a 95 % interval of -22.0 to 17.8, standard deviation 38.8. The paper draws
+    // two of them; 1.96 are drawn here.
     const large = [494, 395, 516, 434, 476, 557, 413, 442, 650, 433, 417, 656, 267, 478, 178, 423, 427];
     const small = [512, 430, 520, 428, 500, 600, 364, 380, 658, 445, 432, 626, 260, 477, 259, 350, 451];
-    const { bias, limits } = blandAltman(large.map((predicted, i) => ({ predicted, measured: small[i]! })));
+    const { bias, biasInterval, limits } = blandAltman(
+      large.map((predicted, i) => ({ predicted, measured: small[i]! })),
+    );
     expect(bias).toBeCloseTo(-2.1, 1);
+    expect(Math.abs(biasInterval[0] + 22)).toBeLessThan(0.1);
+    expect(Math.abs(biasInterval[1] - 17.8)).toBeLessThan(0.1);
     expect((limits[1] - bias) / 1.96).toBeCloseTo(38.8, 1);
     expect((bias - limits[0]) / 1.96).toBeCloseTo(38.8, 1);
   });

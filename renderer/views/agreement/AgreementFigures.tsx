@@ -1,12 +1,9 @@
-import { formatFigures, formatShare } from '../../parts';
+import { formatFigures } from '../../parts';
+import { shareText } from './figureText';
 import { agreementOf, countedPairs, type BandPair } from './recordPairs';
-import type { Share } from '../../../core/agreement';
 import './AgreementFigures.css';
 
-export const shareText = ({ hits, of, share, interval95 }: Share): string =>
-  share === null
-    ? 'none'
-    : `${hits} of ${of}, ${formatShare(share)} (95 % interval ${formatShare(interval95[0])} to ${formatShare(interval95[1])})`;
+export { shareText };
 
 const energy = (value: number): string => `${formatFigures(value, 3)} cm⁻¹`;
 

@@ -43,12 +43,11 @@ export function AgreementPlots({ pairs, nameOf, groupOf, onOpen }: AgreementPlot
 /** Limits of measured minus predicted, the sense of the figure; null below three pairs. */
 function limitsOf(pairs: readonly Pair[]): AgreementLimits | null {
   if (pairs.length < 3) return null;
-  const { bias, limits } = blandAltman(pairs);
-  const standardError = (limits[1] - bias) / 1.96 / Math.sqrt(pairs.length);
+  const { bias, biasInterval, limits } = blandAltman(pairs);
   return {
     bias: -bias,
     lower: -limits[1],
     upper: -limits[0],
-    biasInterval: [-bias - 1.96 * standardError, -bias + 1.96 * standardError],
+    biasInterval: [-biasInterval[1], -biasInterval[0]],
   };
 }

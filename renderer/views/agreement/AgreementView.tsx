@@ -1,4 +1,4 @@
-import { useMemo, useState } from 'react';
+import { type ReactNode, useMemo, useState } from 'react';
 import { complexFormula } from '../../../core/library/complexFormula';
 import { linkTo, useRouter } from '../../app/router/RouterContext';
 import { useProject } from '../../app/session/ProjectSession';
@@ -8,8 +8,10 @@ import { EmptyState, ErrorPanel, Formula, SegmentedChoice } from '../../parts';
 import { AgreementFigures } from './AgreementFigures';
 import { AgreementPlots } from './AgreementPlots';
 import { ExportButtons } from './ExportButtons';
+import { FieldSection } from './FieldSection';
 import { type Grouping, groupings, groupName } from './groupings';
 import { GroupTable } from './GroupTable';
+import { Outliers } from './Outliers';
 import { PairTable } from './PairTable';
 import { RecalibrationPanel } from './recalibration/RecalibrationPanel';
 import { countedPairs } from './recordPairs';
@@ -56,6 +58,11 @@ export default function AgreementView() {
   const inSample = pairs.filter((pair) => pair.isInSample);
   const groupOf = ({ candidateId }: { candidateId: string }): string =>
     groupName(rows.get(candidateId)!.composition, grouping, library);
+  const linkOf = (candidateId: string): ReactNode => (
+    <a href={linkTo({ view: 'record', project: project.id, item: candidateId })}>
+      <Formula formula={nameOf(candidateId)} />
+    </a>
+  );
   const openRecord = (candidateId: string): void =>
     go({ view: 'record', project: project.id, item: candidateId });
   if (pairs.length === 0 && spins.length === 0)
@@ -86,6 +93,7 @@ export default function AgreementView() {
           ) : (
             <AgreementFigures pairs={pairs} />
           )}
+          <Outliers pairs={counted} linkOf={linkOf} />
           {inSample.length > 0 && (
             <p className="soft">
               {inSample.length} {inSample.length === 1 ? 'pair is' : 'pairs are'} in-sample: the complex
@@ -106,18 +114,12 @@ export default function AgreementView() {
             />
           </section>
         )}
+        {value.fields.length > 0 && <FieldSection pairs={value.fields} complexOf={linkOf} />}
         <SpinAgreement spins={spins} nameOf={nameOf} />
         {pairs.length > 0 && (
           <section className="panel stack" aria-labelledby="agreement-pairs">
             <h2 id="agreement-pairs">All pairs</h2>
-            <PairTable
-              pairs={pairs}
-              complexOf={({ candidateId }) => (
-                <a href={linkTo({ view: 'record', project: project.id, item: candidateId })}>
-                  <Formula formula={nameOf(candidateId)} />
-                </a>
-              )}
-            />
+            <PairTable pairs={pairs} complexOf={({ candidateId }) => linkOf(candidateId)} />
           </section>
         )}
         <RecalibrationPanel record={value} />

@@ -1,5 +1,5 @@
 import { formatFigures } from '../../parts';
-import { shareText } from './AgreementFigures';
+import { shareText } from './figureText';
 import { agreementOf, type BandPair } from './recordPairs';
 
 interface GroupTableProps {
@@ -21,7 +21,9 @@ export function GroupTable({ pairs, groupOf }: GroupTableProps) {
           <th scope="col">Group</th>
           <th scope="col">Pairs</th>
           <th scope="col">Bias / cm⁻¹</th>
-          <th scope="col">Mean absolute error / cm⁻¹</th>
+          <th scope="col">Mean absolute error</th>
+          <th scope="col">Root mean square</th>
+          <th scope="col">Median</th>
           <th scope="col">Inside the 68 % range</th>
           <th scope="col">Inside the 95 % range</th>
         </tr>
@@ -33,6 +35,8 @@ export function GroupTable({ pairs, groupOf }: GroupTableProps) {
             <td className="figures">{agreement?.errors.n ?? 0}</td>
             <td className="figures">{agreement ? formatFigures(agreement.errors.bias, 3) : '–'}</td>
             <td className="figures">{agreement ? formatFigures(agreement.errors.meanAbsolute, 3) : '–'}</td>
+            <td className="figures">{agreement ? formatFigures(agreement.errors.rootMeanSquare, 3) : '–'}</td>
+            <td className="figures">{agreement ? formatFigures(agreement.errors.medianAbsolute, 3) : '–'}</td>
             <td>{agreement ? shareText(agreement.within68) : '–'}</td>
             <td>{agreement ? shareText(agreement.within95) : '–'}</td>
           </tr>

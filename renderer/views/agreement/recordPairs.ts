@@ -124,7 +124,7 @@ export function pairsOf(
   informed: ReadonlySet<string> = none,
 ): BandPair[] {
   const content = currentContent(measurement);
-  const isInSample = frozen !== null && informed.has(keyOfFrozen(frozen));
+  const isInSample = isInformed(frozen, informed);
   return comparedOf(content, analysis, bandsOf(frozen)).map(
     ({ energy_cm1, feature, partner }, index): BandPair => {
       const [measured, u] = [energy_cm1.value, energy_cm1.u];
@@ -160,6 +160,10 @@ function keyOfFrozen({ prediction }: FrozenPrediction): string {
   const { composition } = prediction as { composition?: Composition };
   return composition === undefined ? '' : complexKey(composition);
 }
+
+/** Whether the complex itself went into the parameters that its prediction was made with. */
+export const isInformed = (frozen: FrozenPrediction | null, informed: ReadonlySet<string>): boolean =>
+  frozen !== null && informed.has(keyOfFrozen(frozen));
 
 /** Complexes that informed the parameter set a prediction was made with, by the hash of the set. */
 export const informedBy = (

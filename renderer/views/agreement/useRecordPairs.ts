@@ -5,12 +5,14 @@ import { useStored } from '../../app/services';
 import { useVersion } from '../../app/session/observable';
 import { useProject } from '../../app/session/ProjectSession';
 import type { Store } from '../../store';
+import { type FieldPair, fieldPairsOf } from './fieldPairs';
 import { type BandPair, informedBy, pairsOf } from './recordPairs';
 
 const tables = ['measurements', 'frozenPredictions', 'analyses', 'parameterSets'] as const;
 
 export interface RecordPairs {
   readonly pairs: readonly BandPair[];
+  readonly fields: readonly FieldPair[];
   readonly measurements: readonly Measurement[];
   readonly frozen: Awaited<ReturnType<Store['frozenPredictions']['ofProject']>>;
   readonly analyses: Awaited<ReturnType<Store['analyses']['ofProject']>>;
@@ -29,7 +31,12 @@ export function useRecordPairs(): { readonly value: RecordPairs | undefined; rea
     if (all === undefined || rows.state === 'reading') return undefined;
     const kept = ({ candidateId }: { candidateId: string }): boolean =>
       rows.get(candidateId)?.deletedAt === null;
-    return { ...all, measurements: all.measurements.filter(kept), pairs: all.pairs.filter(kept) };
+    return {
+      ...all,
+      measurements: all.measurements.filter(kept),
+      pairs: all.pairs.filter(kept),
+      fields: all.fields.filter(kept),
+    };
     // The rows change in place; their version says so.
     // eslint-disable-next-line react-hooks/exhaustive-deps
   }, [all, rows, rows.state, version]);
@@ -43,9 +50,11 @@ async function everything(store: Store, projectId: string): Promise<RecordPairs>
     store.analyses.ofProject(projectId),
     store.parameterSets.of(projectId),
   ]);
-  const pairs = measurements.flatMap((each) => {
+  const judged = measurements.map((each) => {
     const prediction = frozen.get(each.frozenPredictionId ?? '') ?? null;
-    return pairsOf(each, prediction, analyses.get(each.id) ?? null, informedBy(sets, prediction));
+    return [each, prediction, analyses.get(each.id) ?? null, informedBy(sets, prediction)] as const;
   });
-  return { pairs, measurements, frozen, analyses, sets };
+  const pairs = judged.flatMap((each) => pairsOf(...each));
+  const fields = judged.flatMap((each) => fieldPairsOf(...each));
+  return { pairs, fields, measurements, frozen, analyses, sets };
 }
