@@ -3,6 +3,7 @@ import { ComposedChart, Line, Scatter } from 'recharts';
 import { formatFigures, formatShare } from '../../parts/number';
 import { Marker } from '../agreement/markers';
 import { extent, Plot } from '../frame';
+import type { PlotView } from '../frame/view';
 import { chartBox, ChartAxes } from '../frame/ChartAxes';
 import { paretoFront, spreadSideways, type ParetoPoint } from './paretoFront';
 import '../agreement/agreement.css';
@@ -81,7 +82,7 @@ export function ParetoPlot({ points, costName, title, height, onOpen, note }: Pa
     >
       {(view) => (
         <ComposedChart {...chartBox(view)}>
-          <ChartAxes view={view} />
+          <ChartAxes view={whole(view, points)} />
           <Line
             data={front.map(({ cost, probability }) => ({ x: cost, y: probability }))}
             dataKey="y"
@@ -105,4 +106,11 @@ export function ParetoPlot({ points, costName, title, height, onOpen, note }: Pa
       )}
     </Plot>
   );
+}
+
+/** Where costs are whole numbers, no tick stands between them. */
+function whole(view: PlotView, points: readonly ParetoPoint[]): PlotView {
+  if (!points.every(({ cost }) => Number.isInteger(cost))) return view;
+  const values = view.xTicks.values.filter((value) => Math.abs(value - Math.round(value)) < 1e-9);
+  return values.length === 0 ? view : { ...view, xTicks: { ...view.xTicks, values } };
 }

@@ -1,4 +1,4 @@
-import { useMemo } from 'react';
+import { memo, useCallback, useMemo } from 'react';
 import { complexKey } from '../../../core/library/parameterLibrary';
 import { useSettings } from '../../app/services';
 import { useProject } from '../../app/session/ProjectSession';
@@ -23,18 +23,21 @@ import { draftOf, wishesAnything, wishOf } from './wish/wishDraft';
 import { WishForm } from './wish/WishForm';
 import './SearchView.css';
 
+const Form = memo(WishForm);
+
 /** From a wish to the metal and ligand sets that would meet it. */
 export default function SearchView() {
   const { project, overlay, conditions } = useProject();
   const library = useLibrary();
   const { settings, set } = useSettings();
   const runs = useRuns(project.id);
-  const [draft, setDraft] = useDraft(project.id);
+  const { draft, setDraft, name, setName } = useDraft(project.id);
   const ready = wishesAnything(draft);
-  const wish = useMemo(() => wishOf(draft, settings.shelf), [draft, settings.shelf]);
+  const wish = useMemo(() => wishOf({ ...draft, name }, settings.shelf), [draft, name, settings.shelf]);
   const count = useReply({ kind: 'count', wish: { ...wish, name: 'counted' }, overlay });
   const refused = count.current && count.reply?.kind === 'refused';
   const begin = (): void => runs.show(searchRuns.start(project.id, wish, overlay));
+  const keepShelf = useCallback((shelf: readonly string[]) => set('shelf', [...shelf]), [set]);
   const { shown } = runs;
   return (
     <>
@@ -51,18 +54,21 @@ export default function SearchView() {
         <div className="stack">
           <SavedWishes
             wish={wish}
-            name={draft.name}
-            onName={(name) => setDraft({ ...draft, name })}
-            onOpen={(opened) => setDraft(draftOf(opened))}
+            name={name}
+            onName={setName}
+            onOpen={(opened) => {
+              setDraft(draftOf(opened));
+              setName(opened.name);
+            }}
           />
-          <WishForm
+          <Form
             draft={draft}
             onChange={setDraft}
             library={library}
             target={project.targetLab}
             usual={conditions}
             shelf={settings.shelf}
-            onShelf={(shelf) => set('shelf', [...shelf])}
+            onShelf={keepShelf}
           />
         </div>
         <div className="search-answer stack">
@@ -97,7 +103,7 @@ export default function SearchView() {
   );
 }
 
-function Run({ run }: { readonly run: SearchRun }) {
+const Run = memo(function Run({ run }: { readonly run: SearchRun }) {
   const { rows } = useProject();
   useVersion(run);
   useVersion(rows);
@@ -118,4 +124,4 @@ function Run({ run }: { readonly run: SearchRun }) {
       <ResultsPanel run={run} held={held} onAdd={add} />
     </>
   );
-}
+});

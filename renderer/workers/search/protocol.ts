@@ -22,8 +22,11 @@ export interface SearchState {
   readonly skipped: number;
   /** Candidates gone through each second of running time; null before there is one to tell from. */
   readonly rate: number | null;
-  /** Null where the list is that of the report before: most reports bring no new result. */
-  readonly results: readonly ShownResult[] | null;
+  /**
+   * Null where the list is that of the report before: most reports bring no new result. A result that an earlier report
+   * brought stands as its id.
+   */
+  readonly results: readonly (ShownResult | string)[] | null;
 }
 
 interface Wished {

@@ -42,8 +42,17 @@ const states = (posted: readonly FromSearch[]): SearchState[] =>
 
 const finished = (posted: readonly FromSearch[]) => posted.some((m) => m.kind === 'progress' && m.finished);
 
-const lastList = (posted: readonly FromSearch[]): readonly ShownResult[] =>
-  states(posted).findLast(({ results }) => results !== null)!.results!;
+/** The last list, put together from all reports. */
+function lastList(posted: readonly FromSearch[]): readonly ShownResult[] {
+  const known = new Map<string, ShownResult>();
+  let list: readonly ShownResult[] = [];
+  for (const { results } of states(posted)) {
+    if (results === null) continue;
+    for (const each of results) if (typeof each !== 'string') known.set(each.id, each);
+    list = results.map((each) => (typeof each === 'string' ? known.get(each)! : each));
+  }
+  return list;
+}
 
 describe('the search beside the window', () => {
   it('counts, runs to the end and hands over rows ready to be shown', async () => {

@@ -100,18 +100,21 @@ function summaryOf(result: SearchResult, wish: Wish, library: ParameterLibrary):
     : summarise({ ok: true, prediction: scored.prediction });
 }
 
-/** Turns progress into reports: rows get what they show, and a list that did not change is not sent again. */
+/** Turns progress into reports: rows get what they show, and what was sent before is not sent again. */
 function reporter(
   wish: Wish,
   library: ParameterLibrary,
   doneBefore: number,
 ): (progress: SearchProgress, running_ms: number) => SearchState {
-  const summaries = new Map<string, CandidateSummary>();
+  let sent: ReadonlySet<string> = new Set();
   let last: string | null = null;
   return ({ count, evaluated, skipped, results }, running_ms) => {
-    const ids = results.map(({ id }) => id).join('\n');
-    const same = ids === last;
-    last = ids;
+    const ids = results.map(({ id }) => id);
+    const same = ids.join('\n') === last;
+    last = ids.join('\n');
+    const before = sent;
+    // What has left the list is forgotten on both sides.
+    sent = new Set(ids);
     const fresh = evaluated + skipped - doneBefore;
     return {
       count,
@@ -120,11 +123,9 @@ function reporter(
       rate: fresh <= 0 ? null : (1000 * fresh) / Math.max(1, running_ms),
       results: same
         ? null
-        : results.map((result): ShownResult => {
-            const known = summaries.get(result.id) ?? summaryOf(result, wish, library);
-            summaries.set(result.id, known);
-            return { ...result, summary: known };
-          }),
+        : results.map((result): ShownResult | string =>
+            before.has(result.id) ? result.id : { ...result, summary: summaryOf(result, wish, library) },
+          ),
     };
   };
 }

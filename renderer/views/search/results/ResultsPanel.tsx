@@ -1,4 +1,4 @@
-import { useCallback, useMemo, useState } from 'react';
+import { memo, useCallback, useDeferredValue, useMemo, useState } from 'react';
 import { useVersion } from '../../../app/session/observable';
 import { useLibrary } from '../../../app/session/useLibrary';
 import { useSettings } from '../../../app/services';
@@ -18,13 +18,16 @@ interface ResultsPanelProps {
   readonly onAdd: (results: readonly ShownResult[]) => void;
 }
 
+const Table = memo(ResultTable);
+
 /** Rows added with each press: a long list drawn at once would hold up the window. */
 const portion = 25;
 
 /** The list of a search as table or as chance against cost, and what can be done with chosen results. */
 export function ResultsPanel({ run, held, onAdd }: ResultsPanelProps) {
   useVersion(run);
-  const { results } = run;
+  // Drawn when there is time for it: typing elsewhere in the window comes first.
+  const results = useDeferredValue(run.results);
   const [as, setAs] = useState<'list' | 'costs'>('list');
   const [distinct, setDistinct] = useState(false);
   const [shown, setShown] = useState(portion);
@@ -43,6 +46,7 @@ export function ResultsPanel({ run, held, onAdd }: ResultsPanelProps) {
     const listed = distinct ? oneOfEach(results) : results.map((result) => ({ result, variants: 1 }));
     return listed.map((each) => ({ ...each, place: places.get(each.result.id)! }));
   }, [results, distinct]);
+  const firstRows = useMemo(() => rows.slice(0, shown), [rows, shown]);
   if (results.length === 0) return null;
   return (
     <section className="panel stack" aria-labelledby="search-results">
@@ -77,13 +81,7 @@ export function ResultsPanel({ run, held, onAdd }: ResultsPanelProps) {
       ) : (
         <>
           <div className="search-table">
-            <ResultTable
-              rows={rows.slice(0, shown)}
-              chosen={chosen}
-              held={held}
-              onChoose={choose}
-              onAdd={addOne}
-            />
+            <Table rows={firstRows} chosen={chosen} held={held} onChoose={choose} onAdd={addOne} />
           </div>
           {rows.length > shown && (
             <div>

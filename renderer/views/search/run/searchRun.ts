@@ -115,7 +115,7 @@ export class SearchRun extends Observable {
   #hear(message: FromSearch): void {
     if (message.kind === 'progress') {
       this.#state = message.state;
-      if (message.state.results !== null) this.#results = message.state.results;
+      if (message.state.results !== null) this.#results = merged(this.#results, message.state.results);
       if (message.finished) this.#end();
       this.#turn(message.finished ? 'finished' : this.#phase);
     } else if (message.kind === 'refused') {
@@ -148,4 +148,13 @@ export class SearchRun extends Observable {
     this.#worker?.terminate();
     this.#worker = null;
   }
+}
+
+/** A list whose known members are named by id only. */
+function merged(
+  before: readonly ShownResult[],
+  given: readonly (ShownResult | string)[],
+): readonly ShownResult[] {
+  const known = new Map(before.map((result) => [result.id, result]));
+  return given.flatMap((each) => (typeof each === 'string' ? (known.get(each) ?? []) : each));
 }

@@ -21,7 +21,7 @@ class QuietWorker {
 }
 
 const found = { id: 'a', probability: 0.5 } as unknown as ShownResult;
-const state = (evaluated: number, results: readonly ShownResult[] | null): SearchState => ({
+const state = (evaluated: number, results: SearchState['results']): SearchState => ({
   count: 10,
   evaluated,
   skipped: 0,
@@ -63,6 +63,9 @@ describe('searches of a window', () => {
     workers[0]!.say({ kind: 'progress', state: state(6, null), finished: false });
     expect(run.results).toEqual([found]);
     expect(run.state?.evaluated).toBe(6);
+    const better = { id: 'b', probability: 0.6 } as unknown as ShownResult;
+    workers[0]!.say({ kind: 'progress', state: state(7, [better, 'a']), finished: false });
+    expect(run.results).toEqual([better, found]);
   });
 
   it('go on from where they were stopped, in a worker of their own', () => {
