@@ -83,8 +83,8 @@ test('a dropped spectrum is kept, treated, fitted, assigned; its field is fitted
   await expect(dialog.getByText(/471 points, nm, absorbance/)).toBeVisible();
   await expect(dialog.getByText(/No prediction is frozen yet/)).toBeVisible();
   await accessible(page, 'import preview');
-  await dialog.getByLabel('Concentration').fill('50');
-  await dialog.getByLabel('Path length').fill('1');
+  await dialog.getByLabel('Concentration', { exact: true }).fill('50');
+  await dialog.getByLabel('Path length', { exact: true }).fill('1');
   await dialog.getByLabel('Initials').fill('MK');
   await dialog.getByRole('button', { name: 'Keep the spectrum' }).click();
   await expect(page.getByText('Prediction frozen, then spectrum kept')).toBeVisible();

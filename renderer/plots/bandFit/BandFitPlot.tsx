@@ -28,18 +28,22 @@ export interface BandFitPlotProps {
   readonly quantity?: string;
   readonly title?: string;
   readonly note?: string;
+  /** Where the next fit starts its bands, cm⁻¹. */
+  readonly starts?: readonly number[];
   /** A click on the spectrum, or Enter on the point being read: where somebody takes a band to be. */
   readonly onPick?: (place: { readonly wavenumber_cm1: number; readonly value: number }) => void;
 }
 
 /** Room under the spectrum for the residuals and the x axis, px. */
 const residualRoom = 178;
-const margin = { top: 12, right: 18, bottom: residualRoom, left: 80 };
+const margin = (bottom: number) => ({ top: 12, right: 18, bottom, left: 80 });
+/** Room under a spectrum without residuals, px. */
+const axisRoom = 54;
 const dashes = ['7 3', '2 3', '7 3 2 3', '12 3', '1 2', '12 3 2 3'];
 
 /** A measured spectrum, the fit with its bands, and what the fit leaves over, on one axis. */
 export function BandFitPlot(props: BandFitPlotProps) {
-  const { measured, fit, bands, baseline = null, noise = null, onPick } = props;
+  const { measured, fit, bands, baseline = null, noise = null, starts = [], onPick } = props;
   const { unit } = useUnit();
   const data = useMemo(() => curveInUnit(measured, unit), [measured, unit]);
   const grid = measured.wavenumber_cm1;
@@ -83,8 +87,8 @@ export function BandFitPlot(props: BandFitPlotProps) {
         domain: domainOf(grid, unit),
       }}
       y={{ label: quantity, domain: yDomain }}
-      margin={margin}
-      height={480}
+      margin={margin(residual ? residualRoom : axisRoom)}
+      height={residual ? 480 : 480 - residualRoom + axisRoom}
       zoom="x"
       empty={grid.length === 0 ? 'No spectrum yet: open a file to fit its bands.' : null}
       series={readings}
@@ -114,6 +118,9 @@ export function BandFitPlot(props: BandFitPlotProps) {
       }}
       legend={[
         { text: 'measured', sample: <circle className="fit-measured" cx={16} cy={7} r={2} /> },
+        ...(starts.length > 0
+          ? [{ text: 'start of a band', sample: <path className="fit-start" d="M11 3h10l-5 8z" /> }]
+          : []),
         ...(fit ? [{ text: 'fit', sample: <path className="fit-line" d="M0 7H32" fill="none" /> }] : []),
         ...bands.map(({ name }, index) => ({
           text: name,
@@ -135,7 +142,7 @@ export function BandFitPlot(props: BandFitPlotProps) {
     >
       {(view) => (
         <PlotSvg view={view}>
-          <Axes view={view} xFigures={false} />
+          <Axes view={view} xFigures={!residual} />
           <VisibleBand view={view} unit={unit} />
           <PlotClip view={view}>
             {Array.from(data.xs, (at, index) => (
@@ -147,6 +154,16 @@ export function BandFitPlot(props: BandFitPlotProps) {
                 r={1.6}
               />
             ))}
+            {starts.map((at, index) => {
+              const x = view.x(fromWavenumber(at, unit));
+              return (
+                <path
+                  key={index}
+                  className="fit-start"
+                  d={`M${x} ${view.area.bottom}V${view.area.top + 8}m-5 -8h10l-5 8z`}
+                />
+              );
+            })}
             {bands.map(({ name, value }, index) => {
               const { xs, ys } = inUnit(value);
               return (

@@ -95,7 +95,7 @@ export function CandidateRecord({ candidate }: { readonly candidate: Candidate }
     act(async () => {
       const { by, why, files, batch } = entered;
       await store.measurements.correct(measurement, {
-        by: settings.initials || by,
+        by,
         why,
         files,
         content: keepingTheRest(currentContent(measurement), entered.content),
@@ -177,6 +177,7 @@ export function CandidateRecord({ candidate }: { readonly candidate: Candidate }
         <MeasurementDialog
           start={draft}
           substance={substance}
+          initials={settings.initials}
           before={open === 'new' ? null : currentContent(open)}
           withSample={open === 'new' || open.sampleId === null}
           notice={open === 'new' ? notice : null}

@@ -1,6 +1,13 @@
 import type { MeasurementContent } from '../../../core/record/measurement';
 import { formatFigures } from '../../parts';
 
+const methodWords = {
+  Evans: 'Evans',
+  balance: 'balance',
+  magnetometer: 'magnetometer',
+  typed: 'method not stated',
+};
+
 /** A measurement in one line. */
 export function contentText(content: MeasurementContent): string {
   switch (content.kind) {
@@ -16,7 +23,8 @@ export function contentText(content: MeasurementContent): string {
     }
     case 'moment': {
       const { value, u } = content.moment_BM;
-      return `Moment ${value}${u === null ? '' : ` ± ${u}`} μB`;
+      const spread = u === null ? '' : ` ± ${formatFigures(u, 2)}`;
+      return `Moment ${formatFigures(value, 3)}${spread} μB (${methodWords[content.method]})`;
     }
     case 'observed colour':
       return `Colour seen: ${content.words}`;

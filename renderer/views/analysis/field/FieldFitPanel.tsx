@@ -99,7 +99,7 @@ export function FieldFitPanel(props: FieldFitPanelProps) {
           <table className="plain-table">
             <caption>
               Fitted beside frozen prediction
-              {kept.rms_cm1 !== null && `; root mean square deviation ${formatFigures(kept.rms_cm1, 2)} cm⁻¹`}
+              {kept.rms_cm1 !== null && deviationText(kept.rms_cm1)}
             </caption>
             <thead>
               <tr>
@@ -161,6 +161,12 @@ export function FieldFitPanel(props: FieldFitPanelProps) {
     </section>
   );
 }
+
+/** As many bands as parameters are always met exactly: that is no praise. */
+const deviationText = (rms_cm1: number): string =>
+  rms_cm1 < 0.01
+    ? '; met exactly, so that nothing is left to check the fit by'
+    : `; root mean square deviation ${formatFigures(rms_cm1, 2)} cm⁻¹`;
 
 function Sentences({ title, sentences }: { readonly title: string; readonly sentences: readonly string[] }) {
   if (sentences.length === 0) return null;

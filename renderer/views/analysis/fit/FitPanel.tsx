@@ -90,6 +90,7 @@ export function FitPanel({ points, quantity, kept, onSave }: FitPanelProps) {
         quantity={quantity === 'molar-absorptivity' ? 'Molar absorptivity / L mol⁻¹ cm⁻¹' : 'Absorbance'}
         title="Spectrum and fitted bands"
         note="Bands are Gaussians in wavenumber. A maximum is not a centre: overlap moves it. Click on the curve, or press Enter on the point being read, to start a band there."
+        starts={start.flatMap(({ centre }) => startPlace(centre))}
         onPick={({ wavenumber_cm1: centre_cm1, value: height }) => {
           if (height > 0) setStart([...start, draftOf({ centre_cm1, fwhm_cm1: usualWidth_cm1, height })]);
         }}
@@ -165,6 +166,12 @@ export function FitPanel({ points, quantity, kept, onSave }: FitPanelProps) {
     </section>
   );
 }
+
+/** A centre while it is being typed: drawn as soon as it makes sense. */
+const startPlace = (centre: string): number[] => {
+  const at = readNumber(centre);
+  return at !== null && at > 0 ? [at] : [];
+};
 
 function limitsOf({ low, high }: { low: string; high: string }): [number, number] | null {
   const [from, to] = [readNumber(low), readNumber(high)];

@@ -6,10 +6,12 @@ import { blankBand, type BandDraft, type Feature, type MeasurementDraft } from '
 interface BandRowsProps {
   readonly draft: MeasurementDraft;
   readonly onChange: (change: Partial<MeasurementDraft>) => void;
+  /** Absorption has a molar absorptivity, emission has none. */
+  readonly withStrength: boolean;
 }
 
 /** A typed list of bands, one line each. */
-export function BandRows({ draft, onChange }: BandRowsProps) {
+export function BandRows({ draft, onChange, withStrength }: BandRowsProps) {
   const { bands, reportedIn } = draft;
   const unit = reportedIn === 'nm' ? 'nm' : 'cm⁻¹';
   const set = (index: number, change: Partial<BandDraft>): void =>
@@ -48,7 +50,7 @@ export function BandRows({ draft, onChange }: BandRowsProps) {
           <tr>
             <th scope="col">Position / {unit}</th>
             <th scope="col">± / {unit}</th>
-            <th scope="col">ε / L mol⁻¹ cm⁻¹</th>
+            {withStrength && <th scope="col">ε / L mol⁻¹ cm⁻¹</th>}
             <th scope="col">Read as</th>
             <th scope="col">
               <span className="visually-hidden">Remove</span>
@@ -73,13 +75,15 @@ export function BandRows({ draft, onChange }: BandRowsProps) {
                   onChange={(uncertainty) => set(index, { uncertainty })}
                 />
               </td>
-              <td>
-                <NumberCell
-                  label={`Molar absorptivity of band ${index + 1}`}
-                  value={band.absorptivity}
-                  onChange={(absorptivity) => set(index, { absorptivity })}
-                />
-              </td>
+              {withStrength && (
+                <td>
+                  <NumberCell
+                    label={`Molar absorptivity of band ${index + 1}`}
+                    value={band.absorptivity}
+                    onChange={(absorptivity) => set(index, { absorptivity })}
+                  />
+                </td>
+              )}
               <td>
                 <select
                   aria-label={`Kind of band ${index + 1}`}
@@ -110,7 +114,9 @@ export function BandRows({ draft, onChange }: BandRowsProps) {
         <button type="button" onClick={() => onChange({ bands: [...bands, blankBand] })}>
           Another band
         </button>{' '}
-        <span className="soft small">or paste lines of position and ε into a position</span>
+        <span className="soft small">
+          or paste lines of position{withStrength && ' and ε'} into a position
+        </span>
       </div>
     </div>
   );

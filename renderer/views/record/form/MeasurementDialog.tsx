@@ -29,6 +29,8 @@ interface MeasurementDialogProps {
   readonly substance: Substance;
   /** What is corrected: it keeps its kind, and the reason is asked for. Null for a new measurement. */
   readonly before: MeasurementContent | null;
+  /** Initials of whoever sits here, as the settings know them; empty where they do not. */
+  readonly initials: string;
   /** Whether the batch can be named here: it stays with a measurement for good. */
   readonly withSample: boolean;
   /** Said above the form: what saving will also do. */
@@ -43,11 +45,12 @@ export const batchOf = ({ batch, phase }: ConditionsDraft): NamedBatch | null =>
 
 /** A measurement as it is typed, new or corrected. */
 export function MeasurementDialog(props: MeasurementDialogProps) {
-  const { start, substance, before, withSample, notice, onSave, onClose } = props;
+  const { start, substance, before, initials, withSample, notice, onSave, onClose } = props;
   const correcting = before !== null;
   const form = useId();
   const [draft, setDraft] = useState(start);
   const [why, setWhy] = useState('');
+  const [signer, setSigner] = useState(initials);
   const [attached, setAttached] = useState<readonly Attached[]>(() =>
     (before?.attachments ?? []).map((each) => ({ ...each, file: null })),
   );
@@ -66,6 +69,13 @@ export function MeasurementDialog(props: MeasurementDialogProps) {
         message: 'A correction needs its reason.',
         remedy: 'Say in a few words why.',
       });
+    if (correcting && signer.trim() === '')
+      found.push({
+        code: 'missing-field',
+        field: 'your initials',
+        message: 'A correction is signed.',
+        remedy: 'Enter your initials.',
+      });
     setProblems(found);
     if (!checked.ok || found.length > 0) return;
     setSaving(true);
@@ -73,7 +83,7 @@ export function MeasurementDialog(props: MeasurementDialogProps) {
     void onSave({
       content: { ...checked.value, attachments },
       batch: batchOf(draft),
-      by: draft.operator.trim(),
+      by: (correcting ? signer : draft.operator).trim().slice(0, 100),
       why,
       files: attached.flatMap(({ file }) => file ?? []),
     }).then((done) => {
@@ -112,7 +122,8 @@ export function MeasurementDialog(props: MeasurementDialogProps) {
               { id: 'note', label: 'Note' },
             ]}
             value={draft.kind}
-            onChange={(kind) => change({ kind })}
+            // Readings are corrected here; what a pasted series was corrected by, only its owner knows.
+            onChange={(kind) => change({ kind, basis: kind === 'moment series' ? 'none' : 'pascal sum' })}
           />
         )}
         <ParticularFields draft={draft} substance={substance} onChange={change} />
@@ -129,12 +140,16 @@ export function MeasurementDialog(props: MeasurementDialogProps) {
         </Field>
         <AttachmentFields attached={attached} onChange={setAttached} />
         {correcting && (
-          <TextField
-            label="Why it is corrected"
-            hint="kept with your initials and the time; the former entry stays readable"
-            value={why}
-            onChange={setWhy}
-          />
+          <fieldset className="record-fields">
+            <legend>This correction</legend>
+            <TextField
+              label="Why it is corrected"
+              hint="kept with your initials and the time; the former entry stays readable"
+              value={why}
+              onChange={setWhy}
+            />
+            <TextField label="Your initials" value={signer} onChange={setSigner} />
+          </fieldset>
         )}
         <ErrorPanel problems={problems} title="Not saved yet" />
       </form>

@@ -15,11 +15,11 @@ interface ParticularFieldsProps {
 export function ParticularFields({ draft, substance, onChange }: ParticularFieldsProps) {
   switch (draft.kind) {
     case 'band list':
-      return <BandRows draft={draft} onChange={onChange} />;
+      return <BandRows draft={draft} onChange={onChange} withStrength />;
     case 'emission':
       return (
         <div className="stack">
-          <BandRows draft={draft} onChange={onChange} />
+          <BandRows draft={draft} onChange={onChange} withStrength={false} />
           <div className="record-fields">
             <TextField
               label="Excited at"
