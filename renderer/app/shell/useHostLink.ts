@@ -1,8 +1,10 @@
 import { useEffect } from 'react';
+import type { RecentProject } from '../../host';
 import { useToast } from '../../parts';
+import type { Store } from '../../store';
 import { useCommandRegistry } from '../commands';
 import { useRouter } from '../router/RouterContext';
-import { type History, useServices } from '../services';
+import { type History, useServices, useStored } from '../services';
 import { useProjectState } from '../session/ProjectSession';
 
 /** Answers the menu of the window and tells it what is possible. */
@@ -32,7 +34,19 @@ export function useHostLink(history: History): void {
   );
 
   const { undoLabel, redoLabel } = history;
+  const { value: recent = none } = useStored(recentProjects, projectsOnly);
   useEffect(() => {
-    host.setMenuState({ projectOpen, undo: undoLabel, redo: redoLabel, recent: [] }).catch(() => undefined);
-  }, [host, projectOpen, undoLabel, redoLabel]);
+    host.setMenuState({ projectOpen, undo: undoLabel, redo: redoLabel, recent }).catch(() => undefined);
+  }, [host, projectOpen, undoLabel, redoLabel, recent]);
+}
+
+const none: readonly RecentProject[] = [];
+const projectsOnly = ['projects'] as const;
+/** A menu that one reads at a glance. */
+const mostRecent = 8;
+
+/** Projects by the time of their last change. */
+async function recentProjects(store: Store): Promise<readonly RecentProject[]> {
+  const projects = await store.projects.list();
+  return projects.slice(0, mostRecent).map(({ id, name }) => ({ projectId: id, name }));
 }
