@@ -2,7 +2,8 @@ import type { ReactNode } from 'react';
 import { standardScore } from '../../../core/agreement';
 import { formatFigures, NumberWithRange, writeToStep } from '../../parts';
 import { fieldAgreement, type FieldPair } from './fieldPairs';
-import { percent, shareText } from './figureText';
+import { percent, shortShareText } from './figureText';
+import './PairTable.css';
 
 interface FieldSectionProps {
   readonly pairs: readonly FieldPair[];
@@ -34,8 +35,8 @@ export function FieldSection({ pairs, complexOf }: FieldSectionProps) {
                 <th scope="col">Mean absolute error</th>
                 <th scope="col">Root mean square</th>
                 <th scope="col">Median</th>
-                <th scope="col">Inside the 68 % range</th>
-                <th scope="col">Inside the 95 % range</th>
+                <th scope="col">Inside the 68 % range (95 % interval)</th>
+                <th scope="col">Inside the 95 % range (95 % interval)</th>
               </tr>
             </thead>
             <tbody>
@@ -47,8 +48,8 @@ export function FieldSection({ pairs, complexOf }: FieldSectionProps) {
                   <td className="figures">{percent(errors.meanAbsolute)}</td>
                   <td className="figures">{percent(errors.rootMeanSquare)}</td>
                   <td className="figures">{percent(errors.medianAbsolute)}</td>
-                  <td>{shareText(within68)}</td>
-                  <td>{shareText(within95)}</td>
+                  <td>{shortShareText(within68)}</td>
+                  <td>{shortShareText(within95)}</td>
                 </tr>
               ))}
             </tbody>

@@ -1,5 +1,5 @@
 import { formatFigures } from '../../parts';
-import { shareText } from './figureText';
+import { shortShareText } from './figureText';
 import { agreementOf, type BandPair } from './recordPairs';
 
 interface GroupTableProps {
@@ -24,8 +24,8 @@ export function GroupTable({ pairs, groupOf }: GroupTableProps) {
           <th scope="col">Mean absolute error</th>
           <th scope="col">Root mean square</th>
           <th scope="col">Median</th>
-          <th scope="col">Inside the 68 % range</th>
-          <th scope="col">Inside the 95 % range</th>
+          <th scope="col">Inside the 68 % range (95 % interval)</th>
+          <th scope="col">Inside the 95 % range (95 % interval)</th>
         </tr>
       </thead>
       <tbody>
@@ -37,8 +37,8 @@ export function GroupTable({ pairs, groupOf }: GroupTableProps) {
             <td className="figures">{agreement ? formatFigures(agreement.errors.meanAbsolute, 3) : '–'}</td>
             <td className="figures">{agreement ? formatFigures(agreement.errors.rootMeanSquare, 3) : '–'}</td>
             <td className="figures">{agreement ? formatFigures(agreement.errors.medianAbsolute, 3) : '–'}</td>
-            <td>{agreement ? shareText(agreement.within68) : '–'}</td>
-            <td>{agreement ? shareText(agreement.within95) : '–'}</td>
+            <td>{agreement ? shortShareText(agreement.within68) : '–'}</td>
+            <td>{agreement ? shortShareText(agreement.within95) : '–'}</td>
           </tr>
         ))}
       </tbody>

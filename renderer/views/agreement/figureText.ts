@@ -7,5 +7,11 @@ export const shareText = ({ hits, of, share, interval95 }: Share): string =>
     ? 'none'
     : `${hits} of ${of}, ${formatShare(share)} (95 % interval ${formatShare(interval95[0])} to ${formatShare(interval95[1])})`;
 
+/** The same for a narrow column whose head says what the interval is. */
+export const shortShareText = ({ hits, of, share, interval95 }: Share): string =>
+  share === null
+    ? 'none'
+    : `${hits} of ${of} (${formatShare(interval95[0])} to ${formatShare(interval95[1])})`;
+
 /** A signed share of one in percent. */
-export const percent = (share: number): string => `${writeToStep(100 * share, 0.1)} %`;
+export const percent = (share: number): string => `${writeToStep(100 * share, 0.1)}\u202f%`;
