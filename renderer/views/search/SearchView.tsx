@@ -8,7 +8,9 @@ import { ViewHeader } from '../../app/shell/ViewHeader';
 import { ErrorPanel } from '../../parts';
 import { useReply } from './asking/useReply';
 import { Before } from './Before';
+import { NeededPanel } from './inverse/NeededPanel';
 import { ResultsPanel } from './results/ResultsPanel';
+import { Advice } from './run/Advice';
 import { LeftOver } from './run/LeftOver';
 import { RunPanel } from './run/RunPanel';
 import { RunTabs } from './run/RunTabs';
@@ -37,6 +39,13 @@ export default function SearchView() {
   const count = useReply({ kind: 'count', wish: { ...wish, name: 'counted' }, overlay });
   const refused = count.current && count.reply?.kind === 'refused';
   const begin = (): void => runs.show(searchRuns.start(project.id, wish, overlay));
+  const ions = useMemo(() => {
+    const open = [...library.ions.values()].filter(({ dElectrons }) => dElectrons > 0 && dElectrons < 10);
+    const without = new Set(draft.withoutElements);
+    return open
+      .filter(({ ion, symbol }) => !without.has(symbol) && (draft.ions === 'all' || draft.ions.includes(ion)))
+      .map(({ ion }) => ion);
+  }, [library, draft.ions, draft.withoutElements]);
   const keepShelf = useCallback((shelf: readonly string[]) => set('shelf', [...shelf]), [set]);
   const { shown } = runs;
   return (
@@ -97,6 +106,7 @@ export default function SearchView() {
             </p>
           )}
           <WhyNotPanel wish={wish} results={shown?.results ?? []} />
+          <NeededPanel wish={wish} ions={ions} />
         </div>
       </div>
     </>
@@ -121,6 +131,7 @@ const Run = memo(function Run({ run }: { readonly run: SearchRun }) {
         title={run.phase === 'failed' ? 'The search ended early' : 'This wish cannot be searched for'}
       />
       <RunPanel run={run} />
+      {run.phase === 'finished' && run.results.length === 0 && <Advice run={run} />}
       <ResultsPanel run={run} held={held} onAdd={add} />
     </>
   );

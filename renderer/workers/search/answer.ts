@@ -1,6 +1,15 @@
 import { complexKey, type ParameterLibrary } from '../../../core/library';
 import { predict } from '../../../core/prediction';
-import { checkWish, countCandidates, scoreCandidate, spaceOf } from '../../../core/search';
+import type { Composition } from '../../../core/record/composition';
+import {
+  checkWish,
+  countCandidates,
+  neededFields,
+  relaxations,
+  spaceOf,
+  whyNot,
+  type Wish,
+} from '../../../core/search';
 import { summarise } from '../estimateSummary';
 import type { Question, Reply } from './protocol';
 
@@ -8,22 +17,31 @@ import type { Question, Reply } from './protocol';
 export function answer(question: Question, library: ParameterLibrary): Reply {
   const checked = checkWish(question.wish, library);
   if (!checked.ok) return { kind: 'refused', problems: checked.problems };
-  if (question.kind === 'count') {
-    return { kind: 'counted', count: countCandidates(spaceOf(checked.value, library)) };
+  const wish = checked.value;
+  switch (question.kind) {
+    case 'count':
+      return { kind: 'counted', count: countCandidates(spaceOf(wish, library)) };
+    case 'score':
+      return held(question.composition, wish, library);
+    case 'relax':
+      return { kind: 'advice', relaxations: relaxations(wish, library) };
+    case 'needed': {
+      const window = wish.bands?.[question.band];
+      const alone = { ...wish, ions: [question.ion] };
+      const fields = window === undefined ? [] : neededFields(window, question.geometry, alone, library);
+      return { kind: 'needed', fields };
+    }
   }
-  const candidate = { id: complexKey(question.composition), ...question.composition };
-  const scored = scoreCandidate(candidate, checked.value, library);
-  if (scored === null) {
-    const outcome = predict(candidate, { library, draws: 0 });
-    return { kind: 'refused', problems: outcome.ok ? [] : outcome.problems };
-  }
-  const { prediction, result } = scored;
+}
+
+function held(composition: Composition, wish: Wish, library: ParameterLibrary): Reply {
+  const input = { id: complexKey(composition), ...composition };
+  const outcome = predict(input, { library, draws: 0 });
+  const { exclusions, score } = whyNot(composition, wish, library);
+  if (!outcome.ok) return { kind: 'refused', problems: outcome.problems };
+  if (score === null) return { kind: 'refused', problems: [] };
   return {
     kind: 'scored',
-    scored: {
-      formula: result.formula,
-      score: { probability: result.probability, parts: result.parts },
-      summary: summarise({ ok: true, prediction }),
-    },
+    scored: { formula: score.formula, score, exclusions, summary: summarise(outcome) },
   };
 }

@@ -1,6 +1,6 @@
 import type { Problem } from '../../../core/errors';
 import type { Composition } from '../../../core/record/composition';
-import type { SearchResult, WishScore } from '../../../core/search';
+import type { NeededField, Relaxation, SearchResult, WhyNot } from '../../../core/search';
 import type { CandidateSummary } from '../estimateSummary';
 import type { Overlay } from '../protocol';
 
@@ -40,6 +40,16 @@ export type Question = { readonly job: number } & Wished &
     | { readonly kind: 'count' }
     /** How well one complex would meet the wish, part by part. */
     | { readonly kind: 'score'; readonly composition: Composition }
+    /** Which part to give up where nothing meets the whole wish. */
+    | { readonly kind: 'relax' }
+    /** The fields that would put a band of one ion into a window of the wish. */
+    | {
+        readonly kind: 'needed';
+        readonly ion: string;
+        readonly geometry: NeededField['geometry'];
+        /** Place of the window among the bands of the wish. */
+        readonly band: number;
+      }
   );
 
 export type ToSearch =
@@ -51,14 +61,18 @@ export type ToSearch =
 /** One complex held against a wish. */
 export interface ScoredCandidate {
   readonly formula: string;
-  readonly score: WishScore;
+  readonly score: SearchResult;
+  /** Rules of the wish that keep it out of the search altogether. */
+  readonly exclusions: WhyNot['exclusions'];
   readonly summary: CandidateSummary;
 }
 
 export type Reply =
   | { readonly kind: 'refused'; readonly problems: readonly Problem[] }
   | { readonly kind: 'counted'; readonly count: number }
-  | { readonly kind: 'scored'; readonly scored: ScoredCandidate };
+  | { readonly kind: 'scored'; readonly scored: ScoredCandidate }
+  | { readonly kind: 'advice'; readonly relaxations: readonly Relaxation[] }
+  | { readonly kind: 'needed'; readonly fields: readonly NeededField[] };
 
 export type FromSearch =
   | { readonly kind: 'refused'; readonly problems: readonly Problem[] }

@@ -113,6 +113,16 @@ describe('the search beside the window', () => {
     ]);
     running.handle({
       kind: 'score',
+      job: 3,
+      wish: { ...wish, ions: ['Cr3+'], charge: { min: -1, max: 0 } },
+      overlay: null,
+      composition,
+    });
+    expect(posted.pop()).toMatchObject({
+      reply: { scored: { exclusions: [{ part: 'ions' }, { part: 'charge' }] } },
+    });
+    running.handle({
+      kind: 'score',
       job: 2,
       wish,
       overlay: null,
@@ -121,5 +131,28 @@ describe('the search beside the window', () => {
     expect(posted[1]).toMatchObject({
       reply: { kind: 'refused', problems: [{ code: 'coordination-number' }] },
     });
+  });
+
+  it('says which part to give up, and which field would do it', () => {
+    const { running, posted } = runner();
+    const narrow = { ...wish, bands: [{ from_nm: 300, to_nm: 301 }], spin: 'low' };
+    running.handle({ kind: 'relax', job: 1, wish: { ...narrow, ions: ['Fe2+'] }, overlay: null });
+    expect(posted.pop()).toMatchObject({ reply: { kind: 'advice', relaxations: [{ part: 'bands[0]' }] } });
+    running.handle({
+      kind: 'needed',
+      job: 2,
+      wish,
+      overlay: null,
+      ion: 'Ni2+',
+      geometry: 'octahedral',
+      band: 0,
+    });
+    // The second spin-allowed band of nickel(II) with three en lies at 18 350 cm-1, its 10Dq at 11 500
+    // (Figgis and Hitchman 2000, from memory): the field asked for includes it.
+    const reply = posted.pop();
+    if (reply?.kind !== 'answer' || reply.reply.kind !== 'needed') throw new Error('no fields');
+    const second = reply.reply.fields.find(({ band, tenDq }) => band === '3T1g' && tenDq[0] > 8000)!;
+    expect(second.tenDq[0]).toBeLessThan(11_500);
+    expect(second.ligands.map(({ id }) => id)).toContain('en');
   });
 });

@@ -1,7 +1,7 @@
 import type { FromSearch, Question, Reply } from '../../../workers/search/protocol';
 import { startSearchWorker } from '../../../workers/search/startSearchWorker';
 
-type Asked = Question extends infer Each ? (Each extends Question ? Omit<Each, 'job'> : never) : never;
+export type Asked = Question extends infer Each ? (Each extends Question ? Omit<Each, 'job'> : never) : never;
 
 interface Waiting {
   readonly resolve: (reply: Reply) => void;
@@ -45,3 +45,5 @@ export class SearchAsker {
 }
 
 export const searchAsker = new SearchAsker();
+/** For questions that take seconds: the count above the form does not wait for them. */
+export const patientAsker = new SearchAsker();

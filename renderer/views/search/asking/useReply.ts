@@ -1,8 +1,6 @@
 import { useEffect, useState } from 'react';
 import type { Reply } from '../../../workers/search/protocol';
-import { type SearchAsker, searchAsker } from './searchAsker';
-
-type Asked = Parameters<SearchAsker['ask']>[0];
+import { type Asked, type SearchAsker, searchAsker } from './searchAsker';
 
 export interface AskedReply {
   /** The last reply; it stays while the next one is awaited. */
@@ -16,7 +14,7 @@ export interface AskedReply {
 const settle_ms = 150;
 
 /** The reply to a question about a wish, asked anew whenever the question changes; null asks nothing. */
-export function useReply(question: Asked | null): AskedReply {
+export function useReply(question: Asked | null, asker: SearchAsker = searchAsker): AskedReply {
   const [answer, setAnswer] = useState<{ key: string; reply: Reply | null; error: string | null }>({
     key: '',
     reply: null,
@@ -27,7 +25,7 @@ export function useReply(question: Asked | null): AskedReply {
     if (key === '') return;
     let current = true;
     const timer = setTimeout(() => {
-      searchAsker.ask(JSON.parse(key) as Asked).then(
+      asker.ask(JSON.parse(key) as Asked).then(
         (reply) => current && setAnswer({ key, reply, error: null }),
         (error: Error) => current && setAnswer({ key, reply: null, error: error.message }),
       );
@@ -36,7 +34,7 @@ export function useReply(question: Asked | null): AskedReply {
       current = false;
       clearTimeout(timer);
     };
-  }, [key]);
+  }, [key, asker]);
   if (key === '') return { reply: null, current: true, error: null };
   return { reply: answer.reply, error: answer.error, current: answer.key === key };
 }

@@ -7,7 +7,6 @@ import { ErrorPanel, formatShare, Formula, Swatch } from '../../../parts';
 import type { ShownResult } from '../../../workers/search/protocol';
 import { useReply } from '../asking/useReply';
 import { PartList } from '../results/PartList';
-import { outsideReasons } from './outsideReasons';
 import { readComplex } from './readComplex';
 
 interface WhyNotPanelProps {
@@ -25,10 +24,6 @@ export function WhyNotPanel({ wish, results }: WhyNotPanelProps) {
   const composition = read?.ok === true ? read.value : null;
   const { reply, current, error } = useReply(
     composition === null ? null : { kind: 'score', wish, overlay, composition },
-  );
-  const outside = useMemo(
-    () => (composition === null ? [] : outsideReasons(wish, composition, library)),
-    [wish, composition, library],
   );
   return (
     <section className="panel stack" aria-labelledby={title}>
@@ -68,12 +63,12 @@ export function WhyNotPanel({ wish, results }: WhyNotPanelProps) {
             size="row"
             text="words"
           />
-          {outside.length > 0 && (
+          {reply.scored.exclusions.length > 0 && (
             <div>
               <p>The search does not look at it:</p>
               <ul>
-                {outside.map((reason) => (
-                  <li key={reason}>{reason}</li>
+                {reply.scored.exclusions.map(({ part, because }) => (
+                  <li key={`${part} ${because}`}>{because}</li>
                 ))}
               </ul>
             </div>

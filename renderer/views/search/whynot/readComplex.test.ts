@@ -1,7 +1,6 @@
 // @vitest-environment node
 import { describe, expect, it } from 'vitest';
 import { defaultLibrary } from '../../../../core/library';
-import { outsideReasons } from './outsideReasons';
 import { readComplex } from './readComplex';
 
 const read = (text: string) => readComplex(text, defaultLibrary);
@@ -37,24 +36,5 @@ describe('a complex as typed', () => {
       expect(outcome.ok).toBe(false);
       if (!outcome.ok) expect(outcome.problems[0]!.message).toContain(word);
     }
-  });
-});
-
-describe('what a search never looks at', () => {
-  it('is told with every choice that keeps it out', () => {
-    const complex = read('Co3+ 2 en 1 Cl 1 nh3');
-    if (!complex.ok) throw new Error('not read');
-    const wish = {
-      name: 'w',
-      ions: ['Cr3+'],
-      geometries: ['tetrahedral' as const],
-      ligands: { allow: ['en', 'nh3'], maxKinds: 2 },
-      charge: { min: -1, max: 0 },
-    };
-    const reasons = outsideReasons(wish, complex.value, defaultLibrary).join('; ');
-    for (const part of ['Co3+', 'octahedral', 'Cl', '3 kinds', 'charge 2']) expect(reasons).toContain(part);
-    expect(outsideReasons({ name: 'w', ligands: { maxKinds: 3 } }, complex.value, defaultLibrary)).toEqual(
-      [],
-    );
   });
 });
