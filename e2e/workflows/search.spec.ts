@@ -10,7 +10,8 @@ test.setTimeout(180_000);
 async function openSearch(page: Page): Promise<void> {
   await arrived(page);
   await page.getByRole('link', { name: /^Open Demo/ }).click();
-  await expect(page.getByText('41 candidates')).toBeVisible();
+  // Those of another test of this file may be among them, from the folder of copies.
+  await expect(page.getByText(/^4\d candidates/)).toBeVisible();
   await expect(page.locator('.cell-waiting')).toHaveCount(0);
   await page.getByRole('link', { name: 'Find ligands' }).click();
   await expect(page.locator('.search-count')).toHaveText(/^[\d\s]+ candidates/);

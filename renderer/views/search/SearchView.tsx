@@ -55,7 +55,7 @@ export default function SearchView() {
         summary="Say what is wanted; every combination that the choice allows is looked at and ranked."
         actions={
           <button type="button" className="button-main" disabled={!ready || refused} onClick={begin}>
-            {runs.all.some(({ phase }) => phase === 'running') ? 'Start another search' : 'Start the search'}
+            {runs.all.length > 0 ? 'Start another search' : 'Start the search'}
           </button>
         }
       />
