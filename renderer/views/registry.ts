@@ -10,6 +10,7 @@ import { entryView } from './entry';
 import { libraryView } from './library';
 import { mergeView } from './merge';
 import { recordView } from './record';
+import { reportsView } from './reports';
 import { searchView } from './search';
 import { settingsView } from './settings';
 import { sheetView } from './sheet';
@@ -24,6 +25,7 @@ export const views: readonly ViewDefinition[] = [
   compareView,
   recordView,
   agreementView,
+  reportsView,
   analysisView,
   sheetView,
   libraryView,

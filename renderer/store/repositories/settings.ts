@@ -17,6 +17,10 @@ export const settingSchemas = {
   lastProject: z.string().max(100).nullable().catch(null),
   demoLoaded: z.boolean().catch(false),
   singleKeys: z.boolean().catch(true),
+  /** Paper of the reports; null for what is usual where one is. */
+  paper: z.enum(['A4', 'Letter']).nullable().catch(null),
+  /** Whether the tour was taken or turned down. */
+  tourDone: z.boolean().catch(false),
   /** Ids of the ligands at hand. */
   shelf: z.array(z.string().max(60)).max(2000).catch([]),
   /** Searches that were under way when they were last heard of, so that closing the window loses none. */
