@@ -32,7 +32,7 @@ async function imported(page: Page, text: string): Promise<void> {
   const buffer = Buffer.from(text);
   await (await choosing).setFiles({ name: 'series.spinhue.json', mimeType: 'application/json', buffer });
   await page.getByRole('button', { name: 'Import', exact: true }).click();
-  await expect(page.getByText('9 candidates')).toBeVisible();
+  await expect(page.getByText('9 candidates', { exact: true })).toBeVisible();
 }
 
 async function downloaded(page: Page, button: string): Promise<string> {
