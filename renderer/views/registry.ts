@@ -1,4 +1,5 @@
 import type { ViewDefinition } from '../app/view';
+import { aboutView } from './about';
 import { agreementView } from './agreement';
 import { analysisView } from './analysis';
 import { backupsView } from './backups';
@@ -9,6 +10,7 @@ import { diagramView } from './diagram';
 import { entryView } from './entry';
 import { libraryView } from './library';
 import { mergeView } from './merge';
+import { methodsView } from './methods';
 import { recordView } from './record';
 import { reportsView } from './reports';
 import { searchView } from './search';
@@ -33,5 +35,7 @@ export const views: readonly ViewDefinition[] = [
   mergeView,
   backupsView,
   binView,
+  methodsView,
+  aboutView,
   settingsView,
 ];

@@ -2,6 +2,7 @@ import { useCallback, useState } from 'react';
 import { useHistory } from '../services';
 import { useProjectState } from '../session/ProjectSession';
 import type { ViewDefinition } from '../view';
+import { Tour } from '../tour/Tour';
 import { FindDialog } from './FindDialog';
 import { Rail } from './Rail';
 import { ShortcutList } from './ShortcutList';
@@ -33,6 +34,7 @@ export function Frame({ views }: { readonly views: readonly ViewDefinition[] }) 
       <div className="frame-main">
         <Troubles />
         <ViewPort views={views} />
+        <Tour />
       </div>
       <FindDialog open={overlay === 'find'} onClose={close} />
       <ShortcutList open={overlay === 'shortcuts'} onClose={close} />

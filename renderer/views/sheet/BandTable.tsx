@@ -8,6 +8,7 @@ import { fromWavenumber, widthFromWavenumber } from '../../../core/units';
 import { NumberField } from '../../app/form';
 import {
   ConfigurationLabel,
+  Explain,
   formatFigures,
   formatShare,
   NumberWithRange,
@@ -45,7 +46,11 @@ export function BandTable({ prediction, solvent }: BandTableProps) {
   const hidden = bands.length - shown.length;
   return (
     <section className="panel sheet-wide" aria-labelledby="sheet-bands">
-      <h2 id="sheet-bands">Bands</h2>
+      <div className="with-explain">
+        <h2 id="sheet-bands">Bands</h2>
+        <Explain quantity="band" />
+        <Explain quantity="strength" />
+      </div>
       {bands.length === 0 ? (
         <p className="soft">No band of this complex could be estimated.</p>
       ) : (

@@ -3,7 +3,7 @@ import type { ColourCloud } from '../../../core/colour/types';
 import { colourDifference, colourOfPowder, fullShadeScale } from '../../../core/colour';
 import type { Prediction } from '../../../core/prediction/types';
 import { useProject } from '../../app/session/ProjectSession';
-import { CloudStrip, formatShare, Swatch, SwatchTrio, TransmissionStrip } from '../../parts';
+import { CloudStrip, Explain, formatShare, Swatch, SwatchTrio, TransmissionStrip } from '../../parts';
 import { ColourCloudPlot } from '../../plots';
 import { transmittanceOf } from '../../workers/transmittance';
 import type { Viewing } from './viewing/viewing';
@@ -18,7 +18,10 @@ interface ColourPanelProps {
 export function ColourPanel({ prediction, cloud, viewing }: ColourPanelProps) {
   return (
     <section className="panel colour-panel" aria-labelledby="sheet-colour">
-      <h2 id="sheet-colour">Seen colour</h2>
+      <div className="with-explain">
+        <h2 id="sheet-colour">Seen colour</h2>
+        <Explain quantity="colour" />
+      </div>
       {viewing.matter === 'powder' ? (
         <PowderColour prediction={prediction} viewing={viewing} />
       ) : (

@@ -1,6 +1,6 @@
 import type { Estimate, EstimateRoute } from '../../../core/estimation/types';
 import type { Prediction } from '../../../core/prediction/types';
-import { NumberWithRange, Why } from '../../parts';
+import { Explain, NumberWithRange, type QuantityId, Why } from '../../parts';
 import { QuantityLine } from './QuantityLine';
 
 const routeWords: Record<EstimateRoute, string> = {
@@ -21,11 +21,26 @@ export function FieldPanel({ prediction }: { readonly prediction: Prediction }) 
     <section className="panel" aria-labelledby="sheet-field">
       <h2 id="sheet-field">Field and repulsion</h2>
       <dl className="quantities">
-        <Quantity name="10Dq" meaning="splitting of the d shell by the ligands" estimate={prediction.tenDq} />
+        <Quantity
+          name="10Dq"
+          help="tenDq"
+          meaning="splitting of the d shell by the ligands"
+          estimate={prediction.tenDq}
+        />
         {tenDqBySpin && <BySpin {...tenDqBySpin} />}
-        <Quantity name="B" meaning="Racah parameter of electron repulsion" estimate={prediction.racahB} />
+        <Quantity
+          name="B"
+          help="racahB"
+          meaning="Racah parameter of electron repulsion"
+          estimate={prediction.racahB}
+        />
         <Quantity name="C" meaning="second Racah parameter" estimate={prediction.racahC} />
-        <Quantity name="ζ" meaning="spin-orbit parameter of one electron" estimate={prediction.zeta} />
+        <Quantity
+          name="ζ"
+          help="zeta"
+          meaning="spin-orbit parameter of one electron"
+          estimate={prediction.zeta}
+        />
       </dl>
     </section>
   );
@@ -50,15 +65,17 @@ const BySpin = ({ high, low }: NonNullable<Prediction['tenDqBySpin']>) => (
 interface QuantityProps {
   readonly name: string;
   readonly meaning: string;
+  readonly help?: QuantityId;
   readonly estimate: Estimate;
 }
 
-function Quantity({ name, meaning, estimate }: QuantityProps) {
+function Quantity({ name, meaning, help, estimate }: QuantityProps) {
   return (
     <QuantityLine
       name={
         <>
           <abbr title={meaning}>{name}</abbr> <span className="small">{routeWords[estimate.route]}</span>
+          {help && <Explain quantity={help} />}
         </>
       }
       value={<NumberWithRange kind="interval" value={estimate.value} sigma={estimate.sigma} />}

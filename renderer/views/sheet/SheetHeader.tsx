@@ -88,6 +88,9 @@ export function SheetHeader({ candidate, prediction }: SheetHeaderProps) {
             <a className="button" href={linkTo({ view: 'entry', project: projectId, item: id })}>
               Change…
             </a>
+            <a className="button" href={linkTo({ view: 'reports', project: projectId, item: `card:${id}` })}>
+              Card…
+            </a>
             <button type="button" onClick={actions.remove}>
               Delete
             </button>

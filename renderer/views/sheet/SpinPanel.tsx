@@ -1,5 +1,5 @@
 import type { Prediction } from '../../../core/prediction/types';
-import { NumberWithRange, SpinBar, TermSymbol, Why } from '../../parts';
+import { Explain, NumberWithRange, SpinBar, TermSymbol, Why } from '../../parts';
 import { QuantityLine } from './QuantityLine';
 
 /** Spin state in words and probability, ground term, moment. */
@@ -8,7 +8,10 @@ export function SpinPanel({ prediction }: { readonly prediction: Prediction }) {
   const { gap, crossoverTenDqOverB, momentSpinOnly_BM, momentRange_BM } = spin;
   return (
     <section className="panel" aria-labelledby="sheet-spin">
-      <h2 id="sheet-spin">Spin state</h2>
+      <div className="with-explain">
+        <h2 id="sheet-spin">Spin state</h2>
+        <Explain quantity="spin" />
+      </div>
       <div className="stack">
         <SpinBar spin={spin} />
         <dl className="quantities">
@@ -34,7 +37,11 @@ export function SpinPanel({ prediction }: { readonly prediction: Prediction }) {
             />
           )}
           <QuantityLine
-            name="Magnetic moment"
+            name={
+              <>
+                Magnetic moment <Explain quantity="moment" />
+              </>
+            }
             value={
               <NumberWithRange
                 kind="plain"

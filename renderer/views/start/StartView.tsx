@@ -5,6 +5,7 @@ import { useStored } from '../../app/services';
 import { ViewHeader } from '../../app/shell/ViewHeader';
 import { EmptyState, ErrorPanel } from '../../parts';
 import type { Store } from '../../store';
+import { TourOffer } from '../../app/tour/Tour';
 import { NewProjectDialog } from './NewProjectDialog';
 import { ProjectList } from './ProjectList';
 
@@ -34,6 +35,7 @@ export default function StartView() {
         summary="A project holds the complexes you weigh against each other, and what you measured on them."
         actions={actions}
       />
+      <TourOffer />
       {error !== null && (
         <ErrorPanel
           title="The list of projects cannot be read"

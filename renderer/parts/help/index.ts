@@ -1,0 +1,3 @@
+export { Explain } from './Explain';
+export { quantities, quantityIds, type QuantityHelp, type QuantityId } from './quantities';
+export { QuantityText } from './QuantityText';
