@@ -105,6 +105,12 @@ test('a dropped spectrum is kept, treated, fitted, assigned; its field is fitted
   await page.getByLabel('Step', { exact: true }).selectOption('to molar absorptivity');
   await page.getByRole('button', { name: 'Add the step' }).click();
   await expect(page.getByRole('listitem').filter({ hasText: 'divided by 50 mM and 1 cm' })).toBeVisible();
+  // By keyboard: the curve is read with the arrows, Enter starts a band at the point being read.
+  await page.getByRole('application', { name: /^Spectrum and fitted bands/ }).focus();
+  await page.keyboard.press('End');
+  for (let step = 0; step < 30; step++) await page.keyboard.press('ArrowLeft');
+  await page.keyboard.press('Enter');
+  await expect(page.getByLabel('Centre / cm⁻¹, band 1')).toHaveValue(/^\d{5}$/);
   await page.getByRole('button', { name: 'Suggest from the curve' }).click();
   await page.getByRole('button', { name: 'Compare one to five bands' }).click();
   await expect(page.getByText('(fewest that will do)')).toBeVisible();
@@ -185,4 +191,89 @@ test('a dropped spectrum is kept, treated, fitted, assigned; its field is fitted
   expect(after).toEqual(before);
   const raw = (after[3]![0] as { base64: string }).base64;
   expect(Buffer.from(raw, 'base64').toString('utf8')).toBe(spectrum());
+});
+
+test('a moment from what was read off, its correction, its batch and what is attached', async ({
+  workbench: page,
+}) => {
+  await arrived(page);
+  await page.getByRole('link', { name: /^Open Demo/ }).click();
+  await page.getByText('41 candidates').waitFor();
+  await page.keyboard.press('g');
+  await page.keyboard.press('r');
+  const candidates = page.getByLabel('Candidate');
+  await expect(candidates.locator('option')).toHaveCount(42);
+  const names = await candidates.locator('option').allTextContents();
+  await candidates.selectOption({ index: names.findIndex((name) => name.includes('[Ni(NH3)6]2+')) });
+  const add = page.getByRole('button', { name: 'Add measurement…' });
+  await expect(add).toBeEnabled();
+  await add.focus();
+  await page.keyboard.press('Enter');
+  const dialog = page.getByRole('dialog');
+  await dialog.getByRole('radio', { name: 'Bands' }).focus();
+  await page.keyboard.press('ArrowRight');
+  await expect(dialog.getByRole('radio', { name: 'Moment', exact: true })).toBeChecked();
+  await dialog.getByRole('button', { name: 'Save the measurement' }).click();
+  await expect(dialog.getByText('The moment is missing.')).toBeVisible();
+
+  // chi = 3 df / (4 pi f c), D. F. Evans, J. Chem. Soc. 1959, 2003, by hand: 150 Hz at 400 MHz and 10 mM, 4.62.
+  await dialog.getByLabel('Shift', { exact: true }).fill('150');
+  await dialog.getByLabel('Spectrometer frequency').fill('400');
+  await dialog.getByLabel('Correction for diamagnetism').selectOption('none');
+  await expect(dialog.getByText(/Not worked out yet: A moment needs the temperature/)).toBeVisible();
+  await dialog.getByLabel('Temperature', { exact: true }).fill('298.15');
+  await dialog.getByLabel('Concentration', { exact: true }).fill('10');
+  await expect(dialog.getByText(/Effective moment 4\.62/)).toBeVisible();
+  await dialog.getByLabel('Batch').fill('MK-17');
+  const attachment = Buffer.from([0, 1, 2, 250, 255, 13, 10]);
+  await dialog
+    .getByLabel('Attach files')
+    .setInputFiles({ name: 'fid.bin', mimeType: 'application/octet-stream', buffer: attachment });
+  await expect(dialog.getByText('fid.bin')).toBeVisible();
+  await accessible(page, 'form of a moment');
+  await dialog.getByRole('button', { name: 'Save the measurement' }).click();
+  await expect(page.getByText('Moment 4.62 μB (Evans)')).toBeVisible();
+
+  const [download] = await Promise.all([
+    page.waitForEvent('download'),
+    page.getByRole('button', { name: 'Save attachment fid.bin' }).click(),
+  ]);
+  expect(await readFile(await download.path())).toEqual(attachment);
+
+  await page.getByRole('button', { name: 'Edit… batch MK-17' }).click();
+  await dialog.getByLabel('Counter-ion').fill('Cl');
+  // [Ni(NH3)6]Cl2 weighs 231.78 g/mol, as on the bottle (CAS 10534-88-0).
+  await expect(dialog.getByText(/^empty: 231\.78/)).toBeVisible();
+  await accessible(page, 'form of a batch');
+  await dialog.getByRole('button', { name: 'Save the batch' }).click();
+  await expect(page.getByText(/231\.78 g\/mol \(computed\)/)).toBeVisible();
+
+  await page.getByRole('button', { name: 'Correct…' }).click();
+  await dialog.getByLabel('Correction for diamagnetism').selectOption('a value of your own');
+  await dialog.getByLabel('Diamagnetic susceptibility').fill('-250');
+  await dialog.getByRole('button', { name: 'Save as a new revision' }).click();
+  await expect(dialog.getByText('A correction needs its reason.')).toBeVisible();
+  await expect(dialog.getByText('A correction is signed.')).toBeVisible();
+  await dialog.getByLabel('Why it is corrected').fill('diamagnetism was left out');
+  await dialog.getByLabel('Your initials').fill('AB');
+  await dialog.getByRole('button', { name: 'Save as a new revision' }).click();
+  await expect(page.getByText('Moment 4.68 μB (Evans)').first()).toBeVisible();
+  await page.getByText('Corrected once').click();
+  await expect(page.getByText(/AB: Moment 4\.68 μB \(Evans\) \(diamagnetism was left out\)/)).toBeVisible();
+  await accessible(page, 'record of a candidate');
+  const rows = (await stored(page, 'measurements')) as {
+    revisions: { by: string; why: string; content: { kind: string } }[];
+  }[];
+  const moment = rows.find(({ revisions }) => revisions[0]!.content.kind === 'moment')!;
+  expect(moment.revisions.map(({ by, why }) => [by, why])).toEqual([
+    ['', ''],
+    ['AB', 'diamagnetism was left out'],
+  ]);
+
+  await page.keyboard.press('Control+z');
+  await expect(page.getByText('Moment 4.62 μB (Evans)')).toBeVisible();
+  await page.keyboard.press('Control+z');
+  await expect(page.getByText(/231\.78 g\/mol/)).toBeHidden();
+  await page.keyboard.press('Control+z');
+  await expect(page.getByText('Nothing measured yet.')).toBeVisible();
 });

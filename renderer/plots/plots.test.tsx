@@ -120,7 +120,7 @@ describe('the band fit', () => {
         bands={[{ name: 'band 1', centre_cm1: 17_000, centreError_cm1: 25, value: [0.1, 0.48, 0.12] }]}
       />,
     );
-    expect(document.querySelectorAll('.plot-stage .fit-measured')).toHaveLength(3);
+    expect(document.querySelector('.plot-stage .fit-points')!.getAttribute('d')!.match(/M/g)).toHaveLength(3);
     expect(document.querySelectorAll('.plot-stage .residual-68')).toHaveLength(1);
     const stage = screen.getByRole('application');
     for (const key of ['ArrowRight', 'ArrowRight']) fireEvent.keyDown(stage, { key });
@@ -132,7 +132,7 @@ describe('the band fit', () => {
   it('shows the spectrum alone before a fit', () => {
     render(<BandFitPlot measured={measured} fit={null} bands={[]} />);
     expect(document.querySelector('.fit-residual')).toBeNull();
-    expect(document.querySelectorAll('.plot-stage .fit-measured')).toHaveLength(3);
+    expect(document.querySelector('.plot-stage .fit-points')!.getAttribute('d')!.match(/M/g)).toHaveLength(3);
   });
 
   it('asks for a file where there is none', () => {

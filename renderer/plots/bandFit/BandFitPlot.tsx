@@ -1,7 +1,17 @@
 import { useMemo } from 'react';
 import { fromWavenumber, toWavenumber } from '../../../core/units';
 import { formatFigures, unitText, UnitSwitch, useUnit } from '../../parts/number';
-import { Axes, extent, linePath, padded, Plot, PlotClip, PlotSvg, type ReadSeries } from '../frame';
+import {
+  Axes,
+  extent,
+  linePath,
+  padded,
+  Plot,
+  PlotClip,
+  PlotSvg,
+  type PlotView,
+  type ReadSeries,
+} from '../frame';
 import { placeText } from '../spectrum/bandText';
 import { axisDomain, curveInUnit, type SpectrumCurve } from '../spectrum/spectrumUnits';
 import { VisibleBand } from '../spectrum/VisibleBand';
@@ -145,15 +155,7 @@ export function BandFitPlot(props: BandFitPlotProps) {
           <Axes view={view} xFigures={!residual} />
           <VisibleBand view={view} unit={unit} />
           <PlotClip view={view}>
-            {Array.from(data.xs, (at, index) => (
-              <circle
-                key={index}
-                className="fit-measured"
-                cx={view.x(at)}
-                cy={view.y(data.ys[index]!)}
-                r={1.6}
-              />
-            ))}
+            <path className="fit-points" d={dotsPath(data.xs, data.ys, view)} />
             {starts.map((at, index) => {
               const x = view.x(fromWavenumber(at, unit));
               return (
@@ -201,3 +203,7 @@ const domainOf = (
   unit: Parameters<typeof fromWavenumber>[1],
 ): readonly [number, number] =>
   grid.length === 0 ? [0, 1] : axisDomain([grid[0]!, grid[grid.length - 1]!], unit);
+
+/** Dots as one path of strokes without length: thousands of circles would hold up every move of the pointer. */
+const dotsPath = (xs: ArrayLike<number>, ys: ArrayLike<number>, { x, y }: PlotView): string =>
+  Array.from(xs, (at, index) => `M${x(at).toFixed(1)} ${y(ys[index]!).toFixed(1)}h0`).join('');
