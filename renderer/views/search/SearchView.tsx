@@ -27,6 +27,9 @@ import './SearchView.css';
 
 const Form = memo(WishForm);
 
+/** Where even the best has less than this chance, it is said which part stands in the way. */
+const unlikely = 0.05;
+
 /** From a wish to the metal and ligand sets that would meet it. */
 export default function SearchView() {
   const { project, overlay, conditions } = useProject();
@@ -131,7 +134,7 @@ const Run = memo(function Run({ run }: { readonly run: SearchRun }) {
         title={run.phase === 'failed' ? 'The search ended early' : 'This wish cannot be searched for'}
       />
       <RunPanel run={run} />
-      {run.phase === 'finished' && run.results.length === 0 && <Advice run={run} />}
+      {run.phase === 'finished' && (run.results[0]?.probability ?? 0) < unlikely && <Advice run={run} />}
       <ResultsPanel run={run} held={held} onAdd={add} />
     </>
   );

@@ -118,10 +118,10 @@ export function SavedWishes({ wish, name, onName, onOpen }: SavedWishesProps) {
           </button>
         )}
         <button type="button" className="button-quiet" onClick={exportFile}>
-          Export as a file
+          Export
         </button>
         <button type="button" className="button-quiet" onClick={importFile}>
-          Open a file…
+          Import…
         </button>
       </div>
       {error !== null && <p role="alert">{error}</p>}
