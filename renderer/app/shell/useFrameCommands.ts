@@ -69,6 +69,7 @@ export function useFrameCommands(views: readonly ViewDefinition[], actions: Fram
         () => projectId !== null && exchange.exportProject(projectId),
         needsProject,
       ),
+      menuCommand('add-measurement', () => go({ view: 'record', project: projectId }), needsProject),
       menuCommand('print', () => void host.print()),
       menuCommand('print-to-pdf', () => void (host.info.abilities.pdf ? savePdf(host) : host.print())),
       menuCommand('choose-mirror-folder', () => void host.mirror.chooseFolder(), {
@@ -78,7 +79,7 @@ export function useFrameCommands(views: readonly ViewDefinition[], actions: Fram
         menuCommand(`theme-${theme}`, () => choose(theme)),
       ),
     ];
-  }, [find, shortcuts, history, exchange, projectId, host, choose]);
+  }, [find, shortcuts, history, exchange, projectId, host, choose, go]);
 
   useCommands(navigation);
   useCommands(general);

@@ -3,7 +3,7 @@ import { complexFormula } from '../../../core/library/complexFormula';
 import { defaultLibrary } from '../../../core/library/parameterLibrary';
 import type { Prediction } from '../../../core/prediction/types';
 import type { Candidate } from '../../../core/record/project';
-import { type Command, useCommands } from '../../app/commands';
+import { type Command, menuCommand, useCommands } from '../../app/commands';
 import { linkTo, useRouter } from '../../app/router/RouterContext';
 import { useAction, useStore } from '../../app/services';
 import { neighboursOf } from '../../app/session/shownOrder';
@@ -51,6 +51,9 @@ export function SheetHeader({ candidate, prediction }: SheetHeaderProps) {
           go({ view: 'entry', project: projectId, item: id }),
         ),
         command('freeze', 'Freeze the prediction', 'z', () => setFreezing(true), !canFreeze),
+        menuCommand('add-measurement', () => go({ view: 'record', project: projectId, item: id }), {
+          keys: ['m'],
+        }),
         command('star', 'Star or unstar', 's', actions.star),
         command('delete', 'Delete', 'Delete', actions.remove),
         command('back', 'Back to the table', 'u', () => go({ view: 'candidates', project: projectId })),
@@ -87,6 +90,9 @@ export function SheetHeader({ candidate, prediction }: SheetHeaderProps) {
             </button>
             <a className="button" href={linkTo({ view: 'entry', project: projectId, item: id })}>
               Change…
+            </a>
+            <a className="button" href={linkTo({ view: 'record', project: projectId, item: id })}>
+              Record…
             </a>
             <a className="button" href={linkTo({ view: 'reports', project: projectId, item: `card:${id}` })}>
               Card…
