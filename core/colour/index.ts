@@ -1,7 +1,14 @@
 export { illuminantIds, illuminants, observerIds, observers } from '../library/colourTables';
 export type { IlluminantId, ObserverId } from '../library/colourTables';
 export type { ColourCloud, SeenColour } from './types';
-export { defaultViewing, tristimulus, viewingWeights, chromaticity, type Triple, type Viewing } from './tristimulus';
+export {
+  defaultViewing,
+  tristimulus,
+  viewingWeights,
+  chromaticity,
+  type Triple,
+  type Viewing,
+} from './tristimulus';
 export { chromaAndHue, hueDistance, labFromXYZ, lchFromLab } from './cieLab';
 export { displayColour, type DisplayColour } from './displayColour';
 export { linearToOklab, oklabToLinear } from './oklab';
