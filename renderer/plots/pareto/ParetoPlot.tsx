@@ -112,5 +112,7 @@ export function ParetoPlot({ points, costName, title, height, onOpen, note }: Pa
 function whole(view: PlotView, points: readonly ParetoPoint[]): PlotView {
   if (!points.every(({ cost }) => Number.isInteger(cost))) return view;
   const values = view.xTicks.values.filter((value) => Math.abs(value - Math.round(value)) < 1e-9);
-  return values.length === 0 ? view : { ...view, xTicks: { ...view.xTicks, values } };
+  return values.length === 0
+    ? view
+    : { ...view, xTicks: { values, text: (value) => String(Math.round(value)) } };
 }

@@ -41,7 +41,10 @@ export function CompareTable({ compared, onRemove }: CompareTableProps) {
   const { project } = useProject();
   return (
     <div className="compare-table">
-      <table className="plain-table">
+      <table
+        className="plain-table compare-columns"
+        style={{ minInlineSize: `${10 + 11 * compared.length}rem` }}
+      >
         <thead>
           <tr>
             <td />
