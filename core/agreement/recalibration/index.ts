@@ -9,3 +9,4 @@ export {
 } from './recalibrate';
 export { type ParameterChange } from './proposal';
 export { parameterSetFrom, type Adoption } from './parameterSet';
+export { bundleObservations, observationsOf, type PlainObservation } from './recordObservations';

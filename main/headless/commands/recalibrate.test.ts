@@ -1,6 +1,7 @@
 import { readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { describe, expect, it } from 'vitest';
+import { emptyContent, writeBundle } from '../../../core/record/bundle';
 import type { CommandIo } from '../command';
 import { recalibrate } from './recalibrate';
 
@@ -53,6 +54,14 @@ describe('recalibrate', () => {
     const { parts, adopted, values } = await run(published, { half: true });
     for (const { adopt, statement } of parts) expect(statement).toMatch(adopt ? /^proposed/ : /declined|few/);
     if (!adopted) expect(values).toEqual({});
+  });
+
+  it('names an exported project in which nothing was fitted, with the way out', async () => {
+    const bundle = JSON.parse(writeBundle(emptyContent())) as unknown;
+    await expect(run(bundle)).rejects.toMatchObject({
+      message: expect.stringMatching(/record\.json: no measurement .* field fit/) as string,
+      remedy: expect.stringContaining('fit the field') as string,
+    });
   });
 
   it('refuses a seed that is no whole number and a file without complexes, naming them', async () => {

@@ -1,8 +1,5 @@
-import type { Observation, Recalibration } from '../../../core/agreement/recalibration';
+import type { PlainObservation, Recalibration } from '../../../core/agreement/recalibration';
 import type { ParameterValues } from '../../../core/library';
-
-/** An observation without its library, which the worker lays over anew. */
-export type PlainObservation = Omit<Observation, 'library'>;
 
 export interface RecalibrationRequest {
   readonly observations: readonly PlainObservation[];

@@ -1,5 +1,5 @@
 import { useCallback, useEffect, useMemo, useRef, useState } from 'react';
-import { basisFor } from '../../../../core/agreement/recalibration';
+import { basisFor, observationsOf } from '../../../../core/agreement/recalibration';
 import type { ParameterSet } from '../../../../core/record/project';
 import { snapshotBefore } from '../../../app/exchange/snapshotBefore';
 import { useAction, useServices, useStore } from '../../../app/services';
@@ -8,7 +8,6 @@ import { ErrorPanel, Progress, useToast } from '../../../parts';
 import { recalibrateInWorker } from '../../../workers/recalibration/recalibrateInWorker';
 import type { RecordPairs } from '../useRecordPairs';
 import { adoptedSet, type Approval, type Proposal } from './adoptedSet';
-import { observationsOf } from './observationsOf';
 import { ParameterSets } from './ParameterSets';
 import { ProposalForm } from './ProposalForm';
 

@@ -2,7 +2,7 @@ import { parameterSetFrom, type Recalibration } from '../../../../core/agreement
 import { defaultLibrary } from '../../../../core/library/parameterLibrary';
 import type { ParameterSet } from '../../../../core/record/project';
 import type { Store } from '../../../store';
-import type { PlainObservation } from '../../../workers/recalibration/protocol';
+import type { PlainObservation } from '../../../../core/agreement/recalibration';
 
 /** What a person says when approving a proposal. */
 export interface Approval {

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { recalibrate } from '../../../../core/agreement/recalibration';
 import { defaultLibrary } from '../../../../core/library/parameterLibrary';
-import type { PlainObservation } from '../../../workers/recalibration/protocol';
+import type { PlainObservation } from '../../../../core/agreement/recalibration';
 import { ownRows, shareInUse, spoken, subjectOf } from './proposalRows';
 
 describe('lines of a proposal', () => {

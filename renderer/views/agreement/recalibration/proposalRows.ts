@@ -2,7 +2,7 @@ import type { ParameterChange, Recalibration } from '../../../../core/agreement/
 import { estimateField } from '../../../../core/estimation/estimateField';
 import { complexFormula } from '../../../../core/library/complexFormula';
 import { complexKey, type ParameterLibrary } from '../../../../core/library/parameterLibrary';
-import type { PlainObservation } from '../../../workers/recalibration/protocol';
+import type { PlainObservation } from '../../../../core/agreement/recalibration';
 
 const factorWords: Readonly<Record<string, string>> = {
   f: 'field factor f of',

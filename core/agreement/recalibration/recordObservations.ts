@@ -1,8 +1,12 @@
-import type { Measurement } from '../../../../core/record/measurement';
-import type { Analysis } from '../../../../core/record/analysis';
-import type { Candidate, FrozenPrediction } from '../../../../core/record/project';
-import type { Uncertain } from '../../../../core/record/uncertain';
-import type { PlainObservation } from '../../../workers/recalibration/protocol';
+import type { Analysis } from '../../record/analysis';
+import type { BundleContent } from '../../record/bundle';
+import type { Measurement } from '../../record/measurement';
+import type { Candidate, FrozenPrediction } from '../../record/project';
+import type { Uncertain } from '../../record/uncertain';
+import type { Observation } from './observations';
+
+/** An observation without its library, which is laid over where it is used. */
+export type PlainObservation = Omit<Observation, 'library'>;
 
 /** No field fit is taken for better than this: 10Dq to 1 %, B to 3 % (common practice of repeated spectra). */
 const least = { tenDq: 0.01, B: 0.03 } as const;
@@ -47,4 +51,17 @@ export function observationsOf(
       },
     ];
   });
+}
+
+/** The same of a whole project as exported; what lies in the bin says nothing. */
+export function bundleObservations(content: BundleContent): PlainObservation[] {
+  const kept = <T extends { readonly deletedAt: string | null }>(rows: readonly T[]): T[] =>
+    rows.filter(({ deletedAt }) => deletedAt === null);
+  const candidates = new Map(kept(content.candidates).map((each) => [each.id, each]));
+  return observationsOf(
+    kept(content.measurements),
+    new Map(kept(content.analyses).map((each) => [each.measurementId, each])),
+    new Map(content.frozenPredictions.map((each) => [each.id, each])),
+    (id) => candidates.get(id),
+  );
 }
