@@ -117,6 +117,7 @@ test('a dropped spectrum is kept, treated, fitted, assigned; its field is fitted
   await page.getByRole('row', { name: /^2/ }).getByRole('button', { name: 'Start from these' }).click();
   await page.getByRole('button', { name: 'Fit', exact: true }).click();
   await expect(page.getByText(/Fitted bands ± standard error; 471 points, status converged/)).toBeVisible();
+  await expect(page.getByText('Correlation of the parameters')).toBeVisible();
   await page.getByRole('button', { name: 'Keep this assignment' }).click();
   await page.getByRole('button', { name: 'Fit the field to 2 bands' }).click();
   await expect(page.getByText(/Fitted beside frozen prediction/)).toBeVisible();
@@ -136,6 +137,13 @@ test('a dropped spectrum is kept, treated, fitted, assigned; its field is fitted
   await page.keyboard.press('Control+z');
   await expect(page.getByText(/Fitted bands ± standard error/)).toBeHidden();
   for (let step = 0; step < 3; step++) await page.keyboard.press('Control+Shift+z');
+  await expect(page.getByText(/Fitted beside frozen prediction/)).toBeVisible();
+
+  // A fit of other numbers must not stand beside these.
+  await page.getByRole('button', { name: 'Take back divided by 50 mM and 1 cm' }).click();
+  await expect(page.getByText(/The band fit was made of other numbers/)).toBeVisible();
+  await expect(page.getByText(/Fitted bands ± standard error/)).toBeHidden();
+  await page.keyboard.press('Control+z');
   await expect(page.getByText(/Fitted beside frozen prediction/)).toBeVisible();
 
   await page.keyboard.press('g');

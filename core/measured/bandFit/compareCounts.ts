@@ -30,7 +30,8 @@ function largestResidual(fit: BandFit): GaussianBand {
 }
 
 function cautionOf(fit: BandFit): string | null {
-  if (fit.status !== 'converged') return `the fit is ${fit.status}`;
+  if (fit.status === 'no convergence') return 'the fit did not converge';
+  if (fit.status !== 'converged') return `the fit ended with: ${fit.status}`;
   const loose = fit.bands.filter(
     (band) => band.se.height !== null && band.se.height > 0.5 * Math.abs(band.height),
   ).length;

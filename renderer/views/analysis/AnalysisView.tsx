@@ -1,15 +1,17 @@
-import { useCallback, useMemo } from 'react';
+import { useCallback, useMemo, useState } from 'react';
 import { complexFormula } from '../../../core/library/complexFormula';
+import { type BandFit, stepsForFitting } from '../../../core/measured';
 import type { Analysis } from '../../../core/record/analysis';
 import type { Curve } from '../../../core/record/curve';
 import { currentContent } from '../../../core/record/revisions';
+import type { TreatmentStep } from '../../../core/record/treatment';
 import { linkTo, useRouter } from '../../app/router/RouterContext';
 import { useAction, useStored, useStore } from '../../app/services';
 import { useVersion } from '../../app/session/observable';
 import { useProject } from '../../app/session/ProjectSession';
 import { useLibrary } from '../../app/session/useLibrary';
 import { ViewHeader } from '../../app/shell/ViewHeader';
-import { EmptyState, ErrorPanel, Formula } from '../../parts';
+import { EmptyState, ErrorPanel, Formula, useToast } from '../../parts';
 import type { AnalysisFields, Store } from '../../store';
 import { AssignPanel } from './assign/AssignPanel';
 import { measuredBands } from './assign/measuredBands';
@@ -28,6 +30,8 @@ export default function AnalysisView() {
   useVersion(rows);
   const store = useStore();
   const act = useAction();
+  const toast = useToast();
+  const [lastFit, setLastFit] = useState<BandFit | null>(null);
   const library = useLibrary();
   const id = address.item ?? '';
   const ask = useCallback((from: Store) => everythingOf(from, project.id, id), [project.id, id]);
@@ -69,6 +73,20 @@ export default function AnalysisView() {
       </>
     );
   }
+  /** A fit belongs to the numbers it was made of: other steps remove it, in the same step that can be undone. */
+  const saveSteps = async (steps: readonly TreatmentStep[], label: string): Promise<boolean> => {
+    const same =
+      JSON.stringify(stepsForFitting(steps)) === JSON.stringify(stepsForFitting(analysis?.treatment ?? []));
+    const stale = !same && analysis?.bandFit != null;
+    const gone = stale ? { bandFit: null, assignment: [], fieldFit: null } : {};
+    const done = await save({ treatment: [...steps], ...gone }, label);
+    if (done && stale)
+      toast({
+        message: 'The band fit was made of other numbers and is gone with this step',
+        undo: () => void act(() => store.journal.undo(project.id)),
+      });
+    return done;
+  };
   const save = (fields: AnalysisFields, label: string): Promise<boolean> =>
     act(() => store.analyses.save(measurement, analysis, fields, label));
   const bands = measuredBands(content, analysis);
@@ -107,13 +125,15 @@ export default function AnalysisView() {
             conditions={content.conditions}
             title={`${complexFormula(candidate.composition, library)} ${content.kind === 'spectrum' ? (content.name ?? '') : ''}`.trim()}
             blanks={blanks}
-            onSave={(steps, label) => save({ treatment: [...steps] }, label)}
+            onSave={saveSteps}
           />
           <FitPanel
             key={analysis?.bandFit ? 'fitted' : 'open'}
             points={result.points}
             quantity={result.quantity}
             kept={analysis?.bandFit ?? null}
+            last={lastFit}
+            onFit={setLastFit}
             onSave={(bandFit, label) => save({ bandFit, assignment: [], fieldFit: null }, label)}
           />
         </>

@@ -38,7 +38,9 @@ const rows = [
 export function FieldFitPanel(props: FieldFitPanelProps) {
   const { candidate, frozen, measured, assignment, kept, onSave } = props;
   const { running, error, fit, stop } = useFitting<'field'>();
-  const [last, setLast] = useState<FieldFit | null>(null);
+  const [latest, setLatest] = useState<FieldFit | null>(null);
+  // After undo, or with another assignment, the latest fit is not the one that is kept.
+  const last = latest !== null && kept !== null && latest.tenDq.value === kept.tenDq.value ? latest : null;
   const prediction = (frozen?.prediction ?? {}) as FrozenField;
   const { dElectrons } = prediction;
   const usable = assignment.length === measured.length ? dBands(assignment) : [];
@@ -56,7 +58,7 @@ export function FieldFitPanel(props: FieldFitPanelProps) {
     };
     void fit({ kind: 'field', request }).then(async (result) => {
       if (result === null) return;
-      setLast(result);
+      setLatest(result);
       await onSave(recordFieldFit(request, result), 'fit the field of one complex');
     });
   };

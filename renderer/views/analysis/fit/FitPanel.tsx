@@ -20,6 +20,9 @@ interface FitPanelProps {
   readonly points: FitPoints | null;
   readonly quantity: YUnit;
   readonly kept: BandFitRecord | null;
+  /** The latest fit whole, with what is not kept; it may be of other numbers. */
+  readonly last: BandFit | null;
+  readonly onFit: (fit: BandFit) => void;
   readonly onSave: (fit: BandFitRecord | null, label: string) => Promise<boolean>;
 }
 
@@ -34,7 +37,7 @@ const draftOf = ({ centre_cm1, fwhm_cm1, height }: GaussianBand): StartDraft => 
 });
 
 /** A sum of Gaussians in wavenumber fitted to the spectrum; how many is for the chemist to say. */
-export function FitPanel({ points, quantity, kept, onSave }: FitPanelProps) {
+export function FitPanel({ points, quantity, kept, last, onFit, onSave }: FitPanelProps) {
   const [start, setStart] = useState<readonly StartDraft[]>(() => (kept?.start ?? []).map(draftOf));
   const [baseline, setBaseline] = useState<'none' | 'linear'>(kept?.baseline ?? 'none');
   const [range, setRange] = useState(() => ({
@@ -42,7 +45,6 @@ export function FitPanel({ points, quantity, kept, onSave }: FitPanelProps) {
     high: kept?.range_cm1 ? text(kept.range_cm1[1], 6) : '',
   }));
   const [problem, setProblem] = useState<string | null>(null);
-  const [last, setLast] = useState<BandFit | null>(null);
   const bands = useFitting<'bands'>();
   const counts = useFitting<'counts'>();
   const [compared, setCompared] = useState<Awaited<ReturnType<typeof counts.fit>>>(null);
@@ -75,8 +77,18 @@ export function FitPanel({ points, quantity, kept, onSave }: FitPanelProps) {
     const request: BandFitRequest = { ...data, start: read as GaussianBand[] };
     void bands.fit({ kind: 'bands', request }).then(async (result) => {
       if (result === null) return;
-      setLast(result);
+      onFit(result);
       await onSave(recordBandFit(request, result, limits), `fit ${result.bands.length} bands`);
+    });
+  };
+  /** The kept fit once more, for what is not kept with it: correlation and remarks. */
+  const again = (): void => {
+    if (kept === null) return;
+    const request: BandFitRequest = { ...data, baseline: kept.baseline, start: kept.start };
+    void bands.fit({ kind: 'bands', request }).then((result) => {
+      if (result === null) return;
+      if (isSame(kept, result)) onFit(result);
+      else setProblem('The same start gives another fit now: fit again to keep it.');
     });
   };
   return (
@@ -87,6 +99,7 @@ export function FitPanel({ points, quantity, kept, onSave }: FitPanelProps) {
         fit={curves?.fit ?? null}
         bands={curves?.bands ?? []}
         baseline={curves?.baseline ?? null}
+        noise={kept === null ? null : noiseOf(kept)}
         quantity={quantity === 'molar-absorptivity' ? 'Molar absorptivity / L mol⁻¹ cm⁻¹' : 'Absorbance'}
         title="Spectrum and fitted bands"
         note="Bands are Gaussians in wavenumber. A maximum is not a centre: overlap moves it. Click on the curve, or press Enter on the point being read, to start a band there."
@@ -162,9 +175,28 @@ export function FitPanel({ points, quantity, kept, onSave }: FitPanelProps) {
           }}
         />
       )}
-      {kept !== null && <FitResult kept={kept} last={last} />}
+      {kept !== null && (
+        <FitResult
+          kept={kept}
+          last={last !== null && isSame(kept, last) ? last : null}
+          onAgain={again}
+          running={bands.running}
+        />
+      )}
     </section>
   );
+}
+
+const isSame = (kept: BandFitRecord, fit: BandFit): boolean =>
+  kept.bands.length === fit.bands.length &&
+  kept.bands.every(
+    ({ centre_cm1 }, index) => Math.abs(centre_cm1 - fit.bands[index]!.centre_cm1) < 1e-6 * centre_cm1,
+  );
+
+/** Standard deviation of one point about the fit; null where as many points as parameters leave none. */
+function noiseOf({ rss, points, bands, baseline }: BandFitRecord): number | null {
+  const free = points - 3 * bands.length - (baseline === 'linear' ? 2 : 0);
+  return free > 0 ? Math.sqrt(rss / free) : null;
 }
 
 /** A centre while it is being typed: drawn as soon as it makes sense. */

@@ -6,13 +6,16 @@ interface FitResultProps {
   readonly kept: BandFitRecord;
   /** The fit as it just came out, with what is not kept; null for one of an earlier day. */
   readonly last: BandFit | null;
+  /** Makes the kept fit once more, for what is not kept with it. */
+  readonly onAgain: () => void;
+  readonly running: boolean;
 }
 
 const withError = (value: number, se: number | null, figures: number): string =>
   `${formatFigures(value, figures)} ${se === null ? '(no error: held or on a bound)' : `± ${formatFigures(se, 2)}`}`;
 
 /** Centres, widths and heights with their standard errors, and what the fit says against itself. */
-export function FitResult({ kept, last }: FitResultProps) {
+export function FitResult({ kept, last, onAgain, running }: FitResultProps) {
   const correlation = last?.correlation ?? null;
   return (
     <div className="stack">
@@ -47,6 +50,13 @@ export function FitResult({ kept, last }: FitResultProps) {
             <li key={remark}>{remark}</li>
           ))}
         </ul>
+      )}
+      {last === null && (
+        <div>
+          <button type="button" disabled={running} onClick={onAgain}>
+            Work out correlation and remarks
+          </button>
+        </div>
       )}
       {correlation !== null && (
         <details>
