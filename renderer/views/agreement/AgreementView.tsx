@@ -80,6 +80,7 @@ export default function AgreementView() {
           A measured band, or a spectrum whose bands are fitted and assigned, makes a pair with the prediction
           that was frozen before it.
         </EmptyState>
+        {value.sets.length > 0 && <RecalibrationPanel record={value} />}
       </>
     );
   return (
