@@ -93,6 +93,40 @@ async function throughTheRest(page: Page, mode: string): Promise<void> {
   await examine(page, `nowhere-${mode}`);
 }
 
+async function throughHelpAndReports(page: Page, mode: string): Promise<void> {
+  await page.getByRole('link', { name: 'Methods', exact: true }).click();
+  await expect(page.getByRole('heading', { level: 1, name: 'Methods and sources' })).toBeVisible();
+  await examine(page, `methods-${mode}`);
+  await page.keyboard.press('Control+k');
+  await page.keyboard.type('About this program');
+  await page.keyboard.press('Enter');
+  await expect(page.getByRole('heading', { level: 1, name: 'About this program' })).toBeVisible();
+  await examine(page, `about-${mode}`);
+
+  await page.getByRole('link', { name: 'Projects', exact: true }).click();
+  await page.getByRole('button', { name: 'Take the tour' }).click();
+  const tour = page.getByRole('region', { name: 'Tour' });
+  for (let stop = 1; stop <= 6; stop++) {
+    await expect(tour.getByText(`${stop} of 6`)).toBeVisible();
+    if (stop === 1 || stop === 6) await examine(page, `tour-${stop}-${mode}`);
+    // By keyboard: the panel has the focus, its main button is the last.
+    if (stop < 6) await tour.getByRole('button', { name: 'Next' }).press('Enter');
+  }
+  await page.keyboard.press('Escape');
+  await expect(tour).toBeHidden();
+  await expect(page.getByRole('article', { name: 'Candidate card' })).toBeVisible();
+  for (const kind of ['Comparison sheet', 'Order list']) {
+    await page.getByRole('radio', { name: kind }).check();
+    await expect(page.getByRole('article', { name: kind })).toBeVisible();
+    await examine(page, `report-${kind.toLowerCase().replaceAll(' ', '-')}-${mode}`);
+  }
+  await page.getByRole('radio', { name: 'Agreement report' }).check();
+  await expect(page.getByRole('heading', { name: 'No pair that counts yet' })).toBeVisible();
+  await examine(page, `report-nothing-${mode}`);
+  await page.getByRole('link', { name: 'Projects', exact: true }).click();
+  await expect(page.getByRole('button', { name: 'Take the tour' })).toBeHidden();
+}
+
 async function throughAnEmptyProject(page: Page, mode: string): Promise<void> {
   await page.getByRole('link', { name: 'Projects', exact: true }).click();
   await createProject(page, 'Nothing in it yet');
@@ -111,6 +145,7 @@ for (const mode of ['light', 'dark'] as const) {
     }) => {
       await throughTheDemo(page, mode);
       await throughTheRest(page, mode);
+      await throughHelpAndReports(page, mode);
       await throughAnEmptyProject(page, mode);
     });
   });

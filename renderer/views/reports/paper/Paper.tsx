@@ -105,7 +105,7 @@ export function Paper(props: PaperProps) {
 function PaperCautions({ cautions }: { readonly cautions: readonly Caution[] }) {
   return (
     <section className="paper-cautions" aria-label="Safety cautions">
-      <h3>Before anything is made</h3>
+      <h2>Before anything is made</h2>
       {cautions.length === 0 ? (
         <p>No caution on file for these substances. That means not assessed, not safe.</p>
       ) : (
