@@ -78,7 +78,7 @@ export function ProjectRecord() {
           Agreement of all
         </a>
       </div>
-      <Field label="Show only" hint="words of formula, kind, solvent, instrument, batch, initials or date">
+      <Field label="Show only" hint="words of formula, kind, solvent, instrument, initials or date">
         {(attributes) => (
           <input
             {...attributes}
@@ -137,13 +137,13 @@ function lineOf(measurement: Measurement, formula: string): Line {
   const content = currentContent(measurement);
   const { date, solvent, instrument, operator } = content.conditions;
   const when = dayOf(date ?? measurement.createdAt);
-  const text = contentText(content);
+  const text = [contentText(content), solvent, instrument, operator].filter(Boolean).join(', ');
   return {
     id: measurement.id,
     candidateId: measurement.candidateId,
     formula,
     text,
     when,
-    words: [formula, text, content.kind, solvent, instrument, operator, date, when].join(' ').toLowerCase(),
+    words: [formula, text, content.kind, date, when].join(' ').toLowerCase(),
   };
 }

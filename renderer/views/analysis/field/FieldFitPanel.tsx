@@ -3,7 +3,16 @@ import type { FieldFit } from '../../../../core/measured/fieldFit/fitField';
 import { recordFieldFit } from '../../../../core/measured/records';
 import type { AssignedBand, FieldFitRecord } from '../../../../core/record/analysis';
 import type { Candidate, FrozenPrediction } from '../../../../core/record/project';
-import { ErrorPanel, formatFigures, NumberWithRange, Progress } from '../../../parts';
+import { fromWavenumber } from '../../../../core/units';
+import {
+  ErrorPanel,
+  formatFigures,
+  intervalUnit,
+  NumberWithRange,
+  Progress,
+  unitText,
+  useUnit,
+} from '../../../parts';
 import type { NamedBand } from '../assign/measuredBands';
 import { useFitting } from '../useFitting';
 
@@ -116,12 +125,7 @@ export function FieldFitPanel(props: FieldFitPanelProps) {
                 <tr key={key}>
                   <th scope="row">{name}</th>
                   <td>
-                    <NumberWithRange
-                      kind="interval"
-                      value={kept[key].value}
-                      sigma={kept[key].se}
-                      figures={4}
-                    />
+                    <FittedValue value={kept[key].value} se={kept[key].se} />
                   </td>
                   <td className="soft">{kept[key].status}</td>
                   <td>
@@ -140,6 +144,9 @@ export function FieldFitPanel(props: FieldFitPanelProps) {
         </>
       )}
       {last !== null && <Sentences title="Remarks" sentences={last.remarks} />}
+      {last?.correlation && last.correlation.names.length > 1 && (
+        <p className="soft">Correlation: {correlationText(last.correlation)}.</p>
+      )}
       {last?.textbook && (
         <p className="soft">
           By the closed formula of textbooks ({last.textbook.rule}): 10Dq{' '}
@@ -163,6 +170,26 @@ export function FieldFitPanel(props: FieldFitPanelProps) {
     </section>
   );
 }
+
+/** A fitted splitting with its standard error; never written as a wavelength. */
+function FittedValue({ value, se }: { readonly value: number | null; readonly se: number | null }) {
+  const unit = intervalUnit(useUnit().unit);
+  if (value === null) return <span className="soft">not determined</span>;
+  return (
+    <span className="figures">
+      <strong>{formatFigures(fromWavenumber(value, unit), 4)}</strong>
+      {se !== null && ` ± ${formatFigures(fromWavenumber(se, unit), 2)}`} {unitText[unit]}
+    </span>
+  );
+}
+
+const correlationText = ({ names, matrix }: NonNullable<FieldFit['correlation']>): string =>
+  names
+    .map((name) => (name === 'tenDq' ? '10Dq' : name))
+    .flatMap((one, row, all) =>
+      all.slice(row + 1).map((other, i) => `${one} with ${other} ${matrix[row]![row + 1 + i]!.toFixed(2)}`),
+    )
+    .join(', ');
 
 /** As many bands as parameters are always met exactly: that is no praise. */
 const deviationText = (rms_cm1: number): string =>
