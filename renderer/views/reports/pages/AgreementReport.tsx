@@ -66,7 +66,7 @@ export function AgreementReport({ sheet }: { readonly sheet: SheetOfPaper }) {
 }
 
 const side = 300;
-const gap = { left: 62, bottom: 40, top: 8, right: 8 };
+const gap = { left: 62, bottom: 40, top: 8, right: 24 };
 
 /** Measured against predicted with the 68 % range of each prediction as a bar; on the line they agree. */
 function PaperParity({ pairs }: { readonly pairs: readonly Counted[] }) {
