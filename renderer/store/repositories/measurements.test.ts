@@ -1,6 +1,7 @@
 // @vitest-environment node
 import { describe, expect, it } from 'vitest';
 import type { Prediction } from '../../../core/prediction/types';
+import { bytesOfFile, storeFile } from '../../../core/record/file';
 import { type MeasurementContent, noConditions } from '../../../core/record/measurement';
 import { currentContent } from '../../../core/record/revisions';
 import { hexaammine, testStore } from '../testing/testStore';
@@ -110,6 +111,22 @@ describe('a correction', () => {
     expect(after.revisions[0]).toEqual(before);
     expect(after.revisions[1]).toMatchObject({ number: 1, by: 'AB', why: 'seen by lamp light' });
     expect(currentContent(after)).toMatchObject({ words: 'orange yellow' });
+  });
+
+  it('brings attachments along and names a batch that nobody had named, never another one', async () => {
+    const { store, candidate, add } = await bench();
+    const [measurement] = (await add('yellow')).measurements;
+    const file = storeFile(new Uint8Array([0, 255, 13]), 'image/png');
+    const content = { ...colour('yellow'), attachments: [{ name: 'photo.png', fileId: file.id }] };
+    const named = (batch: string) => ({ candidate, named: { batch, phase: null } });
+    const correction = { by: 'AB', why: 'photo', content, files: [file] };
+    const after = await store.measurements.correct(measurement!, { ...correction, batch: named('MK-1') });
+    const [sample] = await store.samples.of(candidate.id);
+    expect([after.sampleId, sample!.batch]).toEqual([sample!.id, 'MK-1']);
+    expect(bytesOfFile((await store.measurements.file(file.id))!)).toEqual(new Uint8Array([0, 255, 13]));
+    const later = await store.measurements.correct(after, { ...correction, batch: named('MK-2') });
+    expect(later.sampleId).toBe(sample!.id);
+    expect(await store.samples.of(candidate.id)).toHaveLength(1);
   });
 
   it('is refused without a reason', async () => {

@@ -141,12 +141,14 @@ export class MeasurementRepository {
     const label = `correct ${nameOf([content])}`;
     return await this.#journal.record(measurement.projectId, label, async (writer) => {
       await writer.addMissing('files', files);
-      const sample = batch && (await this.#samples.named(writer, batch.candidate, batch.named));
+      const isOpen = measurement.sampleId === null;
+      const sample =
+        isOpen && batch !== null && (await this.#samples.named(writer, batch.candidate, batch.named));
       return await writer.update(
         'measurements',
         measurement.id,
         (row) => ({
-          sampleId: row.sampleId ?? sample?.id ?? null,
+          sampleId: row.sampleId ?? (sample ? sample.id : null),
           revisions: correctMeasurement(row, { at: writer.now, by, why: why.trim(), content: fresh })
             .revisions,
         }),

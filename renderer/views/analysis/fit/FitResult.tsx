@@ -44,6 +44,10 @@ export function FitResult({ kept, last, onAgain, running }: FitResultProps) {
           ))}
         </tbody>
       </table>
+      <p className="soft small">
+        The errors are those of the fit alone. The wavelength scale of the instrument and bands that are not
+        Gaussian come on top: half a nanometre is 15 cm⁻¹ at 575 nm.
+      </p>
       {last !== null && last.remarks.length > 0 && (
         <ul className="analysis-remarks">
           {last.remarks.map((remark) => (
