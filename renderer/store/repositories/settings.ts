@@ -14,6 +14,7 @@ export const settingSchemas = {
   sort: z
     .strictObject({ by: z.string().max(40), descending: z.boolean() })
     .catch({ by: 'added', descending: false }),
+  groupBy: z.string().max(40).catch('none'),
   lastProject: z.string().max(100).nullable().catch(null),
   demoLoaded: z.boolean().catch(false),
   singleKeys: z.boolean().catch(true),

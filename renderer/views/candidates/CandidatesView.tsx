@@ -14,6 +14,7 @@ import { FilterBar } from './FilterBar';
 import { parseFilter } from './filter/parseFilter';
 import { CandidateGrid } from './grid/CandidateGrid';
 import { shownColumns } from './grid/columns';
+import { type Grouping, groupings } from './grouping';
 import { PasteDialog } from './paste/PasteDialog';
 import { usePaste } from './paste/usePaste';
 import { SelectionBar } from './selection/SelectionBar';
@@ -36,7 +37,8 @@ export default function CandidatesView() {
   const [filterText, setFilterText] = useFilterText(project.id);
   const terms = useMemo(() => parseFilter(filterText, [...library.ligands.values()]), [filterText, library]);
   const [sort, setSort] = useSort(project.targetLab !== null);
-  const { all, shown } = useTableRows(session, terms, sort);
+  const [grouping, setGrouping] = useGrouping();
+  const { all, shown, groups } = useTableRows(session, terms, sort, grouping);
   useEffect(() => rememberOrder(project.id, shown), [project.id, shown]);
   const selection = useSelection(shown);
   const actions = useRowActions(project.id);
@@ -46,6 +48,8 @@ export default function CandidatesView() {
   const copy = useCopy(subjects);
   const [pasted, setPasted] = usePaste();
   const startPasting = useCallback(() => setPasted(''), [setPasted]);
+  const [edited, setEdited] = useState<string | null>(null);
+  const startEditing = useCallback(() => setEdited(subjects[0]?.candidate.id ?? null), [subjects]);
   const startTagging = useCallback(() => setTagged(subjects), [subjects]);
   const { settings } = useSettings();
   const columns = useMemo(
@@ -57,6 +61,7 @@ export default function CandidatesView() {
     projectId: project.id,
     subjects,
     actions,
+    onEdit: startEditing,
     onTag: startTagging,
     onCopy: copy,
     onPaste: startPasting,
@@ -113,6 +118,8 @@ export default function CandidatesView() {
             terms={terms}
             sort={sort}
             onSort={setSort}
+            grouping={grouping}
+            onGrouping={setGrouping}
             hasTarget={project.targetLab !== null}
           />
           <EstimateProgress estimates={session.estimates} />
@@ -135,7 +142,11 @@ export default function CandidatesView() {
               sort={sort}
               onSort={setSort}
               selection={selection}
+              groups={groups}
               onStar={star}
+              edited={edited}
+              onEdited={setEdited}
+              onEdit={actions.edit}
               onCurrent={setCurrent}
             />
           )}
@@ -220,6 +231,13 @@ function useSort(hasTarget: boolean): [Sort, (sort: Sort) => void] {
   const sort = useMemo(() => ({ by: usable, descending }), [usable, descending]);
   const setSort = useCallback((next: Sort) => set('sort', next), [set]);
   return [sort, setSort];
+}
+
+/** Grouping is remembered like the ranking. */
+function useGrouping(): [Grouping, (grouping: Grouping) => void] {
+  const { settings, set } = useSettings();
+  const grouping = groupings.find((each) => each === settings.groupBy) ?? 'none';
+  return [grouping, useCallback((next: Grouping) => set('groupBy', next), [set])];
 }
 
 function useSubjects(

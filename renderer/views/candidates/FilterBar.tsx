@@ -1,5 +1,6 @@
 import { useMemo } from 'react';
 import { type FilterTerm, termWords } from './filter/condition';
+import { type Grouping, groupingNames, groupings } from './grouping';
 import { type Ranking, rankingNames, rankings, type Sort } from './sorting';
 import './FilterBar.css';
 
@@ -9,13 +10,16 @@ interface FilterBarProps {
   readonly terms: readonly FilterTerm[];
   readonly sort: Sort;
   readonly onSort: (sort: Sort) => void;
+  readonly grouping: Grouping;
+  readonly onGrouping: (grouping: Grouping) => void;
   readonly hasTarget: boolean;
 }
 
 export const filterFieldId = 'candidate-filter';
 
 /** Which rows are shown and in what order, in words. */
-export function FilterBar({ text, onText, terms, sort, onSort, hasTarget }: FilterBarProps) {
+export function FilterBar(props: FilterBarProps) {
+  const { text, onText, terms, sort, onSort, grouping, onGrouping, hasTarget } = props;
   const offered = useMemo(
     () => rankings.filter((ranking) => ranking !== 'distance' || hasTarget),
     [hasTarget],
@@ -57,6 +61,18 @@ export function FilterBar({ text, onText, terms, sort, onSort, hasTarget }: Filt
         >
           {sort.descending ? '▼' : '▲'}
         </button>
+        <label htmlFor="candidate-group">Grouped by</label>
+        <select
+          id="candidate-group"
+          value={grouping}
+          onChange={(event) => onGrouping(event.currentTarget.value as Grouping)}
+        >
+          {groupings.map((each) => (
+            <option key={each} value={each}>
+              {groupingNames[each]}
+            </option>
+          ))}
+        </select>
       </div>
       <p id="filter-understood" className="filter-understood" role="status">
         {terms.length > 0 && `Shown: ${terms.map(termWords).join('; ')}`}

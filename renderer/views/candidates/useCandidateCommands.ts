@@ -10,6 +10,7 @@ interface CandidateCommands {
   /** The selected rows, or the row that has the focus. */
   readonly subjects: readonly TableRow[];
   readonly actions: RowActions;
+  readonly onEdit: () => void;
   readonly onTag: () => void;
   readonly onCopy: () => void;
   readonly onPaste: () => void;
@@ -19,7 +20,7 @@ interface CandidateCommands {
 const group = 'Candidates';
 
 export function useCandidateCommands(given: CandidateCommands): void {
-  const { projectId, subjects, actions, onTag, onCopy, onPaste, onSelectAll } = given;
+  const { projectId, subjects, actions, onEdit, onTag, onCopy, onPaste, onSelectAll } = given;
   const { go } = useRouter();
   const commands = useMemo((): readonly Command[] => {
     const disabled = subjects.length === 0;
@@ -50,6 +51,7 @@ export function useCandidateCommands(given: CandidateCommands): void {
       { id: 'candidates.paste', label: 'Paste formulas or a table', group, keys: ['v'], run: onPaste },
       { id: 'candidates.all', label: 'Select all that are shown', group, keys: ['Mod+A'], run: onSelectAll },
       command('star', 'Star or unstar', ['s'], () => actions.star(subjects)),
+      command('edit', 'Change name, tags and notes in the row', ['F2', 'e'], onEdit),
       command('tag', 'Tag', ['t'], onTag),
       command('copy', 'Copy as a table for a spreadsheet', ['Mod+C'], onCopy),
       command('duplicate', 'Duplicate', ['d'], () => actions.duplicate(subjects)),
@@ -58,6 +60,6 @@ export function useCandidateCommands(given: CandidateCommands): void {
       ),
       command('delete', 'Delete', ['Delete'], () => actions.remove(subjects)),
     ];
-  }, [go, projectId, subjects, actions, onTag, onCopy, onPaste, onSelectAll]);
+  }, [go, projectId, subjects, actions, onEdit, onTag, onCopy, onPaste, onSelectAll]);
   useCommands(commands);
 }

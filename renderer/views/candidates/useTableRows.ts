@@ -2,6 +2,7 @@ import { useDeferredValue, useEffect, useMemo, useState } from 'react';
 import { type Observable, useVersion } from '../../app/session/observable';
 import type { ProjectSession } from '../../app/session/ProjectSession';
 import type { FilterTerm } from './filter/condition';
+import { type Grouping, groupRows, type RowGroup } from './grouping';
 import { rowTest } from './filter/matches';
 import { RowAssembler } from './rowAssembler';
 import { type Sort, sortRows } from './sorting';
@@ -37,17 +38,24 @@ function useAllRows({ rows, estimates, project }: ProjectSession): readonly Tabl
 
 export interface TableRows {
   readonly all: readonly TableRow[];
-  /** After filter and ranking. */
+  /** After filter, ranking and grouping. */
   readonly shown: readonly TableRow[];
+  readonly groups: readonly RowGroup[];
 }
 
-export function useTableRows(session: ProjectSession, terms: readonly FilterTerm[], sort: Sort): TableRows {
+export function useTableRows(
+  session: ProjectSession,
+  terms: readonly FilterTerm[],
+  sort: Sort,
+  grouping: Grouping,
+): TableRows {
   const all = useAllRows(session);
   const wanted = useDeferredValue(terms);
   const { by, descending } = sort;
-  const shown = useMemo(
+  const ordered = useMemo(
     () => sortRows(all.filter(rowTest(wanted)), { by, descending }),
     [all, wanted, by, descending],
   );
-  return { all, shown };
+  const { rows: shown, groups } = useMemo(() => groupRows(ordered, grouping), [ordered, grouping]);
+  return { all, shown, groups };
 }

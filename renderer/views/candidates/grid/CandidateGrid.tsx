@@ -2,41 +2,55 @@ import { useVirtualizer } from '@tanstack/react-virtual';
 import { useCallback, useEffect, useMemo, useRef, useState, type CSSProperties } from 'react';
 import { useRouter } from '../../../app/router/RouterContext';
 import type { Selection } from '../selection/useSelection';
+import { type RowGroup, TableLines } from '../grouping';
 import type { Sort } from '../sorting';
 import type { TableRow } from '../tableRow';
 import { type Column, tracksOf } from './columns';
 import { GridHead } from './GridHead';
 import { GridRow } from './GridRow';
+import { RowEditor, type RowEdit } from './RowEditor';
 import { useGridKeys } from './useGridKeys';
 import './CandidateGrid.css';
 
 const rowHeight = 52;
+const groupHeight = 32;
 
 interface CandidateGridProps {
   readonly shown: readonly TableRow[];
+  /** Headings between the rows; empty where nothing is grouped. */
+  readonly groups: readonly RowGroup[];
   readonly columns: readonly Column[];
   readonly sort: Sort;
   readonly onSort: (sort: Sort) => void;
   readonly selection: Selection;
   readonly onStar: (row: TableRow) => void;
+  /** Candidate whose row is a form. */
+  readonly edited: string | null;
+  readonly onEdited: (id: string | null) => void;
+  readonly onEdit: (row: TableRow, edit: RowEdit) => void;
   /** Told which row keys and commands act on. */
   readonly onCurrent: (id: string) => void;
 }
 
 /** The table of candidates: only the rows in view exist, so that it scrolls alike with ten rows and with fifty thousand. */
 export function CandidateGrid(props: CandidateGridProps) {
-  const { shown, columns, sort, onSort, selection, onStar, onCurrent } = props;
+  const { shown, groups, columns, sort, onSort, selection, onStar, onCurrent } = props;
+  const { edited, onEdited, onEdit } = props;
+  const lines = useMemo(() => new TableLines(shown.length, groups), [shown.length, groups]);
   const { go } = useRouter();
   const scroller = useRef<HTMLDivElement>(null);
   const [current, setCurrent] = useState<string | null>(null);
   // Its functions are new with each draw by design; nothing here is memoised by a compiler.
   // eslint-disable-next-line react-hooks/incompatible-library
   const virtual = useVirtualizer({
-    count: shown.length,
+    count: lines.count,
     getScrollElement: () => scroller.current,
-    estimateSize: () => rowHeight,
+    estimateSize: (line) => ('group' in lines.at(line) ? groupHeight : rowHeight),
     overscan: 5,
-    getItemKey: (place) => shown[place]!.candidate.id,
+    getItemKey: (line) => {
+      const at = lines.at(line);
+      return 'group' in at ? `group ${at.group.label}` : shown[at.place]!.candidate.id;
+    },
   });
 
   const point = useCallback(
@@ -51,10 +65,10 @@ export function CandidateGrid(props: CandidateGridProps) {
     (place: number) => {
       const id = shown[place]!.candidate.id;
       point(id);
-      virtual.scrollToIndex(place);
+      virtual.scrollToIndex(place === 0 ? 0 : lines.ofRow(place));
       focusRow(id);
     },
-    [shown, point, virtual, focusRow],
+    [shown, lines, point, virtual, focusRow],
   );
   const open = useCallback(
     ({ candidate }: TableRow) => go({ view: 'sheet', project: candidate.projectId, item: candidate.id }),
@@ -66,6 +80,12 @@ export function CandidateGrid(props: CandidateGridProps) {
   );
   const onKeyDown = useGridKeys({ shown, current, perPage: 8, selection, onMove: move, onOpen: open });
 
+  const closeEditor = ({ candidate }: TableRow): void => {
+    onEdited(null);
+    point(candidate.id);
+    focusRow(candidate.id);
+  };
+
   const { tracks, least } = tracksOf(columns);
   const currentShown = useMemo(
     () => shown.some(({ candidate }) => candidate.id === current),
@@ -76,7 +96,7 @@ export function CandidateGrid(props: CandidateGridProps) {
       className="grid"
       role="grid"
       aria-label="Candidates"
-      aria-rowcount={shown.length + 1}
+      aria-rowcount={lines.count + 1}
       aria-multiselectable="true"
       ref={scroller}
       style={{ '--tracks': tracks, '--least': least } as CSSProperties}
@@ -95,7 +115,31 @@ export function CandidateGrid(props: CandidateGridProps) {
       </div>
       <div role="rowgroup" className="grid-body" style={{ blockSize: virtual.getTotalSize() }}>
         {virtual.getVirtualItems().map(({ index, start, key }) => {
-          const row = shown[index]!;
+          const line = lines.at(index);
+          if ('group' in line) {
+            return <GroupHeading key={key} group={line.group} place={index + 2} start={start} />;
+          }
+          const row = shown[line.place]!;
+          if (row.candidate.id === edited) {
+            return (
+              <div
+                key={key}
+                role="row"
+                className="grid-row grid-row-edited"
+                aria-rowindex={index + 2}
+                style={{ transform: `translateY(${start}px)`, minBlockSize: rowHeight }}
+              >
+                <div role="gridcell">
+                  <RowEditor
+                    row={row}
+                    formula={row.summary?.ok ? row.summary.formula : row.candidate.composition.metal}
+                    onSave={onEdit}
+                    onClose={() => closeEditor(row)}
+                  />
+                </div>
+              </div>
+            );
+          }
           return (
             <GridRow
               key={key}
@@ -103,7 +147,7 @@ export function CandidateGrid(props: CandidateGridProps) {
               columns={columns}
               place={index + 2}
               selected={selection.ids.has(row.candidate.id)}
-              current={currentShown ? row.candidate.id === current : index === 0}
+              current={currentShown ? row.candidate.id === current : line.place === 0}
               start={start}
               height={rowHeight}
               onToggle={toggle}
@@ -113,6 +157,27 @@ export function CandidateGrid(props: CandidateGridProps) {
           );
         })}
       </div>
+    </div>
+  );
+}
+
+interface GroupHeadingProps {
+  readonly group: RowGroup;
+  readonly place: number;
+  readonly start: number;
+}
+
+function GroupHeading({ group, place, start }: GroupHeadingProps) {
+  return (
+    <div
+      role="row"
+      className="grid-group"
+      aria-rowindex={place}
+      style={{ transform: `translateY(${start}px)`, blockSize: groupHeight }}
+    >
+      <span role="gridcell">
+        {group.label} <span className="soft">{group.count.toLocaleString('en-GB')}</span>
+      </span>
     </div>
   );
 }

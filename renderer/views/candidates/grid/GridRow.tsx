@@ -33,6 +33,8 @@ export const GridRow = memo(function GridRow(props: GridRowProps) {
       tabIndex={current ? 0 : -1}
       style={{ transform: `translateY(${start}px)`, blockSize: height }}
       onPointerDown={() => onPoint(candidate.id)}
+      // Keys and commands act on the row that was reached by Tab as on one that was clicked.
+      onFocus={() => onPoint(candidate.id)}
     >
       <span role="gridcell" className="grid-mark">
         <input

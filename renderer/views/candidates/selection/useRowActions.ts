@@ -2,10 +2,12 @@ import { useMemo } from 'react';
 import { useToast } from '../../../parts';
 import { useAction, useStore } from '../../../app/services';
 import { counted } from '../../../store';
+import type { RowEdit } from '../grid/RowEditor';
 import type { TableRow } from '../tableRow';
 
 export interface RowActions {
   readonly star: (rows: readonly TableRow[]) => void;
+  readonly edit: (row: TableRow, edit: RowEdit) => void;
   readonly archive: (rows: readonly TableRow[], archived: boolean) => void;
   readonly tag: (rows: readonly TableRow[], tag: string) => void;
   readonly untag: (rows: readonly TableRow[], tag: string) => void;
@@ -29,6 +31,12 @@ export function useRowActions(projectId: string): RowActions {
         const starred = !rows.every(({ candidate }) => candidate.starred);
         const label = `${starred ? 'star' : 'unstar'} ${counted(rows.length, 'candidate')}`;
         void act(() => candidates.updateMany(projectId, idsOf(rows), label, () => ({ starred })));
+      },
+      edit: (row, { name, tags, notes }) => {
+        const label = 'change name, tags or notes of 1 candidate';
+        void act(() =>
+          candidates.updateMany(projectId, idsOf([row]), label, () => ({ name, tags: [...tags], notes })),
+        );
       },
       archive: (rows, archived) =>
         void act(async () => {
