@@ -184,18 +184,19 @@ function GroupHeading({ group, place, start }: GroupHeadingProps) {
 
 /** A row outside the window does not exist yet when the key is pressed: the focus waits for it. */
 function useFocusRow(scroller: { readonly current: HTMLElement | null }): (id: string) => void {
-  const [wanted, setWanted] = useState<string | null>(null);
+  const [wanted, setWanted] = useState<{ readonly id: string } | null>(null);
   useEffect(() => {
     if (wanted === null) return;
     let tries = 0;
     let frame = 0;
     const look = (): void => {
-      const row = scroller.current?.querySelector<HTMLElement>(`[data-row="${CSS.escape(wanted)}"]`);
+      const row = scroller.current?.querySelector<HTMLElement>(`[data-row="${CSS.escape(wanted.id)}"]`);
       if (row) row.focus({ preventScroll: true });
       else if (tries++ < 10) frame = requestAnimationFrame(look);
     };
     look();
     return () => cancelAnimationFrame(frame);
   }, [wanted, scroller]);
-  return setWanted;
+  // Wanted anew each time, also where it is the row that was wanted last.
+  return useCallback((id: string) => setWanted({ id }), []);
 }
