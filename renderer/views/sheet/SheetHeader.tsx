@@ -9,6 +9,7 @@ import { useAction, useStore } from '../../app/services';
 import { neighboursOf } from '../../app/session/shownOrder';
 import { ViewHeader } from '../../app/shell/ViewHeader';
 import { Formula, useToast } from '../../parts';
+import { reportItem } from '../reports/reportItem';
 import { FreezeDialog } from './FreezeDialog';
 import './SheetHeader.css';
 
@@ -94,7 +95,14 @@ export function SheetHeader({ candidate, prediction }: SheetHeaderProps) {
             <a className="button" href={linkTo({ view: 'record', project: projectId, item: id })}>
               Record…
             </a>
-            <a className="button" href={linkTo({ view: 'reports', project: projectId, item: `card:${id}` })}>
+            <a
+              className="button"
+              href={linkTo({
+                view: 'reports',
+                project: projectId,
+                item: reportItem({ kind: 'card', names: [id] }),
+              })}
+            >
               Card…
             </a>
             <button type="button" onClick={actions.remove}>
