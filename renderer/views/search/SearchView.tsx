@@ -87,6 +87,7 @@ export default function SearchView() {
           <Before ready={ready} count={count} />
           <LeftOver
             left={runs.leftOver}
+            overlay={overlay}
             onTakeUp={(left) => runs.show(searchRuns.takeUp(left, overlay))}
             onForget={(left) => searchRuns.forget(left)}
           />

@@ -2,7 +2,7 @@
 import { describe, expect, it } from 'vitest';
 import type { FromSearch, SearchState, ShownResult, ToSearch } from '../../../workers/search/protocol';
 import { SearchRun } from './searchRun';
-import { type OpenSearch, SearchRuns } from './searchRuns';
+import { goesOnFrom, type OpenSearch, SearchRuns } from './searchRuns';
 
 class QuietWorker {
   readonly heard: ToSearch[] = [];
@@ -96,6 +96,7 @@ describe('searches of a window', () => {
     };
     await first.runs.open(notebook);
     first.runs.start('p', wish, null);
+    first.workers[0]!.say({ kind: 'progress', state: state(3, [found]), finished: false });
     const finished = first.runs.start('p', { ...wish, name: 'done' }, null);
     first.workers[1]!.say({ kind: 'progress', state: state(10, []), finished: true });
     expect(finished.open).toBe(false);
@@ -104,6 +105,10 @@ describe('searches of a window', () => {
     const second = setup();
     await second.runs.open(notebook);
     expect(second.runs.leftOver('p').map((each) => each.wish.name)).toEqual(['w']);
+    // The parameters have changed since: what was found with the old ones does not count.
+    const other = { name: 'mine', values: { 'ligand.en.f': 1.3 } } as never;
+    expect(goesOnFrom(second.runs.leftOver('p')[0]!, other)).toBeNull();
+    expect(goesOnFrom(second.runs.leftOver('p')[0]!, null)).toMatchObject({ evaluated: 3 });
     const again = second.runs.takeUp(second.runs.leftOver('p')[0]!, null);
     expect(second.runs.leftOver('p')).toEqual([]);
     expect(again.setup.wish).toEqual(wish);

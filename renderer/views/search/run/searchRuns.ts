@@ -1,11 +1,23 @@
 import type { WishInput } from '../../../../core/search';
 import { Observable } from '../../../app/session/observable';
 import type { Settings } from '../../../store';
+import { madeWithName } from '../../../workers/madeWith';
 import type { Overlay } from '../../../workers/protocol';
 import type { Checkpoint } from '../../../workers/search/protocol';
 import { type RunSetup, SearchRun } from './searchRun';
 
 export type OpenSearch = Settings['openSearches'][number];
+
+/** Where a search stood, and with which model and parameters it came there. */
+interface Noted extends Checkpoint {
+  readonly madeWith: string;
+}
+
+/** Where an unfinished search can go on; null where other parameters or another model hold now: it starts again. */
+export function goesOnFrom({ checkpoint }: OpenSearch, overlay: Overlay): Checkpoint | null {
+  const noted = checkpoint as Noted | null;
+  return noted?.madeWith === madeWithName(overlay) ? noted : null;
+}
 
 /** Time between two notes of how far the open searches have come, ms. */
 const note_ms = 3000;
@@ -66,7 +78,7 @@ export class SearchRuns extends Observable {
       ...left,
       wish: left.wish as WishInput,
       overlay,
-      from: left.checkpoint as Checkpoint | null,
+      from: goesOnFrom(left, overlay),
     });
   }
 
@@ -111,7 +123,10 @@ export class SearchRuns extends Observable {
           wish: { ...wish },
           done: state === null ? 0 : state.evaluated + state.skipped,
           count: state?.count ?? 0,
-          checkpoint,
+          checkpoint:
+            checkpoint === null
+              ? null
+              : ({ ...checkpoint, madeWith: madeWithName(run.setup.overlay) } satisfies Noted),
         },
       ];
     });
