@@ -1,4 +1,5 @@
 import { useId, useMemo, useState } from 'react';
+import { type FormulaProblem, readFormula } from '../../../../core/formula';
 import type { WishInput } from '../../../../core/search';
 import { Field } from '../../../app/form';
 import { useProject } from '../../../app/session/ProjectSession';
@@ -7,7 +8,6 @@ import { ErrorPanel, formatShare, Formula, Swatch } from '../../../parts';
 import type { ShownResult } from '../../../workers/search/protocol';
 import { useReply } from '../asking/useReply';
 import { PartList } from '../results/PartList';
-import { readComplex } from './readComplex';
 
 interface WhyNotPanelProps {
   readonly wish: WishInput;
@@ -20,8 +20,8 @@ export function WhyNotPanel({ wish, results }: WhyNotPanelProps) {
   const library = useLibrary();
   const { overlay } = useProject();
   const [text, setText] = useState('');
-  const read = useMemo(() => (text.trim() === '' ? null : readComplex(text, library)), [text, library]);
-  const composition = read?.ok === true ? read.value : null;
+  const read = useMemo(() => (text.trim() === '' ? null : readFormula(text, library)), [text, library]);
+  const composition = read?.ok === true ? read.value.composition : null;
   const { reply, current, error } = useReply(
     composition === null ? null : { kind: 'score', wish, overlay, composition },
   );
@@ -30,8 +30,8 @@ export function WhyNotPanel({ wish, results }: WhyNotPanelProps) {
       <h2 id={title}>Why not this one?</h2>
       <Field
         label="A complex that you expected"
-        hint="ion, then how many of which ligand: Fe2+ 3 bipy, Co3+ 2 en 2 Cl cis"
-        error={read?.ok === false ? sentence(read.problems[0]!) : null}
+        hint="its formula or name, such as [Fe(bpy)3]2+ or cis-[Co(en)2Cl2]+"
+        error={read?.ok === false ? problemText(read.problem) : null}
       >
         {(attributes) => (
           <input
@@ -80,8 +80,8 @@ export function WhyNotPanel({ wish, results }: WhyNotPanelProps) {
   );
 }
 
-const sentence = ({ message, remedy }: { message: string; remedy?: string }): string =>
-  remedy === undefined ? `${message}.` : `${message}: ${remedy}.`;
+const problemText = ({ at, message, suggestions }: FormulaProblem): string =>
+  `${message}, at character ${at + 1}.${suggestions.length === 0 ? '' : ` Is it ${suggestions.join(' or ')}?`}`;
 
 const byChance = <T extends { readonly probability: number }>(parts: readonly T[]): T[] =>
   [...parts].sort((one, other) => one.probability - other.probability);
