@@ -203,7 +203,7 @@ test('search and comparison have no finding of axe, light and dark', async ({ wo
   await examine('the whole form');
   await page.getByRole('button', { name: 'Start the search' }).click();
   await expect(page.getByText(/^All .* combinations were looked at/)).toBeVisible();
-  await page.getByRole('textbox', { name: 'A complex that you expected' }).fill('Fe2+ 3 bipy');
+  await page.getByRole('textbox', { name: 'A complex that you expected' }).fill('[Fe(bpy)3]2+');
   await expect(page.getByText('would meet the whole wish with a chance of')).toBeVisible();
   await examine('results');
   await page.getByRole('radio', { name: 'Chance against cost' }).check();
