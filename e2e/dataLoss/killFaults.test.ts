@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { faultsOf, noteText, type Progress } from './killFaults';
 import type { StoredState } from './storedState';
 
-const progress: Progress = { attempted: 8, confirmed: 7, starred: false, starring: false };
+const progress: Progress = { confirmations: 7, attempted: 8, confirmed: 7, starred: false, starring: false };
 const state: StoredState = {
   notes: noteText(7),
   starred: 0,

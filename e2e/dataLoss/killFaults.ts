@@ -8,6 +8,8 @@ export const noteText = (number: number): string =>
 export const numberOf = (text: string): number => Number(/^edit (\d+):/.exec(text)?.[1] ?? 0);
 
 export interface Progress {
+  /** Edits that the screen confirmed, over all kills. */
+  confirmations: number;
   attempted: number;
   confirmed: number;
   /** Whether all are starred, as the screen last confirmed, and whether a change of it is under way. */

@@ -56,6 +56,7 @@ async function writeNotes(page: Page, progress: Progress, watch: CopyWatch): Pro
     await field.blur();
     await saved.waitFor({ timeout: 60_000 });
     progress.confirmed = number;
+    progress.confirmations += 1;
     watch.confirmed(number);
   }
 }
@@ -76,6 +77,7 @@ async function starAll(page: Page, origin: string, projectId: string, progress: 
       .waitFor({ timeout: 60_000 });
     progress.starred = !progress.starred;
     progress.starring = false;
+    progress.confirmations += 1;
   }
 }
 
@@ -160,7 +162,13 @@ export async function killTest(
   const faults: string[] = [];
   const catchUps_ms: number[] = [];
   let [rescues, lostInRescues] = [0, 0];
-  const progress: Progress = { attempted: 0, confirmed: 0, starred: false, starring: false };
+  const progress: Progress = {
+    confirmations: 0,
+    attempted: 0,
+    confirmed: 0,
+    starred: false,
+    starring: false,
+  };
   const watch = new CopyWatch(copies, /"notes":"edit (\d+):/);
   let running = await startBrowser(profile);
   let whole = false;
@@ -227,7 +235,7 @@ export async function killTest(
   }
   return {
     kills,
-    confirmed: progress.attempted,
+    confirmed: progress.confirmations,
     faults,
     rescues,
     lostInRescues,

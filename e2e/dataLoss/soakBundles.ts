@@ -17,3 +17,4 @@ process.stdout.write(
     `${report.refused} refused, ${report.faults.length} faults, slowest ${Math.round(report.slowest.ms)} ms (seed ${report.slowest.seed})\n`,
 );
 process.exitCode = report.faults.length === 0 ? 0 : 1;
+store.close();

@@ -28,7 +28,7 @@ const report = await killTest(
 );
 report.faults.slice(told).forEach((fault) => process.stdout.write(`${fault}\n`));
 process.stdout.write(
-  `${report.kills} kills during ${report.confirmed} edits, ${report.faults.length} faults; ` +
+  `${report.kills} kills during ${report.confirmed} confirmed edits, ${report.faults.length} faults; ` +
     `${report.rescues} times the engine threw its store away and it was filled from the copies, ` +
     `${report.lostInRescues} confirmed edits younger than the copy; ` +
     `copy behind the screen: ${spread(report.lags_ms)}; caught up after a start: ${spread(report.catchUps_ms)}\n`,
