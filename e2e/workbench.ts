@@ -60,31 +60,35 @@ export async function openProfile(folder: string): Promise<BrowserContext> {
  * The built program as the start command serves it, with a folder for copies. Every page is watched: a test that used
  * `workbench` fails where the page complained, broke its content policy or asked for anything from elsewhere.
  */
-export const test = base.extend<{ workbench: Page; profileFolder: string }, { site: Site }>({
-  site: [
+export const test = base.extend<{ workbench: Page; profileFolder: string; site: Site }, { built: void }>({
+  built: [
     async ({}, use) => {
       if (isStale(root) && !build(root)) throw new Error('the build failed');
-      const folder = await mkdtemp(join(tmpdir(), 'spinhue-e2e-'));
-      const copies = join(folder, 'copies');
-      const mirror = new MirrorFolder({
-        folder: copies,
-        create: true,
-        stateFile: join(folder, 'written.json'),
-      });
-      const server = await startLocalServer(
-        join(root, 'dist/renderer'),
-        {
-          ...mirrorHandlers(() => mirror),
-          openExternal: () => null,
-        },
-        0,
-      );
-      await use({ server, copies });
-      await server.close();
-      await rm(folder, { recursive: true, force: true, maxRetries: 5, retryDelay: 200 });
+      await use();
     },
     { scope: 'worker' },
   ],
+  // One for each test: an empty database is filled from the copies, which must not be those of another test.
+  site: async ({ built: _ }, use) => {
+    const folder = await mkdtemp(join(tmpdir(), 'spinhue-e2e-'));
+    const copies = join(folder, 'copies');
+    const mirror = new MirrorFolder({
+      folder: copies,
+      create: true,
+      stateFile: join(folder, 'written.json'),
+    });
+    const server = await startLocalServer(
+      join(root, 'dist/renderer'),
+      {
+        ...mirrorHandlers(() => mirror),
+        openExternal: () => null,
+      },
+      0,
+    );
+    await use({ server, copies });
+    await server.close();
+    await rm(folder, { recursive: true, force: true, maxRetries: 5, retryDelay: 200 });
+  },
   workbench: async ({ context, page, site }, use) => {
     const seen = watch(context, site.server.origin);
     await page.goto(site.server.windowAddress());

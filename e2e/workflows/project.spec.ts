@@ -15,6 +15,8 @@ async function addByKeyboard(page: Page): Promise<void> {
   await expect(page.getByRole('heading', { level: 1, name: 'New candidate' })).toBeVisible();
   const metals = page.getByRole('group', { name: 'Metal' });
   await page.keyboard.press('Tab');
+  await expect(page.getByLabel('Formula or name')).toBeFocused();
+  await page.keyboard.press('Tab');
   await expect(metals.locator(':focus')).toBeVisible();
   await page.keyboard.type('ni');
   await expect(page.getByRole('radio', { name: 'nickel' })).toBeChecked();
