@@ -93,12 +93,13 @@ mkdirSync(reports, { recursive: true });
 const unitReport = resolve(reports, 'unit.json');
 rmSync(unitReport, { force: true });
 
-const [format, lint] = await Promise.all([
+const [format, lint, types] = await Promise.all([
   runBin('prettier', ['--check', '--log-level=warn', '.']),
   runBin('eslint', ['.', '--max-warnings=0']),
+  typecheck(),
 ]);
 let total = add(single('format', format), single('lint', lint));
-total = add(total, single('types', await typecheck()));
+total = add(total, single('types', types));
 const unit = await runBin('vitest', ['run', '--reporter=json', `--outputFile=${unitReport}`]);
 total = add(total, counted('unit tests', unit, 'unit.json', countUnit));
 const began = Date.now();
